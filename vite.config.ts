@@ -1,0 +1,50 @@
+import react from '@vitejs/plugin-react';
+import { defineConfig } from 'vitest/config';
+
+/** Where the API listens while Vite serves the client; `npm run dev` sets it. */
+const apiUrl = process.env.API_URL ?? 'http://127.0.0.1:3001';
+
+export default defineConfig({
+  plugins: [react()],
+  build: { outDir: 'dist/client', emptyOutDir: true, sourcemap: true, target: 'es2022' },
+  server: {
+    host: '127.0.0.1',
+    strictPort: true,
+    proxy: { '/api': { target: apiUrl, changeOrigin: false } },
+    // The checkout also holds the database and its password: only these three are anyone's to read.
+    fs: { strict: true, allow: ['src', 'public', 'node_modules'] },
+    watch: { ignored: ['**/.local/**', '**/.tsc/**', '**/dist/**'] },
+  },
+  test: {
+    projects: [
+      {
+        extends: true,
+        test: {
+          name: 'unit',
+          include: ['tests/{domain,contract,architecture}/**/*.test.ts'],
+          environment: 'node',
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'server',
+          include: ['tests/{server,migrations}/**/*.test.ts'],
+          environment: 'node',
+          globalSetup: ['tests/support/template-database.ts'],
+          testTimeout: 20_000,
+          hookTimeout: 30_000,
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'client',
+          include: ['tests/client/**/*.test.{ts,tsx}'],
+          environment: 'jsdom',
+          setupFiles: ['tests/support/client-setup.ts'],
+        },
+      },
+    ],
+  },
+});
