@@ -1,0 +1,40 @@
+/** The closed list of what the history can tell. Past tense; one payload type each, versioned when it changes. */
+export type AuditPayloads = {
+  'person.signed-in': { readonly by: 'password' | 'badge' };
+  'person.sign-in-refused': { readonly by: 'password' | 'badge'; readonly reason: string };
+  'person.signed-out': { readonly everywhere: boolean };
+  'person.changed-password': Record<string, never>;
+  'person.added': { readonly role: string };
+  'person.changed': { readonly before: unknown; readonly after: unknown };
+  'person.password-reset': { readonly expiresAt: string };
+  'item.added': { readonly code: string };
+  'item.changed': { readonly before: unknown; readonly after: unknown };
+  'items.imported': { readonly added: number; readonly changed: number; readonly refused: number };
+  'equipment.added': { readonly what: string; readonly code: string };
+  'equipment.changed': { readonly what: string; readonly before: unknown; readonly after: unknown };
+  'equipment.imported': { readonly what: string; readonly added: number; readonly changed: number; readonly refused: number };
+  'package.packed': { readonly code: string; readonly itemCode: string };
+  'package.label-printed': { readonly copy: number; readonly reason: string | null };
+  'package.staged': { readonly runId: string };
+  'package.unstaged': { readonly runId: string };
+  'run.added': { readonly name: string };
+  'run.changed': { readonly before: unknown; readonly after: unknown };
+  'air-removal-test.recorded': { readonly sterilizer: string; readonly result: 'passed' | 'failed'; readonly testDay: string };
+  'load.opened': { readonly number: string; readonly listed: number };
+  'load.package-scanned': { readonly packageCode: string; readonly entry: string; readonly placement: unknown };
+  'load.package-moved': { readonly before: unknown; readonly after: unknown };
+  'load.package-taken-off': { readonly packageCode: string; readonly wasScanned: boolean };
+  'load.holder-placed': { readonly holder: string; readonly after: unknown };
+  'load.holder-taken-off': { readonly holder: string };
+  'load.counted': { readonly shelf: string; readonly counted: number };
+  'load.finding-accepted': { readonly findingKey: string; readonly ruleId: string; readonly reason: string };
+  'load.undone': { readonly undid: string };
+  'load.changed': { readonly before: unknown; readonly after: unknown };
+  'load.sticker-printed': { readonly copy: number; readonly reason: string | null };
+  'load.sticker-voided': { readonly reason: string };
+  'load.close-refused': { readonly blocks: readonly string[] };
+  'load.closed': { readonly digest: string; readonly ruleSet: string };
+  'load.abandoned': { readonly reason: string };
+};
+
+export type AuditKind = keyof AuditPayloads;
