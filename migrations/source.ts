@@ -1,0 +1,22 @@
+import type { Knex } from 'knex';
+import * as createFirstTables from './20261201090000_create_first_tables';
+
+/**
+ * Every migration, oldest first. A static list and names without extension, since Knex stores the names: the same
+ * ones then hold under tsx, in Vitest and in a bundle, where its own reading of the folder differs or fails.
+ */
+const migrations: Readonly<Record<string, Knex.Migration>> = {
+  '20261201090000_create_first_tables': createFirstTables,
+};
+
+export const migrationSource: Knex.MigrationSource<string> = {
+  getMigrations: () => Promise.resolve(Object.keys(migrations).sort()),
+  getMigrationName: (name) => name,
+  getMigration: (name) => {
+    const migration = migrations[name];
+    if (migration === undefined) return Promise.reject(new Error(`There is no migration called ${name}.`));
+    return Promise.resolve(migration);
+  },
+};
+
+export const migrationTable = 'schema_migrations';

@@ -1,0 +1,29 @@
+import knexModule, { type Knex } from 'knex';
+import pg from 'pg';
+
+// DATE as text: a local-midnight Date would shift expiry days by the zone. INT8 as a checked number.
+const DATE_OID = 1082;
+const INT8_OID = 20;
+pg.types.setTypeParser(DATE_OID, (text) => text);
+pg.types.setTypeParser(INT8_OID, (text) => {
+  const value = Number(text);
+  if (!Number.isSafeInteger(value)) throw new RangeError(`${text} is too large to be counted exactly`);
+  return value;
+});
+
+export type Db = Knex;
+export type Transaction = Knex.Transaction;
+
+export function openDb(url: string, largestPool = 10): Db {
+  return knexModule({
+    client: 'pg',
+    connection: { connectionString: url, application_name: 'paperside', statement_timeout: 15_000 },
+    pool: { min: 0, max: largestPool },
+    acquireConnectionTimeout: 10_000,
+  });
+}
+
+/** A pool of its own for the session store, which speaks pg and not knex. */
+export function openSessionPool(url: string): pg.Pool {
+  return new pg.Pool({ connectionString: url, max: 4, application_name: 'paperside sessions' });
+}
