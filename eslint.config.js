@@ -22,6 +22,11 @@ const impureInDomain = [
   },
 ];
 
+const noEnum = {
+  selector: 'TSEnumDeclaration',
+  message: 'A closed set is a union of texts: it crosses the wire and the database as it is.',
+};
+
 export default defineConfig([
   globalIgnores(['dist/', '.local/', '.tsc/', 'coverage/']),
   { linterOptions: { reportUnusedDisableDirectives: 'error' } },
@@ -31,6 +36,7 @@ export default defineConfig([
     languageOptions: { parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname } },
     rules: {
       eqeqeq: 'error',
+      'no-restricted-syntax': ['error', noEnum],
       '@typescript-eslint/consistent-type-definitions': ['error', 'type'],
       '@typescript-eslint/consistent-type-imports': 'error',
       '@typescript-eslint/no-misused-promises': ['error', { checksVoidReturn: { attributes: false } }],
@@ -40,7 +46,7 @@ export default defineConfig([
     },
   },
   { files: ['**/*.cjs'], rules: { '@typescript-eslint/no-require-imports': 'off' } },
-  { files: ['src/domain/**/*.ts'], rules: { 'no-restricted-syntax': ['error', ...impureInDomain] } },
+  { files: ['src/domain/**/*.ts'], rules: { 'no-restricted-syntax': ['error', noEnum, ...impureInDomain] } },
   { files: ['src/**/*.{ts,tsx}'], ...reactHooks.configs.flat['recommended-latest'] },
   {
     // A declaration that widens a library's own interface has to be an interface itself.

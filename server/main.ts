@@ -49,16 +49,17 @@ let isStopping = false;
 async function stop(): Promise<void> {
   if (isStopping) return;
   isStopping = true;
-  server.close();
+  const closed = new Promise<void>((resolve) => {
+    server.close(() => {
+      resolve();
+    });
+  });
   server.closeIdleConnections();
   // Streams and slow downloads do not end by themselves.
   setTimeout(() => {
     server.closeAllConnections();
   }, 1_000).unref();
-  await new Promise<void>((resolve) => {
-    if (server.listening) server.once('close', resolve);
-    else resolve();
-  });
+  await closed;
   await sessionPool.end();
   await db.destroy();
 }
