@@ -9,6 +9,8 @@ export type Celsius = Quantity<'degC'>;
 export type Kilopascal = Quantity<'kPa absolute'>;
 export type Second = Quantity<'s'>;
 export type Degree = Quantity<'deg'>;
+export type Percent = Quantity<'%'>;
+export type KilogramPerMinute = Quantity<'kg/min'>;
 
 export function mm(value: number): Millimetre {
   return value as Millimetre;
@@ -32,4 +34,12 @@ export function seconds(value: number): Second {
 
 export function degrees(value: number): Degree {
   return value as Degree;
+}
+
+export function percent(value: number): Percent {
+  return value as Percent;
+}
+
+export function kilogramsPerMinute(value: number): KilogramPerMinute {
+  return value as KilogramPerMinute;
 }
