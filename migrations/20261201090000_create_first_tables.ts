@@ -412,6 +412,8 @@ export async function up(knex: Knex): Promise<void> {
       id uuid primary key,
       load_id uuid not null constraint load_stickers_load_id_fkey references loads (id),
       package_id uuid not null constraint load_stickers_package_id_fkey references packages (id),
+      -- The stickers printed in one go.
+      batch_id uuid not null,
       copy integer not null,
       reason text,
       printed_by uuid not null constraint load_stickers_printed_by_fkey references people (id),

@@ -64,6 +64,18 @@ async function programsOnPanel(
   return rows.map(programFromRow);
 }
 
+/** A program of the facility, also one that is retired or that no sterilizer is qualified for. */
+export async function programById(
+  trx: Transaction | Db,
+  facilityId: string,
+  programId: string,
+): Promise<Program | undefined> {
+  const row = await trx('programs')
+    .where({ 'programs.facility_id': facilityId, 'programs.id': programId })
+    .first<ProgramRow | undefined>('programs.*');
+  return row && programFromRow(row);
+}
+
 /** Programs this sterilizer is qualified for and that are still in use, by code. */
 export function qualifiedPrograms(trx: Transaction | Db, facilityId: string, sterilizerId: string): Promise<Program[]> {
   return programsOnPanel(trx, facilityId, sterilizerId, true);

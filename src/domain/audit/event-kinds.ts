@@ -1,3 +1,5 @@
+import type { LoadDifference } from '../load/difference';
+
 /** The closed list of what the history can tell. Past tense; one payload type each, versioned when it changes. */
 export type AuditPayloads = {
   'person.signed-in': { readonly by: 'password' | 'badge' };
@@ -21,15 +23,17 @@ export type AuditPayloads = {
   'run.changed': { readonly before: unknown; readonly after: unknown };
   'air-removal-test.recorded': { readonly sterilizer: string; readonly result: 'passed' | 'failed'; readonly testDay: string };
   'load.opened': { readonly number: string; readonly listed: number };
-  'load.package-scanned': { readonly packageCode: string; readonly entry: string; readonly placement: unknown };
-  'load.package-moved': { readonly before: unknown; readonly after: unknown };
-  'load.package-taken-off': { readonly packageCode: string; readonly wasScanned: boolean };
-  'load.holder-placed': { readonly holder: string; readonly after: unknown };
-  'load.holder-taken-off': { readonly holder: string };
+  'load.package-scanned': { readonly packageCode: string; readonly entry: string; readonly difference: LoadDifference };
+  'load.scan-refused': { readonly answer: string; readonly read: string; readonly entry: string };
+  'load.package-moved': { readonly packageCode: string; readonly difference: LoadDifference };
+  'load.package-taken-off': { readonly packageCode: string; readonly difference: LoadDifference };
+  'load.arranged': { readonly packages: number; readonly difference: LoadDifference };
+  'load.holder-placed': { readonly holder: string; readonly difference: LoadDifference };
+  'load.holder-taken-off': { readonly holder: string; readonly difference: LoadDifference };
+  'load.program-changed': { readonly before: string; readonly after: string; readonly difference: LoadDifference };
+  'load.undone': { readonly undid: number; readonly difference: LoadDifference };
   'load.counted': { readonly shelf: string; readonly counted: number };
   'load.finding-accepted': { readonly findingKey: string; readonly ruleId: string; readonly reason: string };
-  'load.undone': { readonly undid: string };
-  'load.changed': { readonly before: unknown; readonly after: unknown };
   'load.sticker-printed': { readonly copy: number; readonly reason: string | null };
   'load.sticker-voided': { readonly reason: string };
   'load.close-refused': { readonly blocks: readonly string[] };

@@ -1,0 +1,81 @@
+import type { EditLoadRequest, LoadChange } from '#contract/loads';
+import { applyEdits, type SpareHolder } from '#domain/load/apply-edit';
+import type { LoadDifference } from '#domain/load/difference';
+import type { LoadEdit } from '#domain/load/finding';
+import type { LoadView } from '#domain/load/model';
+import type { Services } from '../../http/define-route';
+import type { Actor } from '../../platform/actor';
+import type { Transaction } from '../../platform/db';
+import { NotFound, RuleRefused } from '../../platform/errors';
+import { once } from '../../platform/once';
+import { holderById } from '../equipment/read-model';
+import { recordAct, requireBuilding, type ActKind } from './load-change';
+import { lockLoad } from './load-store';
+import { readLoadView, type LoadAsKnown } from './load-view-read-model';
+import { requireHolderFree } from './require-holder-free';
+import type { AuditPayloads } from '#domain/audit/event-kinds';
+
+type Telling = { readonly [Kind in ActKind]: { readonly kind: Kind; readonly payload: AuditPayloads[Kind] } }[ActKind];
+
+/** Moves, turns, takes off: one edit or several that belong together, all or none. */
+export async function editLoad(
+  services: Services,
+  actor: Actor,
+  loadId: string,
+  request: EditLoadRequest,
+): Promise<{ change: LoadChange }> {
+  const { db, clock } = services;
+  return once({ db, clock, actor }, { requestId: request.requestId, act: 'load.edit', body: { loadId, ...request } }, async (trx) => {
+    const at = clock.now();
+    const load = await lockLoad(trx, actor.facilityId, loadId);
+    requireBuilding(load);
+    const known = await readLoadView(trx, load, at);
+    const applied = applyEdits(known.view, request.edits, await sparesFor(trx, known, request.edits));
+    if (!applied.ok) throw new RuleRefused(applied.refusal.code, applied.refusal.sentence);
+    const change = await recordAct(trx, known, applied.value, { actor, at, requestId: request.requestId }, (difference) =>
+      tellingOf(known.view, request.edits, difference),
+    );
+    return { change };
+  });
+}
+
+/** Holders that the edits put on the cart and that are not on it yet: locked, if nobody else has them. */
+async function sparesFor(trx: Transaction, known: LoadAsKnown, edits: readonly LoadEdit[]): Promise<SpareHolder[]> {
+  const spares: SpareHolder[] = [];
+  for (const edit of edits) {
+    if (edit.edit !== 'place-holder' || known.view.holders.some((holder) => holder.holderId === edit.holderId)) continue;
+    const holder = await holderById(trx, known.load.facility_id, edit.holderId);
+    if (!holder) throw new NotFound('holder.none', 'There is no such holder here.');
+    await requireHolderFree(trx, holder);
+    spares.push({ holderId: holder.holderId, name: holder.name, placeCode: holder.placeCode, kindId: holder.kind.id });
+  }
+  return spares;
+}
+
+function tellingOf(view: LoadView, edits: readonly LoadEdit[], difference: LoadDifference): Telling {
+  const only = edits.length === 1 ? edits[0] : undefined;
+  const codeOf = (packageId: string) => view.packages.find((entry) => entry.packageId === packageId)?.code ?? packageId;
+  const nameOf = (holderId: string) =>
+    view.holders.find((entry) => entry.holderId === holderId)?.name ??
+    difference.holders.find((entry) => entry.id === holderId)?.after?.name ??
+    holderId;
+  switch (only?.edit) {
+    case 'place':
+    case 'turn-paper':
+    case 'set-pose':
+      return { kind: 'load.package-moved', payload: { packageCode: codeOf(only.packageId), difference } };
+    case 'take-off':
+      return { kind: 'load.package-taken-off', payload: { packageCode: codeOf(only.packageId), difference } };
+    case 'place-holder':
+      return { kind: 'load.holder-placed', payload: { holder: nameOf(only.holderId), difference } };
+    case 'take-holder-off':
+      return { kind: 'load.holder-taken-off', payload: { holder: nameOf(only.holderId), difference } };
+    case 'change-program':
+      return {
+        kind: 'load.program-changed',
+        payload: { before: view.program.code, after: difference.program?.after.code ?? view.program.code, difference },
+      };
+    case undefined:
+      return { kind: 'load.arranged', payload: { packages: difference.packages.length, difference } };
+  }
+}

@@ -1,0 +1,84 @@
+import type { LoadChange } from '#contract/loads';
+import { affectedShelves } from '#domain/load/apply-edit';
+import type { AuditKind, AuditPayloads } from '#domain/audit/event-kinds';
+import { differenceOf, isEmptyDifference, type LoadDifference } from '#domain/load/difference';
+import type { LoadView } from '#domain/load/model';
+import type { Actor } from '../../platform/actor';
+import { appendEvent } from '../../platform/audit-writer';
+import type { Transaction } from '../../platform/db';
+import { RuleRefused } from '../../platform/errors';
+import { getUndoable } from './undoable-read-model';
+import type { LoadAsKnown } from './load-view-read-model';
+import { listAcceptances, listCounts, stepVersion, voidCounts, writeDifference, type LoadRow } from './load-store';
+
+/** Only a load that is still being built can be changed. */
+export function requireBuilding(load: LoadRow): void {
+  if (load.state !== 'building') {
+    throw new RuleRefused('load.not-building', `Load ${load.number} is not being built any more. Nothing was changed.`);
+  }
+}
+
+export type ActKind = {
+  [Kind in AuditKind]: AuditPayloads[Kind] extends { readonly difference: LoadDifference } ? Kind : never;
+}[AuditKind];
+
+export type LoadAct = {
+  readonly actor: Actor;
+  readonly at: Date;
+  readonly requestId: string;
+  readonly entry?: string;
+};
+
+/** Writes one act on a load: what changed, the counts it voids, the event that tells it, the next version. */
+export async function recordAct<Kind extends ActKind>(
+  trx: Transaction,
+  known: LoadAsKnown,
+  after: LoadView,
+  act: LoadAct,
+  tell: (difference: LoadDifference) => { readonly kind: Kind; readonly payload: AuditPayloads[Kind] },
+): Promise<LoadChange> {
+  const { load, view } = known;
+  const difference = differenceOf(view, after);
+  if (isEmptyDifference(difference)) return changeFrom(trx, load, load.version, after, difference);
+  await writeDifference(trx, load.id, difference, { personId: act.actor.personId, at: act.at, entry: act.entry ?? 'keyed' });
+  await voidCounts(trx, load.id, affectedShelves(view, after));
+  const { kind, payload } = tell(difference);
+  await appendEvent(trx, {
+    kind,
+    at: act.at,
+    facilityId: load.facility_id,
+    actorId: act.actor.personId,
+    subjectKind: 'load',
+    subjectId: load.id,
+    loadId: load.id,
+    requestId: act.requestId,
+    payload,
+  });
+  return changeFrom(trx, load, await stepVersion(trx, load), after, difference);
+}
+
+/** The part of a load that changed, for whoever holds the version before. */
+export async function changeFrom(
+  trx: Transaction,
+  load: LoadRow,
+  version: number,
+  after: LoadView,
+  difference: LoadDifference,
+): Promise<LoadChange> {
+  const changed = difference.packages.flatMap((change) => (change.after ? [change.after] : []));
+  const newItemIds = new Set(
+    difference.packages.flatMap((change) => (change.before === null && change.after ? [change.after.itemId] : [])),
+  );
+  return {
+    from: load.version,
+    version,
+    packages: changed,
+    removedPackageIds: difference.packages.flatMap((change) => (change.after === null ? [change.id] : [])),
+    items: after.items.filter((item) => newItemIds.has(item.id)),
+    holders: [...after.holders],
+    program: after.program,
+    counts: await listCounts(trx, load.id),
+    acceptances: await listAcceptances(trx, load.id),
+    undoable: (await getUndoable(trx, load.id))?.words ?? null,
+  };
+}
