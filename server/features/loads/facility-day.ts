@@ -1,4 +1,4 @@
-import { loadDay } from '#domain/label/load-number';
+import { productionDay } from '#domain/time/production-day';
 import type { Db, Transaction } from '../../platform/db';
 
 export type FacilityFacts = {
@@ -32,6 +32,6 @@ export async function facilityAt(db: Db | Transaction, facilityId: string, at: D
     name: row.name,
     timeZone: row.time_zone,
     loadNumberPattern: row.load_number_pattern,
-    day: loadDay(at.toISOString(), { timeZone: row.time_zone, dayStartsAt }),
+    day: productionDay(at.toISOString(), row.time_zone, dayStartsAt),
   };
 }
