@@ -6,9 +6,11 @@ export type AuditPayloads = {
   'person.sign-in-refused': { readonly by: 'password' | 'badge'; readonly reason: string };
   'person.signed-out': { readonly everywhere: boolean };
   'person.changed-password': Record<string, never>;
+  'person.changed-pin': Record<string, never>;
   'person.added': { readonly role: string };
   'person.changed': { readonly before: unknown; readonly after: unknown };
   'person.password-reset': { readonly expiresAt: string };
+  'person.pin-reset': Record<string, never>;
   'item.added': { readonly code: string };
   'item.changed': { readonly before: unknown; readonly after: unknown };
   'items.imported': { readonly added: number; readonly changed: number; readonly refused: number };

@@ -1,0 +1,3 @@
+import type { Route } from '../../http/define-route';
+
+export const peopleRoutes: readonly Route[] = [];

@@ -1,0 +1,33 @@
+import { readScan } from '#domain/label/read-scan';
+import type { BadgeSignInRequest, SessionResponse } from '#contract/session';
+import type { Request } from 'express';
+import type { Services } from '../../http/define-route';
+import { InvalidInput } from '../../platform/errors';
+import { sourceOf, subjectOf, takeTry } from '../../platform/sign-in-tries';
+import { admit, judgeSignIn } from './judge-sign-in';
+import { getSession } from './session-read-model';
+import { findByBadge } from './sign-in-store';
+
+/** The change of person at a shared station: one request ends the former session and begins the next. */
+export async function signInWithBadge(
+  services: Services,
+  request: Request,
+  { badge, pin }: BadgeSignInRequest,
+): Promise<SessionResponse> {
+  const scan = readScan(badge);
+  if (scan.kind !== 'badge') {
+    throw new InvalidInput('session.not-a-badge', 'This is not a badge. Scan the code on your badge.');
+  }
+  const tryId = await takeTry(services, { subject: subjectOf('badge', scan.code), source: sourceOf(request.ip) });
+  const person = await findByBadge(services.db, scan.code);
+  const admitted = await judgeSignIn(services, {
+    by: 'badge',
+    tryId,
+    person,
+    kept: person?.pinHash ?? null,
+    secret: pin,
+    sentence: 'Badge and PIN do not belong together. Scan again and type your PIN.',
+  });
+  const signIn = await admit(services, request, admitted, 'badge');
+  return getSession(services.db, signIn, services.clock.now());
+}
