@@ -290,6 +290,8 @@ export async function up(knex: Knex): Promise<void> {
     create table label_prints (
       id uuid primary key,
       package_id uuid not null constraint label_prints_package_id_fkey references packages (id),
+      -- The labels printed in one go.
+      batch_id uuid not null,
       copy integer not null,
       reason text,
       printed_by uuid not null constraint label_prints_printed_by_fkey references people (id),
@@ -297,6 +299,7 @@ export async function up(knex: Knex): Promise<void> {
       constraint label_prints_package_id_copy_key unique (package_id, copy),
       constraint label_prints_reason_check check (copy = 1 or length(trim(reason)) > 0)
     );
+    create index label_prints_batch_id_idx on label_prints (batch_id);
 
     create table air_removal_tests (
       id uuid primary key,

@@ -16,7 +16,7 @@ export const searchSchema = z
   .string()
   .trim()
   .max(100, 'At most 100 characters.')
-   
+
   .refine((text) => !/[\u0000-\u001f\u007f]/.test(text), 'This has a character that cannot be searched for.');
 
 /** A page of a list, counted from 1; text, because it comes in an address. */
@@ -154,18 +154,11 @@ export const printLabelsRequestSchema = z.strictObject({
 export type PrintLabelsRequest = z.infer<typeof printLabelsRequestSchema>;
 
 export const printLabelsResponseSchema = z.object({
-  prints: z.array(z.object({ id: idSchema, packageId: idSchema, copy: z.number().int() })),
+  labels: z.array(z.object({ packageId: idSchema, copy: z.number().int() })),
   /** Address of the labels as PDF. */
   pdf: z.string(),
 });
 export type PrintLabelsResponse = z.infer<typeof printLabelsResponseSchema>;
 
-/** Ids of label prints, joined by full stops. */
-export const labelSheetQuerySchema = z.strictObject({
-  prints: z
-    .string()
-    .max(greatestLabelSheet * 37)
-    .transform((text) => text.split('.'))
-    .pipe(z.array(z.uuid('This is not the address of a label.')).min(1).max(greatestLabelSheet)),
-  layout: labelLayoutSchema,
-});
+export const labelSheetParamsSchema = z.strictObject({ batchId: idSchema });
+export const labelSheetQuerySchema = z.strictObject({ layout: labelLayoutSchema });

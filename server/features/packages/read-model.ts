@@ -17,6 +17,7 @@ export type PackageFacts = {
   /** Why nobody may use or load it, whatever its state; null when nothing is against it. */
   readonly heldReason: string | null;
   readonly runId: string | null;
+  readonly run: { readonly id: string; readonly name: string; readonly state: RunFacts['state'] } | null;
   /** Calendar day, YYYY-MM-DD; null where expiry is event-related. */
   readonly expiresOn: string | null;
   readonly hasExternalIndicator: boolean;
@@ -59,6 +60,8 @@ type PackageRow = {
   readonly state: PackageState;
   readonly held_reason: string | null;
   readonly run_id: string | null;
+  readonly run_name: string | null;
+  readonly run_state: RunFacts['state'] | null;
   readonly expires_on: string | null;
   readonly has_external_indicator: boolean;
   readonly has_internal_indicator: boolean;
@@ -80,6 +83,10 @@ function fromRow(row: PackageRow): PackageFacts {
     state: row.state,
     heldReason: row.held_reason,
     runId: row.run_id,
+    run:
+      row.run_id === null || row.run_name === null || row.run_state === null
+        ? null
+        : { id: row.run_id, name: row.run_name, state: row.run_state },
     expiresOn: row.expires_on,
     hasExternalIndicator: row.has_external_indicator,
     hasInternalIndicator: row.has_internal_indicator,
@@ -94,6 +101,7 @@ function fromRow(row: PackageRow): PackageFacts {
 function packageFacts(trx: Transaction | Db) {
   return trx('packages')
     .join('items', 'items.id', 'packages.item_id')
+    .leftJoin('runs', 'runs.id', 'packages.run_id')
     .leftJoin('load_packages', (join) => {
       join.on('load_packages.package_id', 'packages.id').andOnVal('load_packages.is_open', true);
     })
@@ -110,6 +118,8 @@ function packageFacts(trx: Transaction | Db) {
       'packages.state',
       'packages.held_reason',
       'packages.run_id',
+      'runs.name as run_name',
+      'runs.state as run_state',
       'packages.expires_on',
       'packages.has_external_indicator',
       'packages.has_internal_indicator',

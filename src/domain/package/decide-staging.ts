@@ -12,7 +12,8 @@ export type StagingPackage = {
   readonly heldReason: string | null;
   /** YYYY-MM-DD; null where expiry is event-related. */
   readonly expiresOn: string | null;
-  readonly runId: string | null;
+  /** The run it waits in or waited in last. */
+  readonly run: StagingRun | null;
   readonly openLoad: { readonly number: string } | null;
 };
 
@@ -21,10 +22,15 @@ export type RunState = 'waiting' | 'taken' | 'dropped';
 export type StagingRun = { readonly id: string; readonly name: string; readonly state: RunState };
 
 export type StagingRefusal =
-  'package.called-back' | 'package.held' | 'package.expired' | 'package.in-another-load' | 'package.not-ready';
+  | 'package.called-back'
+  | 'package.held'
+  | 'package.expired'
+  | 'package.in-another-load'
+  | 'package.in-another-run'
+  | 'package.not-ready';
 
-/** `stage`: it goes into the run, out of the run it waited in before, if any. `already-here`: nothing to do. */
-export type Staging = { readonly act: 'stage'; readonly fromRunId: string | null } | { readonly act: 'already-here' };
+/** `stage`: it goes into the run. `already-here`: nothing to do. */
+export type Staging = 'stage' | 'already-here';
 
 /**
  * Whether the package may wait in this run.
@@ -54,8 +60,11 @@ export function decideStaging(
   if (isExpired(candidate.expiresOn, today)) {
     return refuse('package.expired', `${code} is past its last day. Send it back to be packed anew.`);
   }
-  if (candidate.state === 'staged' && candidate.runId === run.id) return accept({ act: 'already-here' });
-  return accept({ act: 'stage', fromRunId: candidate.state === 'staged' ? candidate.runId : null });
+  if (candidate.state === 'packed') return accept<Staging>('stage');
+  if (candidate.run?.id === run.id) return accept<Staging>('already-here');
+  // Taken off a load again, it is staged still, and its run is over: it may go into a new one.
+  if (candidate.run?.state !== 'waiting') return accept<Staging>('stage');
+  return refuse('package.in-another-run', `${code} waits in “${candidate.run.name}”. Take it out there first.`);
 }
 
 /** Whether anything may go into the run, or it may be dropped. */
@@ -82,7 +91,7 @@ export function decideRemoval(
       `${code} is in load ${candidate.openLoad.number}. Take it off there first.`,
     );
   }
-  if (candidate.state !== 'staged' || candidate.runId !== run.id) {
+  if (candidate.state !== 'staged' || candidate.run?.id !== run.id) {
     return refuse('package.not-in-run', `${code} does not wait in “${run.name}”.`);
   }
   return accept(null);

@@ -52,7 +52,9 @@ function packagesInWords(count: number): string {
 
 function airRemoval(facts: TodayFacts): Wait[] {
   return facts.sterilizers
-    .filter((sterilizer) => sterilizer.isInService && sterilizer.needsAirRemovalTest && sterilizer.lastTest !== 'passed')
+    .filter(
+      (sterilizer) => sterilizer.isInService && sterilizer.needsAirRemovalTest && sterilizer.lastTest !== 'passed',
+    )
     .map((sterilizer): Wait => {
       const about = { sterilizerId: sterilizer.id };
       return sterilizer.lastTest === 'failed'

@@ -1,0 +1,86 @@
+import type { StagingScanResponse } from '#contract/runs';
+import { readScan, type Scan } from '#domain/label/read-scan';
+import { decideStaging, type StagingRefusal } from '#domain/package/decide-staging';
+import type { Services } from '../../http/define-route';
+import type { Actor } from '../../platform/actor';
+import type { Transaction } from '../../platform/db';
+import { once } from '../../platform/once';
+import { facilityDay } from './facility-day';
+import { setRun } from './package-store';
+import { findPackageByCode, lockPackages, type RunFacts } from './read-model';
+import { lockWaitingRun, recordStaging, type RunAct } from './run-acts';
+
+const answerTo: Readonly<Record<StagingRefusal, StagingScanResponse['answer']>> = {
+  'package.called-back': 'called-back',
+  'package.held': 'held',
+  'package.expired': 'not-ready',
+  'package.in-another-load': 'not-ready',
+  'package.in-another-run': 'not-ready',
+  'package.not-ready': 'not-ready',
+};
+
+const shownLength = 40;
+
+/** What was read, fit to be shown: short, and without the characters that cannot be seen. */
+function shown(raw: string): string {
+  const visible = raw
+    .slice(0, 400)
+    .replace(/[\p{Cc}\p{Cs}]/gu, ' ')
+    .trim();
+  return visible.length > shownLength ? `${visible.slice(0, shownLength)}…` : visible;
+}
+
+function notAPackage(scan: Exclude<Scan, { kind: 'package' }>): string {
+  switch (scan.kind) {
+    case 'place':
+      return 'That is the code of a place on a cart. Scan the package’s own label.';
+    case 'badge':
+      return 'That is a badge. Open “Change person” to use it.';
+    case 'load-sticker':
+      return `That is a load sticker of load ${scan.loadNumber}. Scan the package’s own label.`;
+    case 'device':
+      return 'That is the maker’s code. Scan the package’s own label.';
+    case 'unreadable':
+      return scan.sentence;
+  }
+}
+
+/** Takes one scan at a run. Only the answer `taken` changes anything. */
+export async function scanIntoRun(
+  services: Services,
+  actor: Actor,
+  runId: string,
+  request: { readonly requestId: string; readonly raw: string },
+): Promise<StagingScanResponse> {
+  const { db, clock } = services;
+  const body = { runId, ...request };
+  return once({ db, clock, actor }, { requestId: request.requestId, act: 'run.scan', body }, async (trx) => {
+    const act: RunAct = { actor, at: clock.now(), requestId: request.requestId };
+    const run = await lockWaitingRun(trx, actor, runId);
+    const scan = readScan(request.raw);
+    if (scan.kind !== 'package') {
+      return { answer: 'not-known', sentence: notAPackage(scan), code: shown(request.raw), package: null };
+    }
+    return stageScanned(trx, act, run, scan.code);
+  });
+}
+
+async function stageScanned(trx: Transaction, act: RunAct, run: RunFacts, code: string): Promise<StagingScanResponse> {
+  const known = await findPackageByCode(trx, code);
+  // Another facility's label is not known here: not even that it exists.
+  if (known?.facilityId !== act.actor.facilityId) {
+    return { answer: 'not-known', sentence: `No package here has the code ${code}.`, code, package: null };
+  }
+  await lockPackages(trx, [known.id]);
+  const facts = (await findPackageByCode(trx, code)) ?? known;
+  const about = { code, package: { id: facts.id, code: facts.code, itemName: facts.itemName } };
+  const { day } = await facilityDay(trx, act.actor.facilityId, act.at);
+  const decision = decideStaging(facts, run, day);
+  if (!decision.ok) return { ...about, answer: answerTo[decision.refusal.code], sentence: decision.refusal.sentence };
+  if (decision.value === 'already-here') {
+    return { ...about, answer: 'already-here', sentence: `${code} waits in “${run.name}” already.` };
+  }
+  await setRun(trx, [facts.id], run.id);
+  await recordStaging(trx, act, 'package.staged', [facts.id], run.id);
+  return { ...about, answer: 'taken', sentence: `${facts.itemName} waits in “${run.name}”.` };
+}
