@@ -145,7 +145,10 @@ export const api = {
 } as const;
 
 /** Adds the query parameters that have a value: `withQuery('/api/items', { search: 'tray', page: 2 })`. */
-export function withQuery(path: string, parameters: Readonly<Record<string, string | number | boolean | null | undefined>>): string {
+export function withQuery(
+  path: string,
+  parameters: Readonly<Record<string, string | number | boolean | null | undefined>>,
+): string {
   const query = new URLSearchParams();
   for (const [name, value] of Object.entries(parameters)) {
     if (value !== undefined && value !== null && value !== '') query.set(name, String(value));

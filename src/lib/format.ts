@@ -115,9 +115,7 @@ export function formatSize(mm: readonly number[], unitSystem: UnitSystem): strin
 
 /** Kilograms in the facility's unit: "7.4 kg" or "16.3 lb". */
 export function formatMass(kg: number, unitSystem: UnitSystem): string {
-  return unitSystem === 'metric'
-    ? `${formatNumber(kg, kg < 1 ? 2 : 1)} kg`
-    : `${formatNumber(kg / kgPerPound, 1)} lb`;
+  return unitSystem === 'metric' ? `${formatNumber(kg, kg < 1 ? 2 : 1)} kg` : `${formatNumber(kg / kgPerPound, 1)} lb`;
 }
 
 /** Degrees Celsius in the facility's unit: "132 °C" or "270 °F". */

@@ -1,0 +1,21 @@
+import { EmptyState } from '../components/ui/states';
+import { LinkButton } from '../components/ui/link-button';
+
+/** An address with nothing behind it. */
+export function NotFound({ sentence }: { sentence?: string | undefined }) {
+  return (
+    <main className="max-w-130 p-6">
+      <title>Not here · Paperside</title>
+      <EmptyState
+        title="There is nothing at this address"
+        act={
+          <LinkButton to="/" size="small">
+            Go to Today
+          </LinkButton>
+        }
+      >
+        {sentence ?? 'It may have been typed wrong, or belong to another place of work.'}
+      </EmptyState>
+    </main>
+  );
+}
