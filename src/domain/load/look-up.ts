@@ -75,7 +75,7 @@ export function idsAbove(view: LoadView, packageIds: Iterable<string>): Readonly
 }
 
 export function hasPaperSide(item: CatalogueItem | undefined): boolean {
-  return item?.packaging === 'paper-film-pouch' || item?.packaging === 'double-pouch';
+  return item?.kind === 'pouch';
 }
 
 /** Where the paper side of a pouch can look in a pose. */
