@@ -4,7 +4,7 @@ import { paths } from '#contract/paths';
 import connectPgSimple from 'connect-pg-simple';
 import express, { type Request, type RequestHandler } from 'express';
 import expressSession from 'express-session';
-import passport, { type Authenticator, type Strategy } from 'passport';
+import passport, { type Strategy } from 'passport';
 import type pg from 'pg';
 import { z } from 'zod';
 import { findStanding } from '../platform/standing';
@@ -32,7 +32,11 @@ const signInSchema = z.object({
 /** What a session holds of a sign-in. Everything else is read afresh with every request. */
 export type SignIn = z.infer<typeof signInSchema>;
 
-type Station = { readonly passport: Authenticator; readonly cookieName: string; readonly isCookieSecure: boolean };
+type Station = {
+  readonly passport: InstanceType<typeof passport.Passport>;
+  readonly cookieName: string;
+  readonly isCookieSecure: boolean;
+};
 
 /** The session parts of the application a request came in by; many applications may live in one process. */
 const stations = new WeakMap<Request, Station>();
@@ -94,7 +98,7 @@ export function openSession(
         },
       }),
     }),
-    ownPassport.session(),
+    ownPassport.session() as RequestHandler,
   );
 
   return { middleware, resolveActor: (request) => resolveActor(services, request) };

@@ -27,7 +27,7 @@ export async function getSession(db: Db, signIn: SignIn, now: Date): Promise<Ses
     .join('memberships', 'memberships.person_id', 'people.id')
     .join('facilities', 'facilities.id', 'memberships.facility_id')
     .where({ 'people.id': signIn.personId })
-    .where((open) => open.whereNull('memberships.expires_at').orWhere('memberships.expires_at', '>', now))
+    .whereRaw('(memberships.expires_at is null or memberships.expires_at > ?)', [now])
     .orderBy(['facilities.name', 'facilities.id'])
     .select<SessionRow[]>(
       'people.id as person_id',

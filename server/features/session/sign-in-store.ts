@@ -88,7 +88,7 @@ export async function listFacilityIds(db: Db | Transaction, personId: string, no
   const rows = await db('memberships')
     .join('facilities', 'facilities.id', 'memberships.facility_id')
     .where({ 'memberships.person_id': personId })
-    .where((open) => open.whereNull('memberships.expires_at').orWhere('memberships.expires_at', '>', now))
+    .whereRaw('(memberships.expires_at is null or memberships.expires_at > ?)', [now])
     .orderBy(['facilities.name', 'facilities.id'])
     .select<{ facility_id: string }[]>('memberships.facility_id');
   return rows.map((row) => row.facility_id);

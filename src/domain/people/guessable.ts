@@ -12,7 +12,7 @@ const runs = [
 ] as const;
 
 function reversed(text: string): string {
-  return [...text].reverse().join('');
+  return Array.from(text).reverse().join('');
 }
 
 /** Whether the whole text runs along the alphabet, the digits or a keyboard, round the end too: "890123", "poiuyt". */

@@ -66,12 +66,13 @@ function withoutEnds(text: string): string {
   return text.replace(/^\P{L}+|\P{L}+$/gu, '');
 }
 
-/** What is left when every word of the place and every digit is taken out. */
+/** What is left when the words of the place are taken out, and the digits people put beside such words. */
 function ownPart(folded: string, words: readonly string[]): string {
   const known = [...wordsOfThePlace, ...words.flatMap((word) => word.toLowerCase().split(/[^\p{L}\p{N}]+/u))]
     .filter((word) => word.length >= 3)
     .sort((a, b) => b.length - a.length);
-  return known.reduce((rest, word) => rest.replaceAll(word, ''), folded).replace(/\p{N}/gu, '');
+  const rest = known.reduce((text, word) => text.replaceAll(word, ''), folded);
+  return rest === folded ? folded : rest.replace(/\p{N}/gu, '');
 }
 
 /** @returns the password as it is to be hashed, or why not */
@@ -80,7 +81,7 @@ export function judgePassword(
   { isCommon, words }: PasswordSurroundings,
 ): Result<string, PasswordRefusal> {
   const normal = password.normalize('NFKC');
-  const length = [...normal].length;
+  const length = Array.from(normal).length;
   if (length < leastPasswordLength) {
     return refuse('too-short', `Use at least ${leastPasswordLength} characters. ${guidance}`);
   }
@@ -98,7 +99,7 @@ export function judgePassword(
   if ([small, folded, piece, withoutEnds(folded), withoutEnds(piece)].some(isCommon)) {
     return refuse('common', `This is one of the passwords that are tried first. ${guidance}`);
   }
-  if ([...ownPart(folded, words)].length < leastOwnPart) {
+  if (Array.from(ownPart(folded, words)).length < leastOwnPart) {
     return refuse('of-this-place', `This is made of names and words that anyone here knows. ${guidance}`);
   }
   return accept(normal);

@@ -27,7 +27,7 @@ function undoubled(pin: string): string {
   if (
     pin ===
     half +
-      [...half]
+      Array.from(half)
         .reverse()
         .join('')
         .slice(pin.length % 2)
