@@ -1,5 +1,6 @@
+import type { ItemFields } from '#domain/catalogue/item-fields';
 import type { CatalogueItem } from '#domain/load/model';
-import { kg, mm } from '#domain/units/quantity';
+import { kg, mm, seconds } from '#domain/units/quantity';
 import { cycleNeedSchema, filterZoneSchema } from '#contract/load-view';
 import { z } from 'zod';
 
@@ -31,6 +32,18 @@ export type ItemRow = {
   readonly is_retired: boolean;
 };
 
+/** All columns of `items`. */
+export type WholeItemRow = ItemRow & {
+  readonly cool_s: number;
+  readonly expiry_rule: ItemFields['expiryRule'];
+  readonly expiry_days: number | null;
+  readonly device_identifier: string | null;
+  readonly ifu_revision: string | null;
+  readonly service: string;
+  readonly note: string;
+  readonly version: number;
+};
+
 const filterZonesSchema = z.array(filterZoneSchema);
 const cycleNeedsSchema = z.array(cycleNeedSchema);
 
@@ -60,5 +73,54 @@ export function catalogueItemFromRow(row: ItemRow): CatalogueItem {
     massLimitKg: row.mass_limit_kg === null ? null : kg(row.mass_limit_kg),
     ifuReference: row.ifu_reference,
     isRetired: row.is_retired,
+  };
+}
+
+export function itemFieldsFromRow(row: WholeItemRow): ItemFields {
+  const { id: _id, ...item } = catalogueItemFromRow(row);
+  return {
+    ...item,
+    coolS: seconds(row.cool_s),
+    expiryRule: row.expiry_rule,
+    expiryDays: row.expiry_days,
+    deviceIdentifier: row.device_identifier,
+    ifuRevision: row.ifu_revision,
+    service: row.service,
+    note: row.note,
+  };
+}
+
+export function itemRowFrom(fields: ItemFields) {
+  return {
+    code: fields.code,
+    name: fields.name,
+    kind: fields.kind,
+    packaging: fields.packaging,
+    length_mm: fields.lengthMm,
+    width_mm: fields.widthMm,
+    height_mm: fields.heightMm,
+    mass_kg: fields.massKg,
+    metal_mass_kg: fields.metalMassKg,
+    textile_mass_kg: fields.textileMassKg,
+    metal: fields.metal,
+    is_implant: fields.isImplant,
+    pose: fields.pose,
+    is_perforated: fields.isPerforated,
+    clearance_mm: fields.clearanceMm,
+    stands_on: [...fields.standsOn],
+    greatest_stack_height_mm: fields.greatestStackHeightMm,
+    filter_zones: JSON.stringify(fields.filterZones),
+    cycle_needs: JSON.stringify(fields.cycleNeeds),
+    preferred_holder: fields.preferredHolder,
+    mass_limit_kg: fields.massLimitKg,
+    cool_s: fields.coolS,
+    expiry_rule: fields.expiryRule,
+    expiry_days: fields.expiryDays,
+    device_identifier: fields.deviceIdentifier,
+    ifu_reference: fields.ifuReference,
+    ifu_revision: fields.ifuRevision,
+    service: fields.service,
+    note: fields.note,
+    is_retired: fields.isRetired,
   };
 }
