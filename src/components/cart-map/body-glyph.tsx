@@ -1,0 +1,77 @@
+import { filterRects, type Body } from '#domain/load/layout';
+import {
+  Basin,
+  ChallengeDevice,
+  ContainerFront,
+  ContainerPlan,
+  Leaf,
+  LeafFace,
+  Textile,
+  Wrapped,
+  type PixelBox,
+} from './glyphs';
+
+/** Below this a leaf cannot be told from a line. */
+const thinnestLeafPx = 3;
+
+function thickened(box: PixelBox, along: 'width' | 'height'): PixelBox {
+  const missing = Math.max(0, thinnestLeafPx - box[along]) / 2;
+  return along === 'width'
+    ? { ...box, x: box.x - missing, width: box.width + 2 * missing }
+    : { ...box, y: box.y - missing, height: box.height + 2 * missing };
+}
+
+function PouchFront({ body, box }: { body: Body; box: PixelBox }) {
+  if (body.thinAxis === 'x') return <Leaf box={thickened(box, 'width')} isPaperFirst={body.paperLooks !== 'right'} />;
+  if (body.thinAxis === 'y') return <LeafFace box={box} isPaper={body.paperLooks === 'front'} label={body.item.code} />;
+  return <Leaf box={thickened(box, 'height')} isAcross isPaperFirst={body.paperLooks !== 'up'} />;
+}
+
+function PouchPlan({ body, box }: { body: Body; box: PixelBox }) {
+  if (body.thinAxis === 'x') return <Leaf box={thickened(box, 'width')} isPaperFirst={body.paperLooks !== 'right'} />;
+  if (body.thinAxis === 'y') {
+    return <Leaf box={thickened(box, 'height')} isAcross isPaperFirst={body.paperLooks !== 'back'} />;
+  }
+  return <LeafFace box={box} isPaper={body.paperLooks === 'up'} label={body.item.code} />;
+}
+
+/** A package as it looks from the door end. */
+export function BodyFront({ body, box }: { body: Body; box: PixelBox }) {
+  const label = body.item.code;
+  switch (body.item.kind) {
+    case 'pouch':
+      return <PouchFront body={body} box={box} />;
+    case 'rigid-container':
+      return <ContainerFront box={box} label={label} />;
+    case 'wrapped-tray':
+      return <Wrapped box={box} label={label} />;
+    case 'textile-pack':
+      return <Textile box={box} label={label} isUpright={body.placement.pose === 'on-edge'} />;
+    case 'basin':
+      return <Basin box={box} label={label} isTilted={body.placement.pose === 'tilted'} isFromAbove={false} />;
+    case 'challenge-device':
+      return <ChallengeDevice box={box} />;
+  }
+}
+
+/** A package as it looks from above. */
+export function BodyPlan({ body, box, toPixels }: { body: Body; box: PixelBox; toPixels: (rect: PlanRect) => PixelBox }) {
+  const label = body.item.code;
+  switch (body.item.kind) {
+    case 'pouch':
+      return <PouchPlan body={body} box={box} />;
+    case 'rigid-container':
+      return <ContainerPlan box={box} label={label} filters={filterRects(body, 'lid').map(toPixels)} />;
+    case 'wrapped-tray':
+      return <Wrapped box={box} label={label} />;
+    case 'textile-pack':
+      return <Textile box={box} label={label} isUpright={body.placement.pose === 'on-edge'} />;
+    case 'basin':
+      return <Basin box={box} label={label} isTilted={body.placement.pose === 'tilted'} isFromAbove />;
+    case 'challenge-device':
+      return <ChallengeDevice box={box} />;
+  }
+}
+
+/** In shelf millimetres. */
+export type PlanRect = { readonly left: number; readonly right: number; readonly front: number; readonly back: number };
