@@ -173,7 +173,7 @@ export const cartViewSchema = z.object({
   id: idSchema,
   code: z.string(),
   name: z.string(),
-  shelves: z.array(shelfSchema),
+  shelves: z.array(shelfSchema).readonly(),
 });
 
 export const sterilizerViewSchema = z.object({

@@ -19,7 +19,8 @@ export const paths = {
   airRemovalTests: '/api/air-removal-tests',
   packages: '/api/packages',
   packageLabels: '/api/packages/labels',
-  packageLabelSheet: (batchId: string, layout: 'single' | 'sheet') => `/api/packages/labels/${batchId}?layout=${layout}`,
+  packageLabelSheet: (batchId: string, layout: 'single' | 'sheet') =>
+    `/api/packages/labels/${batchId}?layout=${layout}`,
   packageIdentify: '/api/packages/identify',
   package: (packageRef: string) => `/api/packages/${encodeURIComponent(packageRef)}`,
   runs: '/api/runs',

@@ -12,7 +12,12 @@ import { requireBuilding } from './load-change';
 import { lockLoad, stepVersion } from './load-store';
 import { readLoadView } from './load-view-read-model';
 
-export type Closing = { readonly number: string; readonly digest: string; readonly ruleSet: string; readonly closedAt: string };
+export type Closing = {
+  readonly number: string;
+  readonly digest: string;
+  readonly ruleSet: string;
+  readonly closedAt: string;
+};
 
 /** The rules held the load open: told outside, and kept in the history although the transaction is rolled back. */
 class CloseRefused extends RuleRefused {
@@ -57,7 +62,10 @@ async function close(services: Services, actor: Actor, loadId: string, requestId
     const { mayClose, blocks } = decideClose(view, policy, findings);
     if (!mayClose) {
       const labels = blocks.map((block) => block.label);
-      throw new CloseRefused(`${blocks.length === 1 ? '1 thing holds' : `${blocks.length} things hold`} load ${load.number} open.`, labels);
+      throw new CloseRefused(
+        `${blocks.length === 1 ? '1 thing holds' : `${blocks.length} things hold`} load ${load.number} open.`,
+        labels,
+      );
     }
     const contents = canonicalJson(contentsOf(view));
     const digest = createHash('sha256').update(contents, 'utf8').digest('hex');
@@ -69,7 +77,12 @@ async function close(services: Services, actor: Actor, loadId: string, requestId
         closed_at: at,
         rule_set: ruleSetVersion,
         // The fixes are for building; a closed load keeps what was found and how it was settled.
-        verdict: JSON.stringify({ findings: findings.map(({ fix: _fix, ...kept }) => kept), acceptances, counts, policyNumber }),
+        verdict: JSON.stringify({
+          findings: findings.map(({ fix: _fix, ...kept }) => kept),
+          acceptances,
+          counts,
+          policyNumber,
+        }),
         contents,
         contents_digest: digest,
       });

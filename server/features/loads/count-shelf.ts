@@ -17,29 +17,33 @@ export async function countShelf(
   request: { readonly requestId: string; readonly shelfId: string; readonly counted: number },
 ): Promise<{ change: LoadChange }> {
   const { db, clock } = services;
-  return once({ db, clock, actor }, { requestId: request.requestId, act: 'load.count', body: { loadId, ...request } }, async (trx) => {
-    const at = clock.now();
-    const load = await lockLoad(trx, actor.facilityId, loadId);
-    requireBuilding(load);
-    const { view } = await readLoadView(trx, load, at);
-    const shelf = view.cart.shelves.find((entry) => entry.id === request.shelfId);
-    if (!shelf) throw new NotFound('shelf.none', 'This shelf is not on the load’s cart.');
-    const count = { counted: request.counted, counted_by: actor.personId, counted_at: at };
-    await trx('load_counts')
-      .insert({ load_id: load.id, shelf_id: shelf.id, ...count })
-      .onConflict(['load_id', 'shelf_id'])
-      .merge(count);
-    await appendEvent(trx, {
-      kind: 'load.counted',
-      at,
-      facilityId: load.facility_id,
-      actorId: actor.personId,
-      subjectKind: 'load',
-      subjectId: load.id,
-      loadId: load.id,
-      requestId: request.requestId,
-      payload: { shelf: shelf.name, counted: request.counted },
-    });
-    return { change: await changeFrom(trx, load, await stepVersion(trx, load), view, differenceOf(view, view)) };
-  });
+  return once(
+    { db, clock, actor },
+    { requestId: request.requestId, act: 'load.count', body: { loadId, ...request } },
+    async (trx) => {
+      const at = clock.now();
+      const load = await lockLoad(trx, actor.facilityId, loadId);
+      requireBuilding(load);
+      const { view } = await readLoadView(trx, load, at);
+      const shelf = view.cart.shelves.find((entry) => entry.id === request.shelfId);
+      if (!shelf) throw new NotFound('shelf.none', 'This shelf is not on the load’s cart.');
+      const count = { counted: request.counted, counted_by: actor.personId, counted_at: at };
+      await trx('load_counts')
+        .insert({ load_id: load.id, shelf_id: shelf.id, ...count })
+        .onConflict(['load_id', 'shelf_id'])
+        .merge(count);
+      await appendEvent(trx, {
+        kind: 'load.counted',
+        at,
+        facilityId: load.facility_id,
+        actorId: actor.personId,
+        subjectKind: 'load',
+        subjectId: load.id,
+        loadId: load.id,
+        requestId: request.requestId,
+        payload: { shelf: shelf.name, counted: request.counted },
+      });
+      return { change: await changeFrom(trx, load, await stepVersion(trx, load), view, differenceOf(view, view)) };
+    },
+  );
 }

@@ -25,25 +25,34 @@ export async function editLoad(
   request: EditLoadRequest,
 ): Promise<{ change: LoadChange }> {
   const { db, clock } = services;
-  return once({ db, clock, actor }, { requestId: request.requestId, act: 'load.edit', body: { loadId, ...request } }, async (trx) => {
-    const at = clock.now();
-    const load = await lockLoad(trx, actor.facilityId, loadId);
-    requireBuilding(load);
-    const known = await readLoadView(trx, load, at);
-    const applied = applyEdits(known.view, request.edits, await sparesFor(trx, known, request.edits));
-    if (!applied.ok) throw new RuleRefused(applied.refusal.code, applied.refusal.sentence);
-    const change = await recordAct(trx, known, applied.value, { actor, at, requestId: request.requestId }, (difference) =>
-      tellingOf(known.view, request.edits, difference),
-    );
-    return { change };
-  });
+  return once(
+    { db, clock, actor },
+    { requestId: request.requestId, act: 'load.edit', body: { loadId, ...request } },
+    async (trx) => {
+      const at = clock.now();
+      const load = await lockLoad(trx, actor.facilityId, loadId);
+      requireBuilding(load);
+      const known = await readLoadView(trx, load, at);
+      const applied = applyEdits(known.view, request.edits, await sparesFor(trx, known, request.edits));
+      if (!applied.ok) throw new RuleRefused(applied.refusal.code, applied.refusal.sentence);
+      const change = await recordAct(
+        trx,
+        known,
+        applied.value,
+        { actor, at, requestId: request.requestId },
+        (difference) => tellingOf(known.view, request.edits, difference),
+      );
+      return { change };
+    },
+  );
 }
 
 /** Holders that the edits put on the cart and that are not on it yet: locked, if nobody else has them. */
 async function sparesFor(trx: Transaction, known: LoadAsKnown, edits: readonly LoadEdit[]): Promise<SpareHolder[]> {
   const spares: SpareHolder[] = [];
   for (const edit of edits) {
-    if (edit.edit !== 'place-holder' || known.view.holders.some((holder) => holder.holderId === edit.holderId)) continue;
+    if (edit.edit !== 'place-holder' || known.view.holders.some((holder) => holder.holderId === edit.holderId))
+      continue;
     const holder = await holderById(trx, known.load.facility_id, edit.holderId);
     if (!holder) throw new NotFound('holder.none', 'There is no such holder here.');
     await requireHolderFree(trx, holder);

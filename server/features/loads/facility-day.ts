@@ -12,19 +12,17 @@ export type FacilityFacts = {
 
 /** What the facility calls today: calendar day or production day, as it has settled. */
 export async function facilityAt(db: Db | Transaction, facilityId: string, at: Date): Promise<FacilityFacts> {
-  const row = await db('facilities')
-    .where({ id: facilityId })
-    .first<
-      | {
-          id: string;
-          name: string;
-          time_zone: string;
-          load_number_pattern: string;
-          day_rule: 'calendar-day' | 'production-day';
-          production_day_starts_at: string;
-        }
-      | undefined
-    >('id', 'name', 'time_zone', 'load_number_pattern', 'day_rule', 'production_day_starts_at');
+  const row = await db('facilities').where({ id: facilityId }).first<
+    | {
+        id: string;
+        name: string;
+        time_zone: string;
+        load_number_pattern: string;
+        day_rule: 'calendar-day' | 'production-day';
+        production_day_starts_at: string;
+      }
+    | undefined
+  >('id', 'name', 'time_zone', 'load_number_pattern', 'day_rule', 'production_day_starts_at');
   if (!row) throw new Error('the session names a facility that is not there');
   const dayStartsAt = row.day_rule === 'calendar-day' ? '00:00' : row.production_day_starts_at;
   return {

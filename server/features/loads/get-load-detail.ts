@@ -29,7 +29,9 @@ export async function getLoadDetail(services: Services, actor: Actor, loadId: st
         undoable: load.state === 'building' ? ((await getUndoable(trx, load.id))?.words ?? null) : null,
         stickers: stickers.map((row) => ({ packageId: row.package_id, stickerId: row.id, copy: row.copy })),
         closing:
-          load.contents_digest !== null && load.rule_set !== null ? { digest: load.contents_digest, ruleSet: load.rule_set } : null,
+          load.contents_digest !== null && load.rule_set !== null
+            ? { digest: load.contents_digest, ruleSet: load.rule_set }
+            : null,
         version: load.version,
       };
     },

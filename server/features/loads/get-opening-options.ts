@@ -1,7 +1,13 @@
 import type { LoadOpeningOptions } from '#contract/loads';
 import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
-import { airRemovalOfDay, cartsOf, qualifiedPrograms, sterilizersOf, unqualifiedPrograms } from '../equipment/read-model';
+import {
+  airRemovalOfDay,
+  cartsOf,
+  qualifiedPrograms,
+  sterilizersOf,
+  unqualifiedPrograms,
+} from '../equipment/read-model';
 import { waitingRuns } from '../packages/read-model';
 import { facilityAt } from './facility-day';
 import { buildingLoadOfCart } from './open-load-read-model';
@@ -13,7 +19,11 @@ export async function getOpeningOptions({ db, clock }: Services, actor: Actor): 
   const carts = await Promise.all(
     (await cartsOf(db, facilityId)).map(async (cart) => {
       const used = await buildingLoadOfCart(db, cart.id);
-      return { ...cart, isFree: cart.isUsable && used === undefined, usedBy: used ? `load ${used.number}` : cart.isUsable ? null : cart.note || 'out of use' };
+      return {
+        ...cart,
+        isFree: cart.isUsable && used === undefined,
+        usedBy: used ? `load ${used.number}` : cart.isUsable ? null : cart.note || 'out of use',
+      };
     }),
   );
   const sterilizers = await sterilizersOf(db, facilityId);

@@ -40,7 +40,11 @@ export async function recordAct<Kind extends ActKind>(
   const { load, view } = known;
   const difference = differenceOf(view, after);
   if (isEmptyDifference(difference)) return changeFrom(trx, load, load.version, after, difference);
-  await writeDifference(trx, load.id, difference, { personId: act.actor.personId, at: act.at, entry: act.entry ?? 'keyed' });
+  await writeDifference(trx, load.id, difference, {
+    personId: act.actor.personId,
+    at: act.at,
+    entry: act.entry ?? 'keyed',
+  });
   await voidCounts(trx, load.id, affectedShelves(view, after));
   const { kind, payload } = tell(difference);
   await appendEvent(trx, {

@@ -50,7 +50,9 @@ function sentenceOf({ kind, payload }: EventRow): string {
     case 'load.finding-accepted':
       return `Finding left as it is (${say('ruleId').replaceAll('-', ' ')}): ${say('reason')}`;
     case 'load.sticker-printed':
-      return say('copy') === '1' ? 'Load sticker printed' : `Load sticker printed again, copy ${say('copy')}: ${say('reason')}`;
+      return say('copy') === '1'
+        ? 'Load sticker printed'
+        : `Load sticker printed again, copy ${say('copy')}: ${say('reason')}`;
     case 'load.close-refused':
       return `Close refused: ${Array.isArray(payload.blocks) ? payload.blocks.join('; ') : ''}`;
     case 'load.closed':

@@ -99,7 +99,11 @@ export async function listLoads(db: Db, facilityId: string, state: 'open' | 'clo
   return (await query).map(fromRow);
 }
 
-export async function findLoadSummary(db: Db | Transaction, facilityId: string, loadId: string): Promise<LoadSummary | undefined> {
+export async function findLoadSummary(
+  db: Db | Transaction,
+  facilityId: string,
+  loadId: string,
+): Promise<LoadSummary | undefined> {
   const [row] = await summaries(db, facilityId).where('load.id', loadId);
   return row && fromRow(row);
 }

@@ -129,7 +129,12 @@ export async function listLoadHolders(db: Db | Transaction, loadId: string): Pro
   }));
 }
 
-export type CountRow = { readonly shelfId: string; readonly counted: number; readonly countedBy: string; readonly countedAt: string };
+export type CountRow = {
+  readonly shelfId: string;
+  readonly counted: number;
+  readonly countedBy: string;
+  readonly countedAt: string;
+};
 
 export async function listCounts(db: Db | Transaction, loadId: string): Promise<CountRow[]> {
   const rows = await db('load_counts as count')
@@ -175,7 +180,9 @@ export async function listAcceptances(db: Db | Transaction, loadId: string): Pro
 type Scanning = { readonly personId: string; readonly entry: string; readonly at: Date };
 
 async function addPackage(trx: Transaction, loadId: string, after: LoadPackage, scanning: Scanning): Promise<void> {
-  const origin = await trx('packages').where({ id: after.packageId }).first<{ run_id: string | null } | undefined>('run_id');
+  const origin = await trx('packages')
+    .where({ id: after.packageId })
+    .first<{ run_id: string | null } | undefined>('run_id');
   await trx('load_packages').insert({
     load_id: loadId,
     package_id: after.packageId,
@@ -195,7 +202,10 @@ async function removePackage(trx: Transaction, loadId: string, packageId: string
   await trx('packages')
     .where({ id: packageId })
     .whereIn('state', ['in-load', 'staged'])
-    .update({ state: trx.raw("case when run_id is null then 'packed' else 'staged' end"), version: trx.raw('version + 1') });
+    .update({
+      state: trx.raw("case when run_id is null then 'packed' else 'staged' end"),
+      version: trx.raw('version + 1'),
+    });
   await trx('load_stickers')
     .where({ load_id: loadId, package_id: packageId })
     .whereNull('voided_at')
@@ -227,7 +237,9 @@ export async function writeDifference(
         });
     }
     if (before?.state !== after.state) {
-      await trx('packages').where({ id }).update({ state: after.state, version: trx.raw('version + 1') });
+      await trx('packages')
+        .where({ id })
+        .update({ state: after.state, version: trx.raw('version + 1') });
     }
   }
   for (const { id, after } of difference.holders) {
@@ -255,5 +267,8 @@ export async function stepVersion(trx: Transaction, load: LoadRow): Promise<numb
 
 export async function voidCounts(trx: Transaction, loadId: string, shelfIds: readonly string[]): Promise<void> {
   if (shelfIds.length === 0) return;
-  await trx('load_counts').where({ load_id: loadId }).whereIn('shelf_id', [...shelfIds]).delete();
+  await trx('load_counts')
+    .where({ load_id: loadId })
+    .whereIn('shelf_id', [...shelfIds])
+    .delete();
 }

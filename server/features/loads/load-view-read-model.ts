@@ -2,7 +2,14 @@ import { loadPolicySchema } from '#contract/policy';
 import type { LoadView } from '#domain/load/model';
 import type { LoadPolicy } from '#domain/load/policy';
 import type { Db, Transaction } from '../../platform/db';
-import { airRemovalOfDay, cartWithShelves, holderKinds, programById, qualifiedPrograms, sterilizerById } from '../equipment/read-model';
+import {
+  airRemovalOfDay,
+  cartWithShelves,
+  holderKinds,
+  programById,
+  qualifiedPrograms,
+  sterilizerById,
+} from '../equipment/read-model';
 import { catalogueItems } from '../items/read-model';
 import { facilityAt } from './facility-day';
 import {

@@ -47,7 +47,9 @@ export const loadRoutes = [
     permission: 'load.view',
     query: loadListQuerySchema,
     response: loadListResponseSchema,
-    handle: async ({ services, actor, query }) => ({ loads: await listLoads(services.db, actor.facilityId, query.state) }),
+    handle: async ({ services, actor, query }) => ({
+      loads: await listLoads(services.db, actor.facilityId, query.state),
+    }),
   }),
   defineRoute({
     method: 'get',
@@ -162,6 +164,6 @@ export const loadRoutes = [
     permission: 'load.print-stickers',
     params: loadParams.extend({ batchId: idSchema }),
     response: 'file',
-    handle: ({ services, actor, params }) => drawStickerBatch(services, actor, params.loadId, params.batchId),
+    handle: ({ services, actor, params }) => drawStickerBatch(services.db, actor, params.loadId, params.batchId),
   }),
 ];

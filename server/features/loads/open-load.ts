@@ -29,7 +29,10 @@ export async function openLoad(
     await requireCart(trx, actor.facilityId, request.cartId, sterilizer);
 
     const count = (await greatestCount(trx, sterilizer.id, facility)) + 1;
-    const number = formatLoadNumber({ sterilizer: sterilizer.number, day: facility.day, count }, facility.loadNumberPattern);
+    const number = formatLoadNumber(
+      { sterilizer: sterilizer.number, day: facility.day, count },
+      facility.loadNumberPattern,
+    );
     const policy = await trx('policies')
       .where({ facility_id: actor.facilityId })
       .where('effective_at', '<=', at)
@@ -75,9 +78,14 @@ async function requireProgram(
 ): Promise<void> {
   const qualified = await qualifiedPrograms(trx, facilityId, sterilizer.id);
   if (qualified.some((program) => program.id === programId)) return;
-  const program = await trx('programs').where({ id: programId, facility_id: facilityId }).first<{ code: string } | undefined>('code');
+  const program = await trx('programs')
+    .where({ id: programId, facility_id: facilityId })
+    .first<{ code: string } | undefined>('code');
   if (!program) throw new NotFound('program.none', 'There is no such program here.');
-  throw new RuleRefused('load.program-not-qualified', `${sterilizer.name} is not qualified for ${program.code}. Choose one of its qualified programs.`);
+  throw new RuleRefused(
+    'load.program-not-qualified',
+    `${sterilizer.name} is not qualified for ${program.code}. Choose one of its qualified programs.`,
+  );
 }
 
 async function requireCart(
@@ -89,12 +97,14 @@ async function requireCart(
   await trx('carts').where({ id: cartId, facility_id: facilityId }).forUpdate().first('id');
   const cart = await cartWithShelves(trx, facilityId, cartId);
   if (!cart) throw new NotFound('cart.none', 'There is no such cart here.');
-  if (!cart.isUsable) throw new RuleRefused('load.cart-not-usable', `${cart.name} is out of use.${cart.note ? ` ${cart.note}` : ''}`);
+  if (!cart.isUsable)
+    throw new RuleRefused('load.cart-not-usable', `${cart.name} is out of use.${cart.note ? ` ${cart.note}` : ''}`);
   if (cart.sizeClass !== sterilizer.sizeClass) {
     throw new RuleRefused('load.cart-does-not-fit', `${cart.name} does not fit ${sterilizer.name}.`);
   }
   const used = await buildingLoadOfCart(trx, cartId);
-  if (used) throw new Conflict('load.cart-in-use', `${cart.name} carries load ${used.number}, opened by ${used.openedBy}.`);
+  if (used)
+    throw new Conflict('load.cart-in-use', `${cart.name} carries load ${used.number}, opened by ${used.openedBy}.`);
 }
 
 async function greatestCount(trx: Transaction, sterilizerId: string, facility: FacilityFacts): Promise<number> {
@@ -121,6 +131,8 @@ async function listRun(trx: Transaction, facilityId: string, runId: string, load
       free.map((entry) => ({ load_id: loadId, package_id: entry.id, is_open: true, was_staged: true, listed_at: at })),
     );
   }
-  await trx('runs').where({ id: runId }).update({ state: 'taken', version: run.version + 1 });
+  await trx('runs')
+    .where({ id: runId })
+    .update({ state: 'taken', version: run.version + 1 });
   return free.length;
 }

@@ -1,4 +1,3 @@
-import { formatLoadStickerCode } from '#domain/label/load-sticker-code';
 import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
@@ -6,10 +5,14 @@ import type { Db } from '../../platform/db';
 import { NotFound, RuleRefused } from '../../platform/errors';
 import { once } from '../../platform/once';
 import { drawLoadStickers } from '../labels/draw/draw-load-stickers';
-import { facilityAt } from './facility-day';
 import { getLoad, lockLoad } from './load-store';
 
-type Scanned = { readonly package_id: string; readonly code: string; readonly live_id: string | null; readonly greatest_copy: number };
+type Scanned = {
+  readonly package_id: string;
+  readonly code: string;
+  readonly live_id: string | null;
+  readonly greatest_copy: number;
+};
 
 /**
  * Makes a load sticker for each package: the lot identifier it must carry. One live sticker per package: a reprint needs a
@@ -19,64 +22,82 @@ export async function printStickers(
   services: Services,
   actor: Actor,
   loadId: string,
-  request: { readonly requestId: string; readonly packageIds: readonly string[] | null; readonly reason: string | null },
+  request: {
+    readonly requestId: string;
+    readonly packageIds: readonly string[] | null;
+    readonly reason: string | null;
+  },
 ): Promise<{ stickerIds: string[]; pdf: string }> {
   const { db, clock, ids } = services;
-  return once({ db, clock, actor }, { requestId: request.requestId, act: 'load.print-stickers', body: { loadId, ...request } }, async (trx) => {
-    const at = clock.now();
-    const load = await lockLoad(trx, actor.facilityId, loadId);
-    if (load.state !== 'building' && load.state !== 'closed') {
-      throw new RuleRefused('load.no-stickers-now', `Load ${load.number} is not open any more: no stickers are printed for it.`);
-    }
-    const scanned = await trx('load_packages as listed')
-      .join('packages as package', 'package.id', 'listed.package_id')
-      .leftJoin('load_stickers as sticker', (join) => {
-        join.on('sticker.package_id', 'listed.package_id').andOn('sticker.load_id', 'listed.load_id');
-      })
-      .where('listed.load_id', load.id)
-      .whereNotNull('listed.scanned_at')
-      .groupBy('listed.package_id', 'package.code')
-      .orderBy('package.code')
-      .select<Scanned[]>(
-        'listed.package_id',
-        'package.code',
-        trx.raw('coalesce(max(sticker.copy), 0) as greatest_copy'),
-        trx.raw('(array_agg(sticker.id) filter (where sticker.id is not null and sticker.voided_at is null))[1] as live_id'),
-      );
-    const chosen = choose(scanned, request.packageIds);
-    const reprints = chosen.filter((entry) => entry.greatest_copy > 0);
-    if (reprints.length > 0 && request.reason === null) {
-      throw new RuleRefused('load.sticker-reprint-needs-reason', 'A sticker was printed for this before. Say why you print it again.');
-    }
-    const live = reprints.flatMap((entry) => (entry.live_id === null ? [] : [entry.live_id]));
-    await trx('load_stickers').whereIn('id', live).update({ voided_at: at, voided_by: actor.personId, void_reason: request.reason });
-    const batchId = ids.next();
-    const rows = chosen.map((entry) => ({
-      id: ids.next(),
-      batch_id: batchId,
-      load_id: load.id,
-      package_id: entry.package_id,
-      copy: entry.greatest_copy + 1,
-      reason: entry.greatest_copy > 0 ? request.reason : null,
-      printed_by: actor.personId,
-      printed_at: at,
-    }));
-    await trx('load_stickers').insert(rows);
-    for (const row of rows) {
-      await appendEvent(trx, {
-        kind: 'load.sticker-printed',
-        at,
-        facilityId: load.facility_id,
-        actorId: actor.personId,
-        subjectKind: 'package',
-        subjectId: row.package_id,
-        loadId: load.id,
-        requestId: request.requestId,
-        payload: { copy: row.copy, reason: row.reason },
-      });
-    }
-    return { stickerIds: rows.map((row) => row.id), pdf: `/api/loads/${load.id}/stickers/${batchId}` };
-  });
+  return once(
+    { db, clock, actor },
+    { requestId: request.requestId, act: 'load.print-stickers', body: { loadId, ...request } },
+    async (trx) => {
+      const at = clock.now();
+      const load = await lockLoad(trx, actor.facilityId, loadId);
+      if (load.state !== 'building' && load.state !== 'closed') {
+        throw new RuleRefused(
+          'load.no-stickers-now',
+          `Load ${load.number} is not open any more: no stickers are printed for it.`,
+        );
+      }
+      const scanned = await trx('load_packages as listed')
+        .join('packages as package', 'package.id', 'listed.package_id')
+        .leftJoin('load_stickers as sticker', (join) => {
+          join.on('sticker.package_id', 'listed.package_id').andOn('sticker.load_id', 'listed.load_id');
+        })
+        .where('listed.load_id', load.id)
+        .whereNotNull('listed.scanned_at')
+        .groupBy('listed.package_id', 'package.code')
+        .orderBy('package.code')
+        .select<Scanned[]>(
+          'listed.package_id',
+          'package.code',
+          trx.raw('coalesce(max(sticker.copy), 0) as greatest_copy'),
+          trx.raw(
+            '(array_agg(sticker.id) filter (where sticker.id is not null and sticker.voided_at is null))[1] as live_id',
+          ),
+        );
+      const chosen = choose(scanned, request.packageIds);
+      const reprints = chosen.filter((entry) => entry.greatest_copy > 0);
+      if (reprints.length > 0 && request.reason === null) {
+        throw new RuleRefused(
+          'load.sticker-reprint-needs-reason',
+          'A sticker was printed for this before. Say why you print it again.',
+        );
+      }
+      const live = reprints.flatMap((entry) => (entry.live_id === null ? [] : [entry.live_id]));
+      await trx('load_stickers')
+        .whereIn('id', live)
+        .update({ voided_at: at, voided_by: actor.personId, void_reason: request.reason });
+      const batchId = ids.next();
+      const rows = chosen.map((entry) => ({
+        id: ids.next(),
+        batch_id: batchId,
+        load_id: load.id,
+        package_id: entry.package_id,
+        copy: entry.greatest_copy + 1,
+        reason: entry.greatest_copy > 0 ? request.reason : null,
+        printed_by: actor.personId,
+        printed_at: at,
+      }));
+      await trx('load_stickers').insert(rows);
+      for (const row of rows) {
+        await appendEvent(trx, {
+          kind: 'load.sticker-printed',
+          at,
+          facilityId: load.facility_id,
+          actorId: actor.personId,
+          subjectKind: 'package',
+          subjectId: row.package_id,
+          loadId: load.id,
+          requestId: request.requestId,
+          payload: { copy: row.copy, reason: row.reason },
+        });
+      }
+      return { stickerIds: rows.map((row) => row.id), pdf: `/api/loads/${load.id}/stickers/${batchId}` };
+    },
+  );
 }
 
 function choose(scanned: readonly Scanned[], packageIds: readonly string[] | null): Scanned[] {
@@ -85,7 +106,11 @@ function choose(scanned: readonly Scanned[], packageIds: readonly string[] | nul
       ? scanned.filter((entry) => entry.live_id === null)
       : packageIds.map((id) => {
           const entry = scanned.find((candidate) => candidate.package_id === id);
-          if (!entry) throw new RuleRefused('load.sticker-not-scanned', 'A sticker is printed only for a package that was scanned into this load.');
+          if (!entry)
+            throw new RuleRefused(
+              'load.sticker-not-scanned',
+              'A sticker is printed only for a package that was scanned into this load.',
+            );
           return entry;
         });
   if (chosen.length === 0) {
@@ -96,15 +121,13 @@ function choose(scanned: readonly Scanned[], packageIds: readonly string[] | nul
 
 /** The sheet of one printing: only its stickers that are still live, so that an old sheet cannot bring void ones back. */
 export async function drawStickerBatch(
-  services: Pick<Services, 'clock'> & { readonly db: Db },
+  db: Db,
   actor: Actor,
   loadId: string,
   batchId: string,
 ): Promise<{ file: Buffer; mediaType: 'application/pdf'; name: string }> {
-  const { db, clock } = services;
   const load = await getLoad(db, actor.facilityId, loadId);
-  const facility = await facilityAt(db, actor.facilityId, clock.now());
-  const sterilizer = await db('sterilizers').where({ id: load.sterilizer_id }).first<{ name: string; code: string }>('name', 'code');
+  const sterilizer = await db('sterilizers').where({ id: load.sterilizer_id }).first<{ name: string }>('name');
   const rows = await db('load_stickers as sticker')
     .join('packages as package', 'package.id', 'sticker.package_id')
     .join('items as item', 'item.id', 'package.item_id')
@@ -120,10 +143,10 @@ export async function drawStickerBatch(
       'sticker.copy',
       'sticker.printed_at',
     );
-  if (rows.length === 0) throw new NotFound('load.no-such-stickers', 'There are no live stickers of this printing.');
+  const [first] = rows;
+  if (!first) throw new NotFound('load.no-such-stickers', 'There are no live stickers of this printing.');
   const file = await drawLoadStickers(
     rows.map((row) => ({
-      code: formatLoadStickerCode({ packageCode: row.code, loadNumber: load.number, copy: row.copy }),
       packageCode: row.code,
       itemName: row.name,
       loadNumber: load.number,
@@ -132,9 +155,8 @@ export async function drawStickerBatch(
       packedBy: row.initials,
       isImplant: row.is_implant,
       copy: row.copy,
-      timeZone: facility.timeZone,
     })),
-    'sheet',
+    { layout: 'sheet', printedAt: first.printed_at.toISOString() },
   );
   return { file, mediaType: 'application/pdf', name: `load-${load.number}-stickers.pdf` };
 }

@@ -31,7 +31,10 @@ const shownLength = 40;
 /** What was read, fit to be shown: short, and without the characters that cannot be seen. */
 function shown(raw: string): string {
   // eslint-disable-next-line no-control-regex -- these are what is taken out
-  const visible = raw.slice(0, 400).replace(/[\u0000-\u001f\u007f-\u009f\ud800-\udfff]/g, ' ').trim();
+  const visible = raw
+    .slice(0, 400)
+    .replace(/[\u0000-\u001f\u007f-\u009f\ud800-\udfff]/g, ' ')
+    .trim();
   return visible.length > shownLength ? `${visible.slice(0, shownLength)}…` : visible;
 }
 
@@ -43,29 +46,33 @@ export async function scanIntoLoad(
   request: ScanRequest,
 ): Promise<ScanResponse> {
   const { db, clock } = services;
-  return once({ db, clock, actor }, { requestId: request.requestId, act: 'load.scan', body: { loadId, ...request } }, async (trx) => {
-    const at = clock.now();
-    const load = await lockLoad(trx, actor.facilityId, loadId);
-    requireBuilding(load);
-    const known = await readLoadView(trx, load, at);
-    const act: LoadAct = { actor, at, requestId: request.requestId, entry: request.entry };
-    const scan = readScan(request.raw);
-    const answer = await answerScan(trx, known, scan, request.place, act);
-    if (answer.change === null && answer.answer !== 'place-set') {
-      await appendEvent(trx, {
-        kind: 'load.scan-refused',
-        at,
-        facilityId: load.facility_id,
-        actorId: actor.personId,
-        subjectKind: 'load',
-        subjectId: load.id,
-        loadId: load.id,
-        requestId: request.requestId,
-        payload: { answer: answer.answer, read: shown(request.raw), entry: request.entry },
-      });
-    }
-    return { ...answer, at: at.toISOString(), code: 'code' in scan ? scan.code : shown(request.raw) };
-  });
+  return once(
+    { db, clock, actor },
+    { requestId: request.requestId, act: 'load.scan', body: { loadId, ...request } },
+    async (trx) => {
+      const at = clock.now();
+      const load = await lockLoad(trx, actor.facilityId, loadId);
+      requireBuilding(load);
+      const known = await readLoadView(trx, load, at);
+      const act: LoadAct = { actor, at, requestId: request.requestId, entry: request.entry };
+      const scan = readScan(request.raw);
+      const answer = await answerScan(trx, known, scan, request.place, act);
+      if (answer.change === null && answer.answer !== 'place-set') {
+        await appendEvent(trx, {
+          kind: 'load.scan-refused',
+          at,
+          facilityId: load.facility_id,
+          actorId: actor.personId,
+          subjectKind: 'load',
+          subjectId: load.id,
+          loadId: load.id,
+          requestId: request.requestId,
+          payload: { answer: answer.answer, read: shown(request.raw), entry: request.entry },
+        });
+      }
+      return { ...answer, at: at.toISOString(), code: 'code' in scan ? scan.code : shown(request.raw) };
+    },
+  );
 }
 
 async function answerScan(
@@ -103,7 +110,8 @@ async function scanPackage(
   act: LoadAct,
 ): Promise<Answer> {
   const { label, item } = await lockLabel(trx, known, code);
-  const view = item && !known.view.items.some((entry) => entry.id === item.id) ? withItem(known.view, item) : known.view;
+  const view =
+    item && !known.view.items.some((entry) => entry.id === item.id) ? withItem(known.view, item) : known.view;
   const reply = decideScan({ view, known: label, place, policy: known.policy });
   const about =
     label.kind === 'package'
@@ -148,7 +156,9 @@ async function lockLabel(
   if (found?.facilityId !== facilityId) return { label: { kind: 'not-known' }, item: null };
   await lockPackages(trx, [found.id]);
   const facts = await findPackageByCode(trx, code);
-  const item = known.view.items.find((entry) => entry.id === found.itemId) ?? (await catalogueItems(trx, facilityId, [found.itemId]))[0];
+  const item =
+    known.view.items.find((entry) => entry.id === found.itemId) ??
+    (await catalogueItems(trx, facilityId, [found.itemId]))[0];
   if (!facts || !item) return { label: { kind: 'not-known' }, item: null };
   const listed = known.view.packages.find((entry) => entry.packageId === facts.id);
   return {
@@ -176,11 +186,20 @@ async function lockLabel(
 async function scanShelf(trx: Transaction, known: LoadAsKnown, code: string): Promise<Answer> {
   const own = known.view.cart.shelves.find((shelf) => shelf.placeCode === code);
   if (own) {
-    return { ...nothing, answer: 'place-set', sentence: `${own.name}. Scan what goes on it.`, place: { kind: 'shelf', shelfId: own.id } };
+    return {
+      ...nothing,
+      answer: 'place-set',
+      sentence: `${own.name}. Scan what goes on it.`,
+      place: { kind: 'shelf', shelfId: own.id },
+    };
   }
   const other = await shelfByPlaceCode(trx, known.load.facility_id, code);
   return other
-    ? { ...nothing, answer: 'place-refused', sentence: `That shelf belongs to cart ${other.cartCode}. This load is on ${known.view.cart.name}.` }
+    ? {
+        ...nothing,
+        answer: 'place-refused',
+        sentence: `That shelf belongs to cart ${other.cartCode}. This load is on ${known.view.cart.name}.`,
+      }
     : refused('No shelf here has this code.');
 }
 
@@ -201,16 +220,32 @@ async function scanHolder(
   if (against !== null) return { ...nothing, answer: 'place-refused', sentence: against };
   const spot = suggestHolderSpot(known.view, holder.kind, shelfWanted(known.view, place));
   if (!spot) {
-    return { ...nothing, answer: 'place-refused', sentence: `There is no free room for ${holder.name} on ${known.view.cart.name}.` };
+    return {
+      ...nothing,
+      answer: 'place-refused',
+      sentence: `There is no free room for ${holder.name} on ${known.view.cart.name}.`,
+    };
   }
-  const placed: LoadHolder = { holderId: holder.holderId, name: holder.name, placeCode: holder.placeCode, kindId: holder.kind.id, ...spot };
+  const placed: LoadHolder = {
+    holderId: holder.holderId,
+    name: holder.name,
+    placeCode: holder.placeCode,
+    kindId: holder.kind.id,
+    ...spot,
+  };
   const after: LoadView = { ...known.view, holders: [...known.view.holders, placed] };
   const change = await recordAct(trx, known, after, act, (difference) => ({
     kind: 'load.holder-placed',
     payload: { holder: holder.name, difference },
   }));
   const shelf = known.view.cart.shelves.find((entry) => entry.id === spot.shelfId);
-  return { ...nothing, answer: 'place-set', sentence: `${holder.name} goes on ${shelf?.name.toLowerCase() ?? 'the cart'}. Scan what goes in it.`, place: here, change };
+  return {
+    ...nothing,
+    answer: 'place-set',
+    sentence: `${holder.name} goes on ${shelf?.name.toLowerCase() ?? 'the cart'}. Scan what goes in it.`,
+    place: here,
+    change,
+  };
 }
 
 function shelfWanted(view: LoadView, place: ScanPlace | null): string | null {

@@ -33,8 +33,10 @@ export async function undoLastAct(
     const returning = back.packages.flatMap((entry) => (entry.before === null ? [entry.id] : []));
     await lockPackages(trx, returning);
     for (const facts of await findPackages(trx, returning)) {
-      const isFree = facts.openLoad === null && (facts.state === 'packed' || facts.state === 'staged') && facts.heldReason === null;
-      if (!isFree) throw new Conflict('load.changed-since', `${facts.code} cannot come back: it has been used elsewhere since.`);
+      const isFree =
+        facts.openLoad === null && (facts.state === 'packed' || facts.state === 'staged') && facts.heldReason === null;
+      if (!isFree)
+        throw new Conflict('load.changed-since', `${facts.code} cannot come back: it has been used elsewhere since.`);
     }
     for (const entry of back.holders) {
       if (entry.before !== null) continue;

@@ -55,7 +55,15 @@ export function BodyFront({ body, box }: { body: Body; box: PixelBox }) {
 }
 
 /** A package as it looks from above. */
-export function BodyPlan({ body, box, toPixels }: { body: Body; box: PixelBox; toPixels: (rect: PlanRect) => PixelBox }) {
+export function BodyPlan({
+  body,
+  box,
+  toPixels,
+}: {
+  body: Body;
+  box: PixelBox;
+  toPixels: (rect: PlanRect) => PixelBox;
+}) {
   const label = body.item.code;
   switch (body.item.kind) {
     case 'pouch':

@@ -113,10 +113,26 @@ export const CartElevation = memo(function CartElevation({
               : {})}
           >
             <rect {...space} className={shelf.id === activeShelfId ? 'fill-film-1/75' : 'fill-transparent'} />
-            <path d={`M${left} ${space.y}V${floor}M${right} ${space.y}V${floor}`} strokeWidth="3" className="stroke-ink-1" />
-            <rect x={left} y={space.y + space.height} width={shelf.widthMm * scale} height={Math.max(4, deckMm * scale * 0.6)} strokeWidth="1.1" className="fill-paper-0 stroke-ink-1" />
+            <path
+              d={`M${left} ${space.y}V${floor}M${right} ${space.y}V${floor}`}
+              strokeWidth="3"
+              className="stroke-ink-1"
+            />
+            <rect
+              x={left}
+              y={space.y + space.height}
+              width={shelf.widthMm * scale}
+              height={Math.max(4, deckMm * scale * 0.6)}
+              strokeWidth="1.1"
+              className="fill-paper-0 stroke-ink-1"
+            />
             {shelf.surface === 'wire' && (
-              <path d={`M${left + 5} ${space.y + space.height + 2.2}H${right - 5}`} strokeWidth="1" strokeDasharray="1 3" className="stroke-ink-1" />
+              <path
+                d={`M${left + 5} ${space.y + space.height + 2.2}H${right - 5}`}
+                strokeWidth="1"
+                strokeDasharray="1 3"
+                className="stroke-ink-1"
+              />
             )}
           </g>
         );
@@ -129,7 +145,9 @@ export const CartElevation = memo(function CartElevation({
               <g key={holder.holder.holderId}>
                 {holder.kind.form === 'rack' &&
                   holder.holder.turn === 0 &&
-                  freeSlots(holder, bodies).map((slot) => <GhostLeaf key={slot} box={toPixels(shelf, ghostSlotBox(holder, slot))} />)}
+                  freeSlots(holder, bodies).map((slot) => (
+                    <GhostLeaf key={slot} box={toPixels(shelf, ghostSlotBox(holder, slot))} />
+                  ))}
                 <path
                   d={`M${rail.x} ${rail.y}v${rail.height}h${rail.width}v${-rail.height}M${rail.x} ${rail.y + rail.height * 0.62}h${rail.width}`}
                   fill="none"
@@ -150,7 +168,14 @@ export const CartElevation = memo(function CartElevation({
       <FrontGaps findings={findings} layout={layout} toPixels={toPixels} />
       {lowest && <Drain x={leftOf(lowest) + view.sterilizer.drainXMm * scale} y={floor + 8} />}
       {pins.map(({ x, y, letter, finding }) => (
-        <MapPin key={finding.key} x={x} y={y} letter={letter} severity={finding.severity} isOpen={finding.key === openFindingKey} />
+        <MapPin
+          key={finding.key}
+          x={x}
+          y={y}
+          letter={letter}
+          severity={finding.severity}
+          isOpen={finding.key === openFindingKey}
+        />
       ))}
     </MapDrawing>
   );
@@ -169,10 +194,20 @@ function FrontGaps({
   const bad = usePattern('bad');
   const stopped = new Set(
     findings.flatMap(({ finding }) =>
-      finding.severity === 'stop' ? finding.places.flatMap((place) => (place.on === 'package' ? [place.packageId] : [])) : [],
+      finding.severity === 'stop'
+        ? finding.places.flatMap((place) => (place.on === 'package' ? [place.packageId] : []))
+        : [],
     ),
   );
   return layout.bodies
     .filter((body) => stopped.has(body.packageId))
-    .map((body) => <rect key={body.packageId} {...toPixels(body.shelf, body.box)} fill={bad} opacity={0.3} className="pointer-events-none" />);
+    .map((body) => (
+      <rect
+        key={body.packageId}
+        {...toPixels(body.shelf, body.box)}
+        fill={bad}
+        opacity={0.3}
+        className="pointer-events-none"
+      />
+    ));
 }

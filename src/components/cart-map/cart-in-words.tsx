@@ -4,7 +4,13 @@ import type { LoadView } from '#domain/load/model';
 import { memo } from 'react';
 
 /** The map for those who do not see it: shelf, holder, slot, item, facing, finding. */
-export const CartInWords = memo(function CartInWords({ view, findings }: { view: LoadView; findings: readonly Finding[] }) {
+export const CartInWords = memo(function CartInWords({
+  view,
+  findings,
+}: {
+  view: LoadView;
+  findings: readonly Finding[];
+}) {
   return (
     <section aria-label={`${view.cart.name} in words`} className="sr-only">
       {textTwin(view, findings).map((part) => (

@@ -59,7 +59,15 @@ function CentredLabel({ box, label, ground }: { box: PixelBox; label: string | u
  * A pouch seen along its faces: two halves, paper and film, each with its own edge. First is left, or lower where the
  * faces lie across.
  */
-export function Leaf({ box, isPaperFirst, isAcross = false }: { box: PixelBox; isPaperFirst: boolean; isAcross?: boolean }) {
+export function Leaf({
+  box,
+  isPaperFirst,
+  isAcross = false,
+}: {
+  box: PixelBox;
+  isPaperFirst: boolean;
+  isAcross?: boolean;
+}) {
   const { x, y, width, height } = box;
   const first = isPaperFirst ? 'fill-leaf-paper' : 'fill-leaf-film';
   const second = isPaperFirst ? 'fill-leaf-film' : 'fill-leaf-paper';

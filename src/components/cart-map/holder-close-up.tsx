@@ -47,7 +47,14 @@ export const HolderCloseUp = memo(function HolderCloseUp(props: HolderCloseUpPro
         strokeWidth="1.2"
         className="fill-paper-2 stroke-ink-1"
       />
-      <rect x={4} y={floor} width={span} height={baseHeightPx} strokeWidth="1.2" className="fill-paper-0 stroke-ink-1" />
+      <rect
+        x={4}
+        y={floor}
+        width={span}
+        height={baseHeightPx}
+        strokeWidth="1.2"
+        className="fill-paper-0 stroke-ink-1"
+      />
       {slots.map((slot) => {
         const x = 4 + 12 + (slot - 1) * pitch;
         const here = inSlot(slot);
@@ -86,7 +93,9 @@ export const HolderCloseUp = memo(function HolderCloseUp(props: HolderCloseUpPro
                 className="stroke-ink-3"
               />
             )}
-            {isNext && <rect x={x - 12} y={floor + 12} width={Math.max(pitch - 7, 26)} height={22} className="fill-film-5" />}
+            {isNext && (
+              <rect x={x - 12} y={floor + 12} width={Math.max(pitch - 7, 26)} height={22} className="fill-film-5" />
+            )}
             <MapText
               x={x + pitch / 2 - 15}
               y={floor + 28}
@@ -153,7 +162,10 @@ function slotOf({ places }: LetteredFinding['finding'], holder: HolderBody, bodi
 function slotWords(slot: number, here: readonly Body[], isNext: boolean): string {
   if (here.length === 0) return `Slot ${slot}, ${isNext ? 'next' : 'free'}`;
   return here
-    .map((body) => `Slot ${slot}, ${body.item.name}${body.placement.paper === null ? '' : `, paper side ${body.placement.paper}`}`)
+    .map(
+      (body) =>
+        `Slot ${slot}, ${body.item.name}${body.placement.paper === null ? '' : `, paper side ${body.placement.paper}`}`,
+    )
     .join('; ');
 }
 
@@ -184,15 +196,27 @@ function StandingLeaf({
       <path
         d={face}
         strokeWidth="1.2"
-        className={isPaperLeft ? (isNext ? 'fill-film-1/75 stroke-film-4' : 'fill-leaf-film stroke-film-4') : 'fill-leaf-paper stroke-paper-edge'}
+        className={
+          isPaperLeft
+            ? isNext
+              ? 'fill-film-1/75 stroke-film-4'
+              : 'fill-leaf-film stroke-film-4'
+            : 'fill-leaf-paper stroke-paper-edge'
+        }
         strokeDasharray={isNext ? '5 3' : undefined}
       />
       {isPaperLeft && !isNext && <path d={face} fill={gloss} />}
-      {isPaperLeft && !isNext && (
-        <path d={`M${x + dx} ${floor - dy}v-9l${-dx} ${dy}v9z`} className="fill-film-3/35" />
-      )}
-      <path d={`M${edgeX} ${floor + 1}v${-height - 2}`} strokeWidth="5" className={isPaperLeft ? 'stroke-leaf-paper' : 'stroke-leaf-film'} />
-      <path d={`M${edgeX - 2.5} ${floor + 1}v${-height - 2}`} strokeWidth="1.2" className={isPaperLeft ? 'stroke-paper-edge' : 'stroke-film-4'} />
+      {isPaperLeft && !isNext && <path d={`M${x + dx} ${floor - dy}v-9l${-dx} ${dy}v9z`} className="fill-film-3/35" />}
+      <path
+        d={`M${edgeX} ${floor + 1}v${-height - 2}`}
+        strokeWidth="5"
+        className={isPaperLeft ? 'stroke-leaf-paper' : 'stroke-leaf-film'}
+      />
+      <path
+        d={`M${edgeX - 2.5} ${floor + 1}v${-height - 2}`}
+        strokeWidth="1.2"
+        className={isPaperLeft ? 'stroke-paper-edge' : 'stroke-film-4'}
+      />
       {fitting >= 4 && (
         <text
           transform={`matrix(0 -1 ${(dx / 32).toFixed(3)} ${(-dy / 32).toFixed(3)} ${x + dx * 0.62} ${floor - 7 - dy * 0.62})`}

@@ -19,8 +19,14 @@ export function slotBox(
   const across = slotMiddle(kind, slot) - size.thicknessMm / 2;
   const along = (kind.alongMm - size.lengthMm) / 2;
   return holder.turn === 0
-    ? boxAt({ x: box.left + across, y: box.front + along, z: 0 }, { widthMm: size.thicknessMm, depthMm: size.lengthMm, heightMm: size.heightMm })
-    : boxAt({ x: box.left + along, y: box.front + across, z: 0 }, { widthMm: size.lengthMm, depthMm: size.thicknessMm, heightMm: size.heightMm });
+    ? boxAt(
+        { x: box.left + across, y: box.front + along, z: 0 },
+        { widthMm: size.thicknessMm, depthMm: size.lengthMm, heightMm: size.heightMm },
+      )
+    : boxAt(
+        { x: box.left + along, y: box.front + across, z: 0 },
+        { widthMm: size.lengthMm, depthMm: size.thicknessMm, heightMm: size.heightMm },
+      );
 }
 
 /** An empty slot, drawn as a leaf a little smaller than the rack takes. */
@@ -33,7 +39,11 @@ export function ghostSlotBox(holder: HolderBody, slot: number): ShelfBox {
   });
 }
 
-export function nextPlaceOf(layout: Layout, placement: Placement | null, item: CatalogueItem | undefined): NextPlace | null {
+export function nextPlaceOf(
+  layout: Layout,
+  placement: Placement | null,
+  item: CatalogueItem | undefined,
+): NextPlace | null {
   if (placement === null || item === undefined) return null;
   if (placement.at === 'slot') {
     const holder = layout.holderOf.get(placement.holderId);
@@ -47,7 +57,13 @@ export function nextPlaceOf(layout: Layout, placement: Placement | null, item: C
   }
   if (placement.at === 'package') {
     const below = layout.bodyOf.get(placement.belowPackageId);
-    return below ? { shelfId: below.shelf.id, box: boxAt({ x: placement.xMm, y: placement.yMm, z: below.box.top }, size), placement } : null;
+    return below
+      ? {
+          shelfId: below.shelf.id,
+          box: boxAt({ x: placement.xMm, y: placement.yMm, z: below.box.top }, size),
+          placement,
+        }
+      : null;
   }
   const basket = layout.holderOf.get(placement.holderId);
   if (!basket) return null;
@@ -56,7 +72,11 @@ export function nextPlaceOf(layout: Layout, placement: Placement | null, item: C
 }
 
 export function freeSlots(holder: HolderBody, bodies: readonly Body[]): number[] {
-  const taken = new Set(bodies.flatMap((body) => (body.holder?.holder.holderId === holder.holder.holderId && body.slot !== null ? [body.slot] : [])));
+  const taken = new Set(
+    bodies.flatMap((body) =>
+      body.holder?.holder.holderId === holder.holder.holderId && body.slot !== null ? [body.slot] : [],
+    ),
+  );
   return Array.from({ length: holder.kind.slots ?? 0 }, (_, index) => index + 1).filter((slot) => !taken.has(slot));
 }
 
@@ -71,12 +91,19 @@ export function anchorOf(layout: Layout, finding: Finding): Anchor {
     }
     if (place.on === 'holder') {
       const holder = layout.holderOf.get(place.holderId);
-      if (holder) return { shelfId: holder.shelf.id, box: place.slot === null ? holder.box : ghostSlotBox(holder, place.slot) };
+      if (holder)
+        return { shelfId: holder.shelf.id, box: place.slot === null ? holder.box : ghostSlotBox(holder, place.slot) };
     }
     if (place.on === 'shelf') {
       const shelf = layout.shelves.find((entry) => entry.shelf.id === place.shelfId)?.shelf;
       if (shelf) {
-        return { shelfId: shelf.id, box: boxAt({ x: shelf.widthMm * 0.82, y: shelf.depthMm * 0.5, z: 0 }, { widthMm: shelf.widthMm * 0.12, depthMm: 40, heightMm: shelf.clearHeightMm * 0.5 }) };
+        return {
+          shelfId: shelf.id,
+          box: boxAt(
+            { x: shelf.widthMm * 0.82, y: shelf.depthMm * 0.5, z: 0 },
+            { widthMm: shelf.widthMm * 0.12, depthMm: 40, heightMm: shelf.clearHeightMm * 0.5 },
+          ),
+        };
       }
     }
   }

@@ -76,11 +76,23 @@ export const ShelfPlan = memo(function ShelfPlan(props: ShelfPlanProps) {
           onHolder={props.onHolder}
         />
       ))}
-      <Bodies {...props} bodies={bodies} toPixels={toPixels} describe={(body) => `${body.item.name}, ${placementWords(view, body.placement, body.item)}`} />
+      <Bodies
+        {...props}
+        bodies={bodies}
+        toPixels={toPixels}
+        describe={(body) => `${body.item.name}, ${placementWords(view, body.placement, body.item)}`}
+      />
       <Gaps findings={findings} layout={layout} shelf={shelf} toPixels={toPixels} />
       {next?.shelfId === shelf.id && <NextSpot box={toPixels(next.box)} />}
       {pins.map(({ x, y, letter, finding }) => (
-        <MapPin key={finding.key} x={x} y={y} letter={letter} severity={finding.severity} isOpen={finding.key === openFindingKey} />
+        <MapPin
+          key={finding.key}
+          x={x}
+          y={y}
+          letter={letter}
+          severity={finding.severity}
+          isOpen={finding.key === openFindingKey}
+        />
       ))}
       <DoorEnd width={width} y={height - doorPx} />
     </MapDrawing>
@@ -97,7 +109,11 @@ function ShelfGround({ shelf, scale, keepClearMm }: { shelf: Shelf; scale: numbe
       <rect x={m} y={m} width={w} height={h} className="fill-paper-0" />
       {shelf.surface === 'wire' && <rect x={m} y={m} width={w} height={h} fill={wire} />}
       {c > 1 && (
-        <path fillRule="evenodd" fill={keepClear} d={`M${m} ${m}h${w}v${h}h${-w}zM${m + c} ${m + c}v${h - 2 * c}h${w - 2 * c}v${-(h - 2 * c)}z`} />
+        <path
+          fillRule="evenodd"
+          fill={keepClear}
+          d={`M${m} ${m}h${w}v${h}h${-w}zM${m + c} ${m + c}v${h - 2 * c}h${w - 2 * c}v${-(h - 2 * c)}z`}
+        />
       )}
       <rect x={m} y={m} width={w} height={h} fill="none" strokeWidth="1.6" className="stroke-ink-1" />
     </>
@@ -121,7 +137,8 @@ function HolderPlan({
   const { name, holderId } = holder.holder;
   const free = freeSlots(holder, bodies);
   const slots = holder.kind.slots ?? 0;
-  const label = slots === 0 ? name : free.length === 0 ? `${name}, full` : `${name}, ${slots - free.length} of ${slots}`;
+  const label =
+    slots === 0 ? name : free.length === 0 ? `${name}, full` : `${name}, ${slots - free.length} of ${slots}`;
   return (
     <g
       {...(onHolder
@@ -133,9 +150,20 @@ function HolderPlan({
           }
         : {})}
     >
-      <rect {...box} strokeWidth={isActive ? 2.4 : 1.5} className={isActive ? 'fill-film-1/80 stroke-film-5' : 'fill-transparent stroke-ink-1'} />
-      {holder.kind.form === 'rack' && free.map((slot) => <GhostLeaf key={slot} box={toPixels(ghostSlotBox(holder, slot))} />)}
-      <rect x={box.x + 1} y={box.y + box.height - 15} width={Math.min(box.width - 2, label.length * 6.7 + 5)} height={14} className="fill-paper-0/90" />
+      <rect
+        {...box}
+        strokeWidth={isActive ? 2.4 : 1.5}
+        className={isActive ? 'fill-film-1/80 stroke-film-5' : 'fill-transparent stroke-ink-1'}
+      />
+      {holder.kind.form === 'rack' &&
+        free.map((slot) => <GhostLeaf key={slot} box={toPixels(ghostSlotBox(holder, slot))} />)}
+      <rect
+        x={box.x + 1}
+        y={box.y + box.height - 15}
+        width={Math.min(box.width - 2, label.length * 6.7 + 5)}
+        height={14}
+        className="fill-paper-0/90"
+      />
       <MapText x={box.x + 4} y={box.y + box.height - 4} weight={600}>
         {label}
       </MapText>
@@ -203,7 +231,15 @@ function Bodies({ bodies, toPixels, describe, findings, pickedPackageId, onPacka
             <BodyPlan body={body} box={box} toPixels={toPixels} />
             {stopped.has(body.packageId) && <rect {...box} fill={bad} opacity={0.3} />}
             {body.packageId === pickedPackageId && (
-              <rect x={box.x - 3} y={box.y - 3} width={box.width + 6} height={box.height + 6} fill="none" strokeWidth="2.4" className="stroke-ink-1" />
+              <rect
+                x={box.x - 3}
+                y={box.y - 3}
+                width={box.width + 6}
+                height={box.height + 6}
+                fill="none"
+                strokeWidth="2.4"
+                className="stroke-ink-1"
+              />
             )}
           </g>
         );
@@ -233,7 +269,12 @@ function Gaps({
     });
     if (finding.ruleId === 'lid-filter-covered') {
       return coveredFilters(onShelf).map((rect) => (
-        <rect key={`${finding.key} ${rect.left} ${rect.front}`} {...toPixels(rect)} fill={bad} className="pointer-events-none" />
+        <rect
+          key={`${finding.key} ${rect.left} ${rect.front}`}
+          {...toPixels(rect)}
+          fill={bad}
+          className="pointer-events-none"
+        />
       ));
     }
     const gap = gapOf(finding, onShelf, shelf);
@@ -243,7 +284,13 @@ function Gaps({
     return [
       <g key={finding.key} className="pointer-events-none">
         <rect {...box} width={Math.max(box.width, 2)} height={Math.max(box.height, 2)} fill={warn} />
-        <rect x={box.x + box.width / 2 - figure.length * 3.4 - 3} y={box.y + box.height / 2 - 8} width={figure.length * 6.8 + 6} height={16} className="fill-straw-1" />
+        <rect
+          x={box.x + box.width / 2 - figure.length * 3.4 - 3}
+          y={box.y + box.height / 2 - 8}
+          width={figure.length * 6.8 + 6}
+          height={16}
+          className="fill-straw-1"
+        />
         <MapText x={box.x + box.width / 2} y={box.y + box.height / 2 + 4} anchor="middle" weight={600}>
           {figure}
         </MapText>
@@ -298,7 +345,12 @@ function between(a: PlanRect, b: PlanRect): PlanRect | null {
 function DoorEnd({ width, y }: { width: number; y: number }) {
   return (
     <>
-      <path d={`M${marginPx} ${y + 5}v6h${width - 2 * marginPx}v-6`} fill="none" strokeWidth="1.2" className="stroke-ink-1" />
+      <path
+        d={`M${marginPx} ${y + 5}v6h${width - 2 * marginPx}v-6`}
+        fill="none"
+        strokeWidth="1.2"
+        className="stroke-ink-1"
+      />
       <rect x={width / 2 - 62} y={y + 4} width={124} height={14} className="fill-paper-1" />
       <MapText x={width / 2} y={y + 15} anchor="middle" weight={600}>
         Door, you stand here

@@ -10,7 +10,7 @@ export type ScanAnswer =
   | { readonly answer: 'called-back' };
 
 /** Taken, but look: it is on the load, and something wants a second glance. */
-export type ScanLook = 'no-slot-left' | 'no-place-found' | 'not-on-the-list' | 'suggested-elsewhere';
+export type ScanLook = 'no-slot-left' | 'no-place-found' | 'not-on-the-list';
 
 export type NotReadyReason = 'in-another-load' | 'already-processed' | 'not-packed' | 'expired' | 'used' | 'discarded';
 

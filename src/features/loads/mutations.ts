@@ -92,7 +92,11 @@ export function useAcceptFinding(loadId: string) {
   return useMutation({
     ...inOrder(loadId),
     mutationFn: (acceptance: { readonly findingKey: string; readonly reason: string }) =>
-      api.post(`${paths.load(loadId)}/acceptances`, { requestId: newRequestId(), ...acceptance }, loadChangeResponseSchema),
+      api.post(
+        `${paths.load(loadId)}/acceptances`,
+        { requestId: newRequestId(), ...acceptance },
+        loadChangeResponseSchema,
+      ),
     onSuccess: ({ change }) => takeIn(client, loadId, change),
   });
 }
@@ -122,7 +126,11 @@ export function usePrintStickers(loadId: string) {
   return useMutation({
     ...inOrder(loadId),
     mutationFn: (request: { readonly packageIds: readonly string[] | null; readonly reason: string | null }) =>
-      api.post(`${paths.load(loadId)}/stickers`, { requestId: newRequestId(), ...request }, printStickersResponseSchema),
+      api.post(
+        `${paths.load(loadId)}/stickers`,
+        { requestId: newRequestId(), ...request },
+        printStickersResponseSchema,
+      ),
     onSuccess: () => client.invalidateQueries({ queryKey: loadQueries.detail(loadId).queryKey }),
   });
 }

@@ -1,9 +1,4 @@
-import {
-  loadDetailSchema,
-  loadHistorySchema,
-  loadListResponseSchema,
-  loadOpeningOptionsSchema,
-} from '#contract/loads';
+import { loadDetailSchema, loadHistorySchema, loadListResponseSchema, loadOpeningOptionsSchema } from '#contract/loads';
 import { paths } from '#contract/paths';
 import { queryOptions } from '@tanstack/react-query';
 import { api, withQuery } from '../../lib/api-client';
