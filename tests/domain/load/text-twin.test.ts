@@ -108,7 +108,7 @@ describe('textTwin', () => {
       .flatMap((part) => part.lines)
       .join('\n');
     for (const name of ['D&C set, on top', 'Adson forceps pair, on top', 'General container set A', 'Eye micro set']) {
-      expect(text.split(`${name}`).length - 1, name).toBe(1);
+      expect(text.split(name).length - 1, name).toBe(1);
     }
   });
 });
