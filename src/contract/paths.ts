@@ -8,6 +8,7 @@ export const paths = {
   sessionFacility: '/api/session/facility',
   signOutEverywhere: '/api/session/sign-out-everywhere',
   people: '/api/people',
+  peopleJoin: '/api/people/join',
   person: (personId: string) => `/api/people/${personId}`,
   items: '/api/items',
   itemsImport: '/api/items/import',
