@@ -6,6 +6,7 @@ import type { Body, HolderBody, Layout, ShelfLayout } from './layout';
 import type { CatalogueItem, LoadView, Placement, Turn } from './model';
 import { limitOf, type LoadPolicy } from './policy';
 import { racksFor } from './rules/holder-fit';
+import { hasMetal } from './rules/metal';
 import { clearanceOf } from './rules/near-pairs';
 import { massOrNothing } from './sensible';
 
@@ -228,10 +229,10 @@ export function obstaclesOn({ bodies, holders }: ShelfLayout, policy: LoadPolicy
 
 /** Seen from above, metal keeps off textiles on lower shelves, and textiles keep off metal on higher ones. */
 function metalAndTextiles(layout: Layout, item: CatalogueItem, policy: LoadPolicy, level: number): readonly Obstacle[] {
-  const isMetal = (one: CatalogueItem) => one.metalMassKg >= policy.metalOverTextileKg;
-  const isTextile = (one: CatalogueItem) => one.kind === 'textile-pack' || one.textileMassKg > one.metalMassKg;
+  const isTextile = item.kind === 'textile-pack';
+  const isMetal = !isTextile && item.metalMassKg >= policy.metalOverTextileKg;
   const isInTheWay = (body: Body) =>
-    (isMetal(item) && isTextile(body.item) && body.shelf.level < level) ||
-    (isTextile(item) && isMetal(body.item) && body.shelf.level > level);
+    (isMetal && body.item.kind === 'textile-pack' && body.shelf.level < level) ||
+    (isTextile && body.item.kind !== 'textile-pack' && hasMetal(body, policy) && body.shelf.level > level);
   return layout.bodies.filter(isInTheWay).map((body) => ({ rect: body.box, clearanceMm: 0 }));
 }

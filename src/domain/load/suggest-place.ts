@@ -11,6 +11,8 @@ import { defaultPolicy, type LoadPolicy } from './policy';
 
 /** Places tried before giving up: a scan is answered within a blink, and the map takes any place a person wants. */
 const mostTries = 24;
+/** Places tried for a better one, once there is one that a lead would have to accept. */
+const mostTriesForBetter = 4;
 
 /**
  * Where a package should go, or null where no place is good. Never a place that adds a finding which holds the load; one
@@ -47,10 +49,10 @@ export function findPlace(
   const layout = layOut({ ...asked.view, packages: asked.view.packages.filter((each) => each !== one) });
   let before = troubleBefore;
   let acceptable: FoundPlace | null = null;
-  let tries = 0;
+  let triesLeft = mostTries;
   for (const suggestion of placeCandidates({ view, layout, policy, item, within })) {
-    if (tries === mostTries) break;
-    tries += 1;
+    if (triesLeft === 0) break;
+    triesLeft -= 1;
     const edit = { edit: 'place', packageId: one.packageId, placement: suggestion.placement } as const;
     const placed = applyEdit(asked.view, edit);
     if (!placed.ok) continue;
@@ -58,7 +60,10 @@ export function findPlace(
     const trouble = troubleOf(placed.value, policy);
     const worst = worstAdded(before, trouble);
     if (worst === null) return { suggestion, after: placed.value, trouble };
-    if (worst === 'accept') acceptable ??= { suggestion, after: placed.value, trouble };
+    if (worst === 'accept' && !acceptable) {
+      acceptable = { suggestion, after: placed.value, trouble };
+      triesLeft = Math.min(triesLeft, mostTriesForBetter);
+    }
   }
   return acceptable;
 }
