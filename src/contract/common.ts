@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import './plain-words';
 
 export const idSchema = z.uuid();
 

@@ -1,6 +1,8 @@
 import {
   identifyRequestSchema,
   identifyResponseSchema,
+  labelSheetParamsSchema,
+  labelSheetQuerySchema,
   packageDetailSchema,
   packageListQuerySchema,
   packageListResponseSchema,
@@ -14,6 +16,7 @@ import {
 import { paths } from '#contract/paths';
 import { parsePackageCode } from '#domain/label/package-code';
 import { defineRoute, type Route } from '../../http/define-route';
+import { drawLabelBatch } from './draw-label-batch';
 import { facilityDay } from './facility-day';
 import { getPackage } from './get-package';
 import { identifyScan } from './identify-scan';
@@ -65,6 +68,15 @@ export const packageRoutes: readonly Route[] = [
     response: printLabelsResponseSchema,
     status: 201,
     handle: ({ services, actor, body }) => printLabels(services, actor, body),
+  }),
+  defineRoute({
+    method: 'get',
+    path: '/api/packages/labels/:batchId',
+    permission: 'package.print-labels',
+    params: labelSheetParamsSchema,
+    query: labelSheetQuerySchema,
+    response: 'file',
+    handle: ({ services, actor, params, query }) => drawLabelBatch(services, actor, params.batchId, query.layout),
   }),
   defineRoute({
     method: 'get',
