@@ -8,7 +8,7 @@ import type { Permission } from '#domain/access/permissions';
 import { z } from 'zod';
 import { writeCsv, writeCsvTemplate } from '../platform/csv/write-csv';
 import { importFile, listForExport, previewImport } from '../platform/register/import-file';
-import type { Register } from '../platform/register/register';
+import type { FiledRegister } from '../platform/register/register';
 import { defineRoute, type Route } from './define-route';
 
 const csv = 'text/csv; charset=utf-8' as const;
@@ -22,7 +22,7 @@ export function registerFileRoutes<Fields extends object>({
   viewing,
   editing,
 }: {
-  readonly register: Register<Fields>;
+  readonly register: FiledRegister<Fields>;
   readonly path: string;
   /** Without its ending: "items". */
   readonly fileName: string;

@@ -20,7 +20,6 @@ export const lineSchema = z
   .string()
   .trim()
   .max(300, 'At most 300 characters.')
-  // eslint-disable-next-line no-control-regex -- control characters are what is refused here
   .regex(/^[^\u0000-\u001f\u007f]*$/, 'This has a character that cannot be kept.');
 
 /** An answer to a yes-or-no question. */

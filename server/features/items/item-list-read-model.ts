@@ -2,7 +2,7 @@ import type { Item, ItemList } from '#contract/items';
 import type { ItemKind } from '#domain/load/model';
 import type { Db, Transaction } from '../../platform/db';
 import { NotFound } from '../../platform/errors';
-import { containing } from '../../platform/search-text';
+import { pageOf, whereFound, type ListFilters } from '../../platform/paged-list';
 import { itemFieldsFromRow, type WholeItemRow } from './item-row';
 
 function itemOf(row: WholeItemRow): Item {
@@ -25,32 +25,21 @@ export async function getItem(trx: Transaction | Db, facilityId: string, itemId:
   return itemOf(row);
 }
 
-export type ItemListFilters = {
-  readonly search: string;
-  readonly kind?: ItemKind | undefined;
-  readonly retired: 'hidden' | 'shown';
-  readonly page: number;
-  readonly pageSize: number;
-};
-
-/** One page of the facility's items by code; every word of the search is found in code, name, identifier or service. */
-export async function listItems(db: Db, facilityId: string, filters: ItemListFilters): Promise<ItemList> {
-  const { search, kind, retired, page, pageSize } = filters;
+/** One page of the facility's items by code. */
+export async function listItems(
+  db: Db,
+  facilityId: string,
+  { search, kind, retired, page, pageSize }: ListFilters & { readonly kind?: ItemKind | undefined },
+): Promise<ItemList> {
   const wanted = db('items').where('items.facility_id', facilityId);
   if (retired === 'hidden') void wanted.where('items.is_retired', false);
   if (kind !== undefined) void wanted.where('items.kind', kind);
-  for (const word of search.split(/\s+/).filter((one) => one !== '')) {
-    void wanted.where((either) => {
-      for (const column of ['code', 'name', 'device_identifier', 'service', 'note']) {
-        void either.orWhereILike(`items.${column}`, containing(word));
-      }
-    });
-  }
-  const [counted] = await wanted.clone().count<{ count: number }[]>({ count: '*' });
-  const rows = await wanted
-    .orderBy('items.code')
-    .limit(pageSize)
-    .offset((page - 1) * pageSize)
-    .select<WholeItemRow[]>('items.*');
-  return { items: rows.map(itemOf), total: counted?.count ?? 0, page, pageSize };
+  whereFound(wanted, search, ['items.code', 'items.name', 'items.device_identifier', 'items.service', 'items.note']);
+  const { rows, ...paging } = await pageOf<WholeItemRow>(wanted, {
+    page,
+    pageSize,
+    orderBy: ['items.code'],
+    select: ['items.*'],
+  });
+  return { items: rows.map(itemOf), ...paging };
 }

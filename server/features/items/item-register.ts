@@ -6,7 +6,14 @@ import { itemColumns } from '#domain/catalogue/item-columns';
 import type { ItemFields } from '#domain/catalogue/item-fields';
 import { appendEvent, appendEvents, type AuditEvent } from '../../platform/audit-writer';
 import type { Db, Transaction } from '../../platform/db';
-import type { Judge, Kept, Register, WriteContext, Written } from '../../platform/register/register';
+import {
+  keyOfCode,
+  type Judge,
+  type Kept,
+  type FiledRegister,
+  type WriteContext,
+  type Written,
+} from '../../platform/register/register';
 import { holderKinds } from '../equipment/read-model';
 import { listKeptItems, putItems } from './item-store';
 
@@ -75,13 +82,13 @@ async function write(context: WriteContext, written: readonly Written<ItemFields
   );
 }
 
-export const itemRegister: Register<ItemFields> = {
+export const itemRegister: FiledRegister<ItemFields> = {
   name: 'item',
   aNoun: 'an item',
   columns: itemColumns,
   schema: itemFieldsSchema,
   keyField: 'code',
-  keyOf: ({ code }) => (code === undefined || code === '' ? null : code.trim().toUpperCase()),
+  keyOf: ({ code }) => keyOfCode(code),
   settle,
   list: listKeptItems,
   judge,

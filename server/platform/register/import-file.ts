@@ -7,7 +7,7 @@ import type { Db, Transaction } from '../db';
 import { Conflict, InvalidInput, RuleRefused } from '../errors';
 import { once } from '../once';
 import { planImport, type ImportPlan, type PlannedLine } from './plan-import';
-import { keyOfKept, lockRegister, type Desk, type Register, type Written } from './register';
+import { keyOfKept, lockRegister, type Desk, type FiledRegister, type Written } from './register';
 
 /** Longer lists are cut: nobody reads them, and the counts say how many there are. */
 const mostShown = 500;
@@ -20,7 +20,7 @@ function requireFile(file: Buffer | null): Buffer {
 }
 
 async function planFor<Fields extends object>(
-  register: Register<Fields>,
+  register: FiledRegister<Fields>,
   trx: Transaction | Db,
   { facilityId, file }: { readonly facilityId: string; readonly file: Buffer },
 ): Promise<ImportPlan<Fields>> {
@@ -57,7 +57,7 @@ function digestOf(plan: ImportPlan<unknown>, file: Buffer): string {
 
 /** Says what a file would do. Writes nothing. */
 export async function previewImport<Fields extends object>(
-  register: Register<Fields>,
+  register: FiledRegister<Fields>,
   { desk, actor }: Asker,
   uploaded: Buffer | null,
 ): Promise<ImportPreview> {
@@ -89,7 +89,7 @@ export async function previewImport<Fields extends object>(
 
 /** Takes a file over as its preview said: the whole or the good lines, in one transaction. */
 export async function importFile<Fields extends object>(
-  register: Register<Fields>,
+  register: FiledRegister<Fields>,
   { desk, actor }: Asker,
   {
     file: uploaded,
@@ -134,7 +134,7 @@ export async function importFile<Fields extends object>(
 
 /** Everything in the register, in the order of its keys, for a file that reads back to the same. */
 export async function listForExport<Fields extends object>(
-  register: Register<Fields>,
+  register: FiledRegister<Fields>,
   db: Db,
   facilityId: string,
 ): Promise<Fields[]> {

@@ -1,5 +1,6 @@
 import {
   changedFields,
+  fieldsOf,
   readCells,
   readHeader,
   whenLeftOut,
@@ -9,7 +10,7 @@ import {
 import type { NumberStyle } from '#domain/catalogue/csv-cell';
 import { InvalidInput } from '../errors';
 import type { CsvLine, CsvTable } from '../csv/read-csv-table';
-import { keyOfKept, type Judge, type Kept, type Register } from './register';
+import { keyOfKept, type Judge, type Kept, type FiledRegister } from './register';
 
 export type PlannedLine<Fields> = {
   readonly line: number;
@@ -34,7 +35,7 @@ type Reading<Fields> =
   | { readonly ok: false; readonly problems: readonly FieldProblem[] };
 
 type Desk<Fields extends object> = {
-  readonly register: Register<Fields>;
+  readonly register: FiledRegister<Fields>;
   readonly header: HeaderReading<Fields>;
   readonly width: number;
   readonly style: NumberStyle;
@@ -78,7 +79,7 @@ function readLine<Fields extends object>(desk: Desk<Fields>, { line, cells }: Cs
     }
   }
   if (!parsed.success || all.length > 0) return { ok: false, problems: all };
-  const settled = register.settle(parsed.data);
+  const settled = register.settle(parsed.data, before?.fields ?? null);
   if (settled.problems.length > 0) return { ok: false, problems: settled.problems };
   const { fields } = settled;
   const changes = before === null ? [] : changedFields(register.columns, before.fields, fields);
@@ -109,7 +110,7 @@ function keepConsistent<Fields>(
  * @throws InvalidInput when the header does not name the register's columns
  */
 export function planImport<Fields extends object>(
-  register: Register<Fields>,
+  register: FiledRegister<Fields>,
   table: CsvTable,
   { kept, judge }: { readonly kept: readonly Kept<Fields>[]; readonly judge: Judge<Fields> },
 ): ImportPlan<Fields> {
@@ -128,8 +129,8 @@ export function planImport<Fields extends object>(
   const note = (line: number, found: readonly FieldProblem[]) => {
     refusedLines.add(line);
     for (const { field, sentence } of found) {
-      const column = field === null ? undefined : register.columns[field as keyof Fields]?.name;
-      problems.push({ line, column: column ?? null, sentence });
+      const column = fieldsOf(register.columns).find((known) => known === field);
+      problems.push({ line, column: column === undefined ? null : register.columns[column].name, sentence });
     }
   };
   const readable: PlannedLine<Fields>[] = [];

@@ -24,32 +24,38 @@ export type WriteContext = {
 
 export type Judge<Fields> = (candidates: readonly Fields[]) => ReadonlyMap<Fields, readonly FieldProblem[]>;
 
-/**
- * A list of things people keep by form and by file: items, programs, holders. One description serves both ways in, so
- * that a file cannot bring in what the form would refuse.
- */
+/** A list of things people keep: items, programs, holders. */
 export type Register<Fields extends object> = {
   /** First part of codes and acts: "item", "holder-kind". */
   readonly name: string;
   /** As in "There is already an item W-01." */
   readonly aNoun: string;
-  readonly columns: ColumnSet<Fields>;
-  readonly schema: z.ZodType<Fields>;
-  /** The value by which a line of a file finds its thing, spelled as it is kept; null while it is not known. */
+  /** What tells things apart, spelled as it is kept; null while it is not known. */
   readonly keyOf: (values: Partial<Fields>) => string | null;
   readonly keyField: keyof Fields & string;
   /** Brings values into the form in which they are kept, and says what does not hold together in one thing alone. */
-  readonly settle: (fields: Fields) => { readonly fields: Fields; readonly problems: readonly FieldProblem[] };
+  readonly settle: (
+    fields: Fields,
+    before: Fields | null,
+  ) => { readonly fields: Fields; readonly problems: readonly FieldProblem[] };
   readonly list: (trx: Transaction | Db, facilityId: string) => Promise<Kept<Fields>[]>;
   /** Prepares the question what does not hold together among things: candidates, and what is kept and not among them. */
   readonly judge: (trx: Transaction | Db, facilityId: string, kept: readonly Kept<Fields>[]) => Promise<Judge<Fields>>;
   /** Writes the rows and the history. */
   readonly write: (context: WriteContext, written: readonly Written<Fields>[]) => Promise<void>;
+};
+
+export type ImportCounts = { readonly added: number; readonly changed: number; readonly refused: number };
+
+/**
+ * A register that is kept by file too. One description serves both ways in, so that a file cannot bring in what the
+ * form would refuse.
+ */
+export type FiledRegister<Fields extends object> = Register<Fields> & {
+  readonly columns: ColumnSet<Fields>;
+  readonly schema: z.ZodType<Fields>;
   /** Writes what a file did as a whole to the history. */
-  readonly noteImport: (
-    context: WriteContext,
-    counts: { readonly added: number; readonly changed: number; readonly refused: number },
-  ) => Promise<void>;
+  readonly noteImport: (context: WriteContext, counts: ImportCounts) => Promise<void>;
 };
 
 /**
@@ -62,4 +68,10 @@ export async function lockRegister(trx: Transaction, facilityId: string, name: s
 
 export function keyOfKept<Fields extends object>(register: Register<Fields>, thing: Kept<Fields>): string {
   return register.keyOf(thing.fields) ?? '';
+}
+
+/** The key of what is found by its code: codes are kept in capitals. */
+export function keyOfCode(code: string | undefined): string | null {
+  const key = code?.trim().toUpperCase() ?? '';
+  return key === '' ? null : key;
 }

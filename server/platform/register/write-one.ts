@@ -1,5 +1,4 @@
 import type { FieldProblem } from '#domain/catalogue/csv-column';
-import { changedFields } from '#domain/catalogue/csv-column';
 import type { Actor } from '../actor';
 import type { Transaction } from '../db';
 import { Conflict, InvalidInput, NotFound } from '../errors';
@@ -48,7 +47,7 @@ export async function addOne<Fields extends object, Reply>(
     { requestId, act: `${register.name}.add`, body: stated },
     async (trx) => {
       const context = contextOf(asker, trx, requestId);
-      const { fields, problems } = register.settle(stated);
+      const { fields, problems } = register.settle(stated, null);
       refuse(register.name, problems);
       await lockRegister(trx, facilityId, register.name);
       const kept = await register.list(trx, facilityId);
@@ -115,10 +114,10 @@ export async function changeOne<Fields extends object, Reply>(
           'Somebody else changed this while you were writing. Look at it again, then repeat your change.',
         );
       }
-      const { fields, problems } = register.settle(withChanges(before.fields, changes));
+      const { fields, problems } = register.settle(withChanges(before.fields, changes), before.fields);
       refuse(register.name, problems);
       await judgeOne(register, context, { fields, kept });
-      if (changedFields(register.columns, before.fields, fields).length > 0) {
+      if (JSON.stringify(fields) !== JSON.stringify(before.fields)) {
         await register.write(context, [{ before, after: { id, version: version + 1, fields } }]);
       }
       return view(trx, id);

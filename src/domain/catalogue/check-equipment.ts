@@ -84,3 +84,15 @@ export function checkHolderKind(kind: HolderKindFields): FieldProblem[] {
   }
   return problems;
 }
+
+type Placed = { readonly placeCode: string | null };
+
+/** A place code is given by us and printed on the thing: nobody types a new one, or another for what has one. */
+export function checkPlaceCode(stated: Placed, kept: Placed | undefined): FieldProblem[] {
+  if (stated.placeCode === (kept?.placeCode ?? null)) return [];
+  const sentence =
+    kept === undefined
+      ? 'Place codes are given by Paperside. Leave this empty for what is new.'
+      : `Its place code is ${kept.placeCode ?? ''}, and stays that.`;
+  return [{ field: 'placeCode', sentence }];
+}
