@@ -2,7 +2,18 @@ import { createContext, use } from 'react';
 import { createStore, useStore, type Store } from './store';
 
 /** Never the only sign of anything: each goes with words and a mark. */
-export type SoundName = 'taken' | 'taken-but-look' | 'not-taken' | 'wrong-place' | 'holder-full' | 'released';
+export type SoundName =
+  | 'taken'
+  | 'taken-but-look'
+  | 'holder-full'
+  | 'already-here'
+  | 'not-taken'
+  | 'not-known'
+  | 'held'
+  | 'called-back'
+  | 'place-set'
+  | 'wrong-place'
+  | 'released';
 
 export type Sounds = {
   readonly play: (name: SoundName) => void;
@@ -45,7 +56,15 @@ const glide = (atMs: number, fromHz: number, toHz: number): Note => ({
 const scores: Readonly<Record<Exclude<SoundName, 'released'>, readonly Note[]>> = {
   taken: [tap(0, 760)],
   'taken-but-look': [tap(0, 760), tap(130, 480)],
+  // Flat and double: nothing new.
+  'already-here': [tap(0, 520), tap(110, 520)],
   'not-taken': [low(0), low(170)],
+  // Rising, as a question does.
+  'not-known': [glide(0, 300, 560)],
+  held: [low(0), low(170), low(340)],
+  // Falling away, three times: the one to stop for.
+  'called-back': [glide(0, 620, 200), glide(190, 620, 200), glide(380, 620, 200)],
+  'place-set': [tap(0, 1040)],
   'wrong-place': [glide(0, 360, 620), glide(160, 620, 300)],
   'holder-full': [tap(0, 760), tap(95, 760), tap(190, 760)],
 };
@@ -98,7 +117,7 @@ function readSwitch(): boolean {
   }
 }
 
-/** The six sounds, made by the tablet itself: nothing is fetched. Silent where the browser has no Web Audio. */
+/** The sounds, made by the tablet itself: nothing is fetched. Silent where the browser has no Web Audio. */
 export function createSounds(makeAudio: () => AudioContext | null = browserAudio): Sounds {
   const isOn = createStore(readSwitch());
   let audio: AudioContext | null | undefined;

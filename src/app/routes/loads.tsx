@@ -1,12 +1,15 @@
-import { PageHead } from '../../components/ui/heading';
-import { EmptyState } from '../../components/ui/states';
+import type { QueryClient } from '@tanstack/react-query';
+import type { LoaderFunction } from 'react-router-dom';
+import { LoadList } from '../../features/loads/components/load-list';
+import { loadQueries } from '../../features/loads/queries';
+
+export const loader =
+  (queryClient: QueryClient): LoaderFunction =>
+  async () => {
+    await queryClient.query({ ...loadQueries.list('open'), staleTime: 'static' });
+    return null;
+  };
 
 export function Component() {
-  return (
-    <div className="grid gap-5 p-6">
-      <title>Loads · Paperside</title>
-      <PageHead title="Loads" />
-      <EmptyState title="Not here yet">The loads of this place will stand here.</EmptyState>
-    </div>
-  );
+  return <LoadList />;
 }

@@ -12,10 +12,13 @@ import { paths } from '#contract/paths';
 import type { LoadEdit } from '#domain/load/finding';
 import { useMutation, useQueryClient, type QueryClient } from '@tanstack/react-query';
 import { api, noContentSchema } from '../../lib/api-client';
+import { NoLineError } from '../../lib/errors';
 import { newRequestId } from '../../lib/request-id';
 import type { ScanEntry } from '../../lib/scanner-input';
 import { applyChange } from './apply-change';
 import { loadQueries } from './queries';
+
+const longestWaitMs = 4_000;
 
 /** Acts on one load go one after the other, in the order they were made: no scan overtakes another. */
 function inOrder(loadId: string) {
@@ -43,6 +46,8 @@ export function useOpenLoad() {
 }
 
 export type ScanToSend = {
+  /** Made when the scanner beeped, and kept for every repeat: a scan that was answered too late is not taken twice. */
+  readonly requestId: string;
   readonly raw: string;
   readonly entry: ScanEntry;
   readonly place: ScanPlace | null;
@@ -52,8 +57,10 @@ export function useScanIntoLoad(loadId: string) {
   const client = useQueryClient();
   return useMutation({
     ...inOrder(loadId),
-    mutationFn: (scan: ScanToSend) =>
-      api.post(`${paths.load(loadId)}/scans`, { requestId: newRequestId(), ...scan }, scanResponseSchema),
+    // Silence is no answer: the scan stays here and is sent again until the line is back. Those after it wait their turn.
+    retry: (_failures, error) => error instanceof NoLineError,
+    retryDelay: (failures) => Math.min(500 * 2 ** failures, longestWaitMs),
+    mutationFn: (scan: ScanToSend) => api.post(`${paths.load(loadId)}/scans`, scan, scanResponseSchema),
     onSuccess: (reply) => takeIn(client, loadId, reply.change),
   });
 }

@@ -1,0 +1,160 @@
+import type { LoadDetail } from '#contract/loads';
+import type { Finding, Fix, Severity } from '#domain/load/finding';
+import type { LetteredFinding } from '../../../components/cart-map/map-model';
+import { Button } from '../../../components/ui/button';
+import { FilmPanel } from '../../../components/ui/film-panel';
+import { PanelHead } from '../../../components/ui/heading';
+import { LevelWords, Pin, type PinLevel } from '../../../components/ui/pin';
+import { figureWords, limitWords } from '../figure-words';
+
+export const levelOf: Readonly<Record<Severity, PinLevel>> = { stop: 'hold', accept: 'look', advice: 'note' };
+
+type FindingsPanelProps = {
+  readonly detail: LoadDetail;
+  readonly open: readonly LetteredFinding[];
+  readonly settled: readonly LetteredFinding[];
+  readonly openKey: string | null;
+  readonly mayAccept: boolean;
+  readonly isBuilding: boolean;
+  readonly onOpen: (key: string | null) => void;
+  readonly onFix: (finding: Finding, fix: Fix) => void;
+  readonly onAccept: (finding: Finding) => void;
+};
+
+/** Every finding with the letter of its pin; the open one lies on film and says what, why, how to fix it, and its source. */
+export function FindingsPanel(props: FindingsPanelProps) {
+  const { detail, open, settled, openKey } = props;
+  const acceptanceOf = new Map(detail.acceptances.map((entry) => [entry.findingKey, entry]));
+  return (
+    <section aria-label="Findings" className="min-h-0">
+      <PanelHead
+        title={`Findings, ${open.length}`}
+        aside={open.length === 0 ? 'nothing found' : 'letters match the pins'}
+      />
+      {open.length === 0 && <p className="py-1 text-row text-ink-2">The rules find nothing to put right.</p>}
+      <ol>
+        {open.map((entry) =>
+          entry.finding.key === openKey ? (
+            <OpenFinding key={entry.finding.key} {...props} entry={entry} />
+          ) : (
+            <li key={entry.finding.key} className="border-t border-paper-3 first:border-t-0">
+              <button
+                type="button"
+                id={`finding-${entry.letter}`}
+                aria-expanded={false}
+                onClick={() => {
+                  props.onOpen(entry.finding.key);
+                }}
+                className="grid min-h-12 w-full grid-cols-[1.625rem_1fr] items-center gap-x-2.5 py-1 pr-2 text-left"
+              >
+                <Pin letter={entry.letter} level={levelOf[entry.finding.severity]} isLevelSaid />
+                <span>
+                  <span className="block text-row leading-[1.15rem] font-semibold">{entry.finding.title}</span>
+                  <span className="text-least text-ink-2">
+                    <LevelWords level={levelOf[entry.finding.severity]} />
+                    {entry.finding.fix && <span className="ml-2.5">can be put right by touch</span>}
+                  </span>
+                </span>
+              </button>
+            </li>
+          ),
+        )}
+      </ol>
+      {settled.length > 0 && (
+        <details className="border-t border-paper-3 pt-1">
+          <summary className="min-h-11 cursor-pointer py-2.5 text-row font-semibold">Settled, {settled.length}</summary>
+          <ul>
+            {settled.map(({ letter, finding }) => {
+              const acceptance = acceptanceOf.get(finding.key);
+              return (
+                <li key={finding.key} className="grid grid-cols-[1.625rem_1fr] gap-x-2.5 py-1.5 text-small">
+                  <Pin letter={letter} level="note" isLevelSaid />
+                  <span>
+                    <b className="font-semibold">{finding.title}</b>
+                    {acceptance && (
+                      <span className="block text-ink-2">
+                        Left as it is by {acceptance.acceptedBy}: “{acceptance.reason}”
+                      </span>
+                    )}
+                  </span>
+                </li>
+              );
+            })}
+          </ul>
+        </details>
+      )}
+    </section>
+  );
+}
+
+function OpenFinding({
+  entry,
+  mayAccept,
+  isBuilding,
+  onOpen,
+  onFix,
+  onAccept,
+}: FindingsPanelProps & { entry: LetteredFinding }) {
+  const { letter, finding } = entry;
+  const { fix } = finding;
+  return (
+    <li className="-ml-3">
+      <FilmPanel seal="none" className="grid grid-cols-[1.625rem_1fr] gap-x-2.5 px-3 py-2">
+        <Pin letter={letter} level={levelOf[finding.severity]} isLevelSaid />
+        <div>
+          <button
+            type="button"
+            id={`finding-${letter}`}
+            aria-expanded
+            onClick={() => {
+              onOpen(null);
+            }}
+            className="min-h-6 w-full text-left text-row leading-[1.15rem] font-semibold"
+          >
+            {finding.title}
+          </button>
+          <p className="mt-0.5 text-small">{finding.reason}</p>
+          <p className="mt-1 text-small">
+            <b className="font-semibold">Fix:</b> {finding.remedy}
+          </p>
+          {finding.figure && (
+            <p className="mt-1 text-small">
+              Measured {figureWords(finding.figure, finding.figure.measured)}, {limitWords(finding.figure)}
+            </p>
+          )}
+          <p className="mt-1 text-least text-ink-2">
+            <LevelWords level={levelOf[finding.severity]} /> <span className="ml-1.5">{finding.source.text}</span>
+          </p>
+          {isBuilding && (fix !== null || finding.severity === 'accept') && (
+            <div className="mt-1.5 flex flex-wrap gap-2">
+              {fix && (
+                <Button
+                  size="small"
+                  onPress={() => {
+                    onFix(finding, fix);
+                  }}
+                >
+                  {fix.label}
+                </Button>
+              )}
+              {finding.severity === 'accept' && (
+                <Button
+                  size="small"
+                  kind="quiet"
+                  blockedBecause={
+                    mayAccept ? undefined : 'A lead or supervisor may let this stay, with a written reason.'
+                  }
+                  onPress={() => {
+                    onAccept(finding);
+                  }}
+                >
+                  Let it stay
+                </Button>
+              )}
+            </div>
+          )}
+        </div>
+      </FilmPanel>
+    </li>
+  );
+}

@@ -1,0 +1,178 @@
+import type { LoadOpeningOptions } from '#contract/loads';
+import { zodResolver } from '@hookform/resolvers/zod';
+import { useQuery } from '@tanstack/react-query';
+import { useForm, useWatch } from 'react-hook-form';
+import { useNavigate } from 'react-router-dom';
+import { z } from 'zod';
+import { Button } from '../../../components/ui/button';
+import { Dialog } from '../../../components/ui/dialog';
+import { SelectField } from '../../../components/ui/select-field';
+import { WaitingState, WrongState } from '../../../components/ui/states';
+import { useFacility } from '../../../lib/facility';
+import { countOf, formatDuration, formatTemperature, formatTime } from '../../../lib/format';
+import { sentenceOf } from '../../../lib/errors';
+import { useOpenLoad } from '../mutations';
+import { loadQueries } from '../queries';
+
+const formSchema = z.object({
+  sterilizerId: z.string().min(1, 'Choose a sterilizer.'),
+  programId: z.string().min(1, 'Choose a program.'),
+  cartId: z.string().min(1, 'Choose a cart.'),
+  runId: z.string(),
+});
+type Form = z.infer<typeof formSchema>;
+
+/** Opens a load: which run of packages, on which sterilizer, program and cart. */
+export function OpenLoadSheet({ onClose, runId }: { onClose: () => void; runId?: string }) {
+  const options = useQuery(loadQueries.openingOptions());
+  return (
+    <Dialog isOpen onClose={onClose} title="Open a load" material="film" size="wide">
+      {options.data ? (
+        <OpenLoadForm options={options.data} runId={runId ?? ''} />
+      ) : options.isError ? (
+        <WrongState
+          title="The sterilizers did not come"
+          error={options.error}
+          onTryAgain={() => {
+            void options.refetch();
+          }}
+        />
+      ) : (
+        <WaitingState title="Fetching sterilizers and carts" waitsFor="The server has not answered yet." />
+      )}
+    </Dialog>
+  );
+}
+
+function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: string }) {
+  const navigate = useNavigate();
+  const { timeZone, unitSystem } = useFacility();
+  const openLoad = useOpenLoad();
+  const form = useForm<Form>({
+    resolver: zodResolver(formSchema),
+    defaultValues: { ...startOf(options, runId), runId },
+  });
+  const { errors } = form.formState;
+  const values = useWatch({ control: form.control });
+  const chosen = options.sterilizers.find((entry) => entry.sterilizer.id === values.sterilizerId);
+
+  /** Another sterilizer has other programs and carts: what was chosen before may not be there. */
+  function chooseSterilizer(sterilizerId: string, programId = '') {
+    const entry = options.sterilizers.find((one) => one.sterilizer.id === sterilizerId);
+    form.setValue('sterilizerId', sterilizerId, { shouldValidate: true });
+    form.setValue('programId', entry?.programs.some((program) => program.id === programId) ? programId : '');
+    form.setValue('cartId', entry?.carts.find((cart) => cart.isFree)?.id ?? '');
+  }
+
+  async function send(form: Form) {
+    const { loadId } = await openLoad.mutateAsync({ ...form, runId: form.runId === '' ? null : form.runId });
+    await navigate(`/loads/${loadId}`);
+  }
+
+  return (
+    <form
+      className="grid gap-4 tablet:grid-cols-2"
+      onSubmit={(event) => {
+        void form
+          .handleSubmit(send)(event)
+          .catch(() => undefined);
+      }}
+    >
+      <SelectField
+        label="Packages"
+        className="tablet:col-span-2"
+        options={[
+          { value: '', label: 'None listed: scan whatever goes on' },
+          ...options.runs.map((run) => ({
+            value: run.id,
+            label: `${run.name}, ${countOf(run.packages, 'package')}${run.implants > 0 ? `, ${countOf(run.implants, 'implant')}` : ''}`,
+          })),
+        ]}
+        {...form.register('runId', {
+          onChange: (event: { target: { value: string } }) => {
+            const run = options.runs.find((entry) => entry.id === event.target.value);
+            if (run?.sterilizerId) chooseSterilizer(run.sterilizerId, run.programId ?? '');
+          },
+        })}
+      />
+      <SelectField
+        label="Sterilizer"
+        placeholder="Choose a sterilizer"
+        error={errors.sterilizerId?.message}
+        options={options.sterilizers.map(({ sterilizer }) => ({
+          value: sterilizer.id,
+          label: sterilizer.serviceState === 'in-service' ? sterilizer.name : `${sterilizer.name}, out of use`,
+          isDisabled: sterilizer.serviceState !== 'in-service',
+        }))}
+        {...form.register('sterilizerId', {
+          onChange: (event: { target: { value: string } }) => {
+            chooseSterilizer(event.target.value);
+          },
+        })}
+      />
+      <SelectField
+        label="Program"
+        placeholder="Choose a program"
+        error={errors.programId?.message}
+        {...(chosen && chosen.unqualified.length > 0
+          ? { hint: `On its panel, but not qualified: ${chosen.unqualified.map((program) => program.code).join(', ')}` }
+          : {})}
+        options={(chosen?.programs ?? []).map((program) => ({
+          value: program.id,
+          label: `${program.code}: ${formatTemperature(program.temperatureC, unitSystem)}, ${formatDuration(program.exposureS)}, dry ${formatDuration(program.dryS)}`,
+        }))}
+        {...form.register('programId')}
+      />
+      <SelectField
+        label="Cart"
+        placeholder="Choose a cart"
+        error={errors.cartId?.message}
+        options={(chosen?.carts ?? []).map((cart) => ({
+          value: cart.id,
+          label: cart.isFree ? cart.name : `${cart.name}, ${cart.usedBy ?? 'out of use'}`,
+          isDisabled: !cart.isFree,
+        }))}
+        {...form.register('cartId')}
+      />
+      <div className="self-end pb-3 text-row" role="status">
+        {chosen &&
+          (chosen.airRemoval === null ? (
+            <b className="font-label text-straw-3">
+              {chosen.sterilizer.needsAirRemovalTest
+                ? 'No air-removal test today: the load cannot be closed before it has passed.'
+                : ''}
+            </b>
+          ) : chosen.airRemoval.result === 'passed' ? (
+            `Air-removal test passed ${formatTime(chosen.airRemoval.testedAt, timeZone)}.`
+          ) : (
+            <b className="font-label text-madder-3">
+              The air-removal test failed at {formatTime(chosen.airRemoval.testedAt, timeZone)}.
+            </b>
+          ))}
+      </div>
+      {openLoad.isError && (
+        <p role="alert" className="text-row font-semibold text-madder-3 tablet:col-span-2">
+          {sentenceOf(openLoad.error)}
+        </p>
+      )}
+      <Button
+        type="submit"
+        size="large"
+        className="tablet:col-span-2"
+        waitingWords={openLoad.isPending ? 'Opening the load' : undefined}
+      >
+        Open the load
+      </Button>
+    </form>
+  );
+}
+
+function startOf(options: LoadOpeningOptions, runId: string): Omit<Form, 'runId'> {
+  const run = options.runs.find((entry) => entry.id === runId);
+  const entry = options.sterilizers.find((one) => one.sterilizer.id === run?.sterilizerId);
+  return {
+    sterilizerId: entry?.sterilizer.id ?? '',
+    programId: entry?.programs.find((program) => program.id === run?.programId)?.id ?? '',
+    cartId: entry?.carts.find((cart) => cart.isFree)?.id ?? '',
+  };
+}
