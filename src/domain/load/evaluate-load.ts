@@ -1,13 +1,35 @@
-import type { Finding } from './finding';
+import type { Finding, Fix } from './finding';
 import type { LoadView } from './model';
 import type { LoadPolicy } from './policy';
+import { judge, type Judged } from './rules/judge';
+import { sceneOf, type Scene } from './rules/scene';
+import { verifiedFixOf } from './rules/verify-fix';
 
-/** Judges a load. Findings come in order of weight: what holds it, what a lead may accept, what is worth a note. */
-export function evaluateLoad(_view: LoadView, _policy: LoadPolicy): readonly Finding[] {
-  return [];
+/**
+ * Judges a load. Findings come in order of weight (what holds it, what a lead may accept, what is worth a note), then by
+ * rule, then by place; the order of scanning makes no difference.
+ *
+ * The fix of a finding is worked out and verified when it is first read, because that means judging the load again, and
+ * most findings are only listed.
+ */
+export function evaluateLoad(view: LoadView, policy: LoadPolicy): readonly Finding[] {
+  const scene = sceneOf(view, policy);
+  const judged = judge(scene);
+  return judged.map((one) => (one.draft.fixes ? withFixOnDemand(scene, judged, one) : { ...one.finding, fix: null }));
 }
 
-/** The letters shown for findings, in order: A to Z, then AA, AB and so on. */
+function withFixOnDemand(scene: Scene, judged: readonly Judged[], one: Judged): Finding {
+  let known: Fix | null | undefined;
+  return {
+    ...one.finding,
+    get fix() {
+      if (known === undefined) known = verifiedFixOf(scene, judged, one);
+      return known;
+    },
+  };
+}
+
+/** The letters shown for findings, in their order: A to Z, then AA, AB and so on. */
 export function letterFindings(
   findings: readonly Finding[],
 ): readonly { readonly letter: string; readonly finding: Finding }[] {

@@ -83,7 +83,7 @@ export const defaultPolicy: LoadPolicy = {
   packageClearanceMm: mm(25),
   wallClearanceMm: mm(25),
   headroomMm: mm(0),
-  greatestShelfCoverPercent: percent(80),
+  greatestShelfCoverPercent: percent(95),
   greatestSetMassKg: kg(11.3),
   greatestTextilePackMassKg: kg(5.4),
   greatestPouchMassKg: kg(0.5),

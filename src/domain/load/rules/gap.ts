@@ -1,0 +1,104 @@
+/*
+ * Between the faces of neighbouring pouches on edge there is a gap: in a rack the pitch of the slots less half of each thickness.
+ * Source: the pouch's instructions for use, else the facility; that pouches stand apart is common practice without a distance.
+ */
+import type { Body } from '../layout';
+import { elsewhere } from './moves';
+import { clearanceBetween, reachIntoEachOther } from './near-pairs';
+import { onPackage } from './places';
+import { slackMm, type Draft, type Rule } from './rule';
+import type { Scene } from './scene';
+import { generalPractice } from './sources';
+import { figureWords, sourceOf } from './words';
+
+export const gap: Rule = {
+  id: 'gap',
+  name: 'Pouches stand apart',
+  reason: 'Where pouches touch, steam does not reach the paper between them and it does not dry.',
+  source: generalPractice,
+  severity: 'accept',
+  parameters: ['pouchGapMm'],
+  find,
+};
+
+function find(scene: Scene): readonly Draft[] {
+  return [...inRacks(scene), ...loose(scene)].flatMap(({ a, b, measured }) => {
+    const { askedBy, ...limit } = clearanceBetween(a, b, scene.policy);
+    if (measured >= limit.limit - slackMm) return [];
+    const figure = { measured, unit: 'mm', want: 'at-least', ...limit } as const;
+    const words = figureWords(figure);
+    const names = `${scene.thing(a)} and ${scene.thing(b)}`;
+    return {
+      subjects: [a.packageId, b.packageId],
+      title:
+        measured <= slackMm
+          ? `${names} touch, want ${words.limit} between`
+          : `${names} are ${words.measured} apart, want ${words.limit}`,
+      remedy: 'Give them more room: leave a slot free between them or use a holder with a wider pitch.',
+      places: onPackage(a, b),
+      figure,
+      source: sourceOf(limit.limitFrom, askedBy.item, generalPractice),
+      *fixes() {
+        yield* elsewhere(scene, { one: b.package, item: b.item, body: b });
+        yield* elsewhere(scene, { one: a.package, item: a.item, body: a });
+      },
+    };
+  });
+}
+
+type Pair = { readonly a: Body; readonly b: Body; readonly measured: number };
+
+function inRacks(scene: Scene): readonly Pair[] {
+  const byRack = new Map<string, Map<number, Body[]>>();
+  for (const body of scene.layout.bodies) {
+    if (!body.holder || body.slot === null || body.thinAxis === null) continue;
+    const { holderId } = body.holder.holder;
+    const slots = byRack.get(holderId) ?? new Map<number, Body[]>();
+    byRack.set(holderId, slots);
+    const inSlot = slots.get(body.slot);
+    if (inSlot) inSlot.push(body);
+    else slots.set(body.slot, [body]);
+  }
+  const pairs: Pair[] = [];
+  for (const slots of byRack.values()) {
+    const taken = [...slots.keys()].sort((a, b) => a - b);
+    for (let index = 1; index < taken.length; index += 1) {
+      const [before = 0, after = 0] = [taken[index - 1], taken[index]];
+      for (const a of slots.get(before) ?? []) {
+        for (const b of slots.get(after) ?? []) {
+          const pitch = a.holder?.kind.pitchMm ?? 0;
+          pairs.push({ a, b, measured: (after - before) * pitch - (a.item.heightMm + b.item.heightMm) / 2 });
+        }
+      }
+    }
+  }
+  return pairs;
+}
+
+/** Face to face without a slot each; a pair with a third pouch between is no pair. */
+function loose(scene: Scene): readonly Pair[] {
+  const facing = scene.nearPairs.filter(
+    (pair) =>
+      pair.a.thinAxis !== null &&
+      pair.a.thinAxis === pair.b.thinAxis &&
+      !reachIntoEachOther(pair) &&
+      (pair.a.thinAxis === 'x' ? pair.alongMm : pair.acrossMm) < -slackMm,
+  );
+  const neighbours = new Map<Body, Body[]>();
+  for (const { a, b } of facing) {
+    neighbours.set(a, [...(neighbours.get(a) ?? []), b]);
+    neighbours.set(b, [...(neighbours.get(b) ?? []), a]);
+  }
+  return facing.flatMap(({ a, b, acrossMm, alongMm }) => {
+    const between = neighbours
+      .get(a)
+      ?.some((third) => third !== b && isBetween(third, a, b) && neighbours.get(b)?.includes(third));
+    return between ? [] : [{ a, b, measured: a.thinAxis === 'x' ? acrossMm : alongMm }];
+  });
+}
+
+function isBetween(third: Body, a: Body, b: Body): boolean {
+  const middle = ({ box, thinAxis }: Body) => (thinAxis === 'x' ? box.left + box.right : box.front + box.back);
+  const at = middle(third);
+  return at > Math.min(middle(a), middle(b)) && at < Math.max(middle(a), middle(b));
+}

@@ -1,0 +1,43 @@
+/*
+ * Metal is below textiles: nothing metal stands on a textile pack or above it on a higher shelf.
+ * Source: general practice, several manuals (textiles above metal); a sterilizer instruction sheet asks the same.
+ */
+import { elsewhere } from './moves';
+import { isMetalOver } from './metal';
+import { onPackage } from './places';
+import type { Draft, Rule } from './rule';
+import type { Scene } from './scene';
+import { generalPractice } from './sources';
+import { listWords } from './words';
+
+export const metalOverTextile: Rule = {
+  id: 'metal-over-textile',
+  name: 'Metal stays below textiles',
+  reason: 'Water that condenses on metal drips down, and a wet textile pack is not sterile.',
+  source: generalPractice,
+  severity: 'stop',
+  parameters: ['metalOverTextileKg'],
+  find,
+};
+
+function find(scene: Scene): readonly Draft[] {
+  const { bodies } = scene.layout;
+  return bodies
+    .filter((body) => body.item.kind === 'textile-pack')
+    .flatMap((textile) => {
+      const metal = bodies.filter((body) => body !== textile && isMetalOver(body, textile, scene.policy));
+      const [only] = metal;
+      if (!only) return [];
+      const names = listWords(metal.map((body) => scene.nameOf(body.package)));
+      return {
+        subjects: [textile.packageId, ...metal.map((body) => body.packageId)],
+        title: `${scene.nameOf(textile.package)} is below metal: ${names}`,
+        remedy: 'Put the textile pack above the metal, or the metal where nothing textile is under it.',
+        places: onPackage(textile, ...metal),
+        *fixes() {
+          if (metal.length === 1) yield* elsewhere(scene, { one: only.package, item: only.item, body: only });
+          yield* elsewhere(scene, { one: textile.package, item: textile.item, body: textile });
+        },
+      };
+    });
+}

@@ -1,0 +1,83 @@
+/*
+ * Around each package there is the free space its instructions for use ask for, or the facility does.
+ * Source: instructions for use; else about 2.5 cm between trays: general practice, several manuals, no single standard.
+ */
+import { planDistance } from '../../geometry/box';
+import type { FindingPlace } from '../finding';
+import type { Body } from '../layout';
+import { elsewhere } from './moves';
+import { clearanceBetween, reachIntoEachOther } from './near-pairs';
+import { onHolder } from './places';
+import { slackMm, type Draft, type Rule } from './rule';
+import type { Scene } from './scene';
+import { generalPractice } from './sources';
+import { figureWords, sourceOf } from './words';
+
+export const packageClearance: Rule = {
+  id: 'package-clearance',
+  name: 'Packages stand clear of each other',
+  reason: 'Steam comes and water leaves between packages; where they stand close, both stop.',
+  source: generalPractice,
+  severity: 'accept',
+  parameters: ['packageClearanceMm', 'pouchGapMm'],
+  find,
+};
+
+type Close = {
+  readonly a: Body;
+  readonly b: Body;
+  readonly measured: number;
+  readonly limit: ReturnType<typeof clearanceBetween>;
+};
+
+function find(scene: Scene): readonly Draft[] {
+  // A rack too near is one finding and not one for each of its pouches.
+  const worst = new Map<string, Close>();
+  for (const pair of scene.nearPairs) {
+    const { a, b } = pair;
+    if (a.item.kind === 'pouch' && b.item.kind === 'pouch') continue;
+    if (reachIntoEachOther(pair)) continue;
+    const limit = clearanceBetween(a, b, scene.policy);
+    const measured = planDistance(a.box, b.box);
+    if (measured >= limit.limit - slackMm) continue;
+    const key = [unitOf(a), unitOf(b)].sort().join(' ');
+    const known = worst.get(key);
+    if (!known || measured - limit.limit < known.measured - known.limit.limit)
+      worst.set(key, { a, b, measured, limit });
+  }
+  return [...worst.values()].map((close) => draftOf(scene, close));
+}
+
+function unitOf(body: Body): string {
+  return body.holder?.holder.holderId ?? body.packageId;
+}
+
+function draftOf(scene: Scene, { a, b, measured, limit: { askedBy, ...limit } }: Close): Draft {
+  const figure = { measured, unit: 'mm', want: 'at-least', ...limit } as const;
+  const words = figureWords(figure);
+  const [first, second] = [nameIn(scene, a), nameIn(scene, b)];
+  return {
+    subjects: [unitOf(a), unitOf(b)],
+    title:
+      measured <= slackMm
+        ? `${first} touches ${second}, want ${words.limit} between`
+        : `${first} is ${words.measured} from ${second}, want ${words.limit}`,
+    remedy: 'Move one of them away.',
+    places: [placeOf(a), placeOf(b)],
+    figure,
+    source: sourceOf(limit.limitFrom, askedBy.item, generalPractice),
+    *fixes() {
+      for (const body of [b, a]) {
+        if (!body.holder) yield* elsewhere(scene, { one: body.package, item: body.item, body });
+      }
+    },
+  };
+}
+
+function nameIn(scene: Scene, body: Body): string {
+  return body.holder ? scene.holderName(body.holder.holder) : scene.nameOf(body.package);
+}
+
+function placeOf(body: Body): FindingPlace {
+  return body.holder ? onHolder(body.holder.holder, body.slot) : { on: 'package', packageId: body.packageId };
+}

@@ -1,0 +1,126 @@
+/*
+ * A pouch on edge is held by something: a rack, or an open basket in which it cannot fall over.
+ * Source: CDC guideline (2008), loading: peel packs on edge in racks, small items loose in wire baskets, as restated. How far it
+ * may lean is the facility's to set; no published angle.
+ */
+import { gapAcross, gapAlong, gapUpward, type ShelfBox } from '../../geometry/box';
+import { leanOf } from '../../geometry/lean';
+import type { Body, HolderBody } from '../layout';
+import { limitOf } from '../policy';
+import { elsewhere } from './moves';
+import { onPackage } from './places';
+import { slackMm, type Draft, type Rule } from './rule';
+import type { Scene } from './scene';
+import { cdcLoading } from './sources';
+import { figureWords } from './words';
+
+export const pouchInHolder: Rule = {
+  id: 'pouch-in-holder',
+  name: 'Pouches on edge are held',
+  reason: 'A pouch that nothing holds falls over during the cycle and lies flat or against its neighbour.',
+  source: cdcLoading,
+  severity: 'stop',
+  parameters: ['greatestLeanDeg'],
+  find,
+};
+
+function find(scene: Scene): readonly Draft[] {
+  return scene.layout.bodies.flatMap((body) => {
+    if (body.thinAxis === null) return [];
+    const limit = limitOf(null, scene.policy, 'greatestLeanDeg');
+    const figure = { measured: leanAngle(scene, body), unit: 'deg', want: 'at-most', ...limit } as const;
+    const leansTooFar = figure.measured > figure.limit;
+    if (body.holder && !leansTooFar) return [];
+    const words = figureWords(figure);
+    const name = scene.thing(body);
+    const falls = figure.measured > 89 ? 'can fall over' : `can lean ${words.measured}`;
+    return {
+      subjects: [body.packageId],
+      title: body.holder
+        ? `${name} ${falls}, want at most ${words.limit}`
+        : `${name} stands in no holder${leansTooFar ? ` and ${falls}` : ''}`,
+      remedy: 'Put it into a holder that takes it.',
+      places: onPackage(body),
+      ...(leansTooFar ? { figure } : {}),
+      // In a slot wider than it needs a pouch leans but stays: worth a note, no more.
+      ...(body.slot !== null ? { severity: 'advice' as const } : {}),
+      fixes: () => elsewhere(scene, { one: body.package, item: body.item, body }),
+    };
+  });
+}
+
+function leanAngle(scene: Scene, body: Body): number {
+  const standing = { heightMm: body.item.widthMm, thicknessMm: body.item.heightMm };
+  if (body.slot !== null) {
+    const gapMm = (body.holder?.kind.pitchMm ?? 0) - body.item.heightMm;
+    return leanOf({ ...standing, gapMm, supportHeightMm: Infinity });
+  }
+  const supports = body.holder ? supportsInBasket(scene, body, body.holder) : supportsOnShelf(scene, body);
+  return Math.max(...supports.map((support) => leanOf({ ...standing, ...support })));
+}
+
+type Support = { readonly gapMm: number; readonly supportHeightMm: number };
+
+/** In a basket the neighbour or the basket's side catches it, whichever comes first. */
+function supportsInBasket(scene: Scene, body: Body, basket: HolderBody): readonly Support[] {
+  const others = scene.layout.bodies.filter((other) => other.holder === basket && other !== body);
+  const sideHeightMm = basket.kind.greatestHeightMm ?? Infinity;
+  return ends.map((end) => {
+    let nearest: Support = { gapMm: Math.max(roomTo(basket.box, body, end), 0), supportHeightMm: sideHeightMm };
+    for (const other of others) {
+      const gapMm = gapTowards(other.box, body, end);
+      if (gapMm !== null && gapMm < nearest.gapMm)
+        nearest = { gapMm, supportHeightMm: other.box.top - body.box.bottom };
+    }
+    return nearest;
+  });
+}
+
+/** On a shelf other loose pouches are no support, they fall with it: only what is between them and something firm counts. */
+function supportsOnShelf(scene: Scene, body: Body): readonly Support[] {
+  const { layout } = scene;
+  const isLoosePouch = (other: Body) => other.item.kind === 'pouch' && other.holder === null;
+  const level = layout.bodies.filter(
+    (other) => other.shelf === body.shelf && other !== body && gapUpward(other.box, body.box) < -slackMm,
+  );
+  const frames = layout.holders.filter((holder) => holder.shelf === body.shelf);
+  return ends.map((end) => {
+    let firm: Support = { gapMm: Infinity, supportHeightMm: 0 };
+    for (const box of [...level.filter((other) => !isLoosePouch(other)), ...frames].map((other) => other.box)) {
+      const gapMm = gapTowards(box, body, end);
+      if (gapMm !== null && gapMm < firm.gapMm) firm = { gapMm, supportHeightMm: box.top - body.box.bottom };
+    }
+    let taken = 0;
+    for (const other of level.filter(isLoosePouch)) {
+      const gapMm = gapTowards(other.box, body, end);
+      if (gapMm !== null && gapMm < firm.gapMm) taken += thickness(other.box, body);
+    }
+    return { ...firm, gapMm: Math.max(firm.gapMm - taken, 0) };
+  });
+}
+
+type End = 'lower' | 'upper';
+
+const ends: readonly End[] = ['lower', 'upper'];
+
+/** How far another thing is away from a pouch's face on that end of its thin axis; null where it is not in front of it. */
+function gapTowards(box: ShelfBox, body: Body, end: End): number | null {
+  const isAcross = body.thinAxis === 'x';
+  const beside = isAcross ? gapAlong(box, body.box) : gapAcross(box, body.box);
+  if (beside >= -slackMm) return null;
+  const [low, high] = isAcross ? [box.left, box.right] : [box.front, box.back];
+  const [ownLow, ownHigh] = isAcross ? [body.box.left, body.box.right] : [body.box.front, body.box.back];
+  const middle = (low + high) / 2;
+  const ownMiddle = (ownLow + ownHigh) / 2;
+  if (end === 'upper') return middle > ownMiddle ? Math.max(low - ownHigh, 0) : null;
+  return middle < ownMiddle ? Math.max(ownLow - high, 0) : null;
+}
+
+function roomTo(frame: ShelfBox, body: Body, end: End): number {
+  if (body.thinAxis === 'x') return end === 'lower' ? body.box.left - frame.left : frame.right - body.box.right;
+  return end === 'lower' ? body.box.front - frame.front : frame.back - body.box.back;
+}
+
+function thickness(box: ShelfBox, body: Body): number {
+  return body.thinAxis === 'x' ? box.right - box.left : box.back - box.front;
+}
