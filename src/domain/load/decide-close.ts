@@ -37,7 +37,14 @@ export function decideClose(
   const blocks: Block[] = findings
     .filter((finding) => !reckonedRules.has(finding.ruleId))
     .filter((finding) => finding.severity === 'stop' || (finding.severity === 'accept' && !accepted.has(finding.key)))
-    .map((finding) => ({ kind: 'finding', finding, label: findingLabel(finding) }));
+    .map((finding) => ({
+      kind: 'finding',
+      finding,
+      // Only when it is read: working out a fix means judging the load anew.
+      get label() {
+        return findingLabel(finding);
+      },
+    }));
 
   const reckoning = reckon(view);
   if (reckoning.scanned === 0) blocks.push({ kind: 'empty', label: 'Nothing scanned yet' });

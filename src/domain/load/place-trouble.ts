@@ -1,7 +1,9 @@
-import { evaluateLoad } from './evaluate-load';
-import type { Finding, RuleId } from './finding';
+import type { RuleId, Severity } from './finding';
 import type { LoadView } from './model';
 import type { LoadPolicy } from './policy';
+import { rules } from './rules/all-rules';
+import { keyOf } from './rules/finding-key';
+import { sceneOf } from './rules/scene';
 
 /**
  * Rules that a place can break. The others look at the program, the labels, the day's test or the counting, and say the
@@ -37,19 +39,30 @@ const rulesOfPlace: ReadonlySet<RuleId> = new Set<RuleId>([
   'size-makes-no-sense',
 ]);
 
-/** What the rules have against how a load is arranged. */
-export type Trouble = readonly Finding[];
+/** What the rules have against how a load is arranged: each finding by its key, with its weight. Advice is none. */
+export type Trouble = ReadonlyMap<string, Exclude<Severity, 'advice'>>;
 
+/** As `evaluateLoad` would find it, with only the rules that a place can break: placing asks many times in a blink. */
 export function troubleOf(view: LoadView, policy: LoadPolicy): Trouble {
-  return evaluateLoad(view, policy).filter(
-    (finding) => rulesOfPlace.has(finding.ruleId) && finding.severity !== 'advice',
-  );
+  const scene = sceneOf(view, policy);
+  const trouble = new Map<string, Exclude<Severity, 'advice'>>();
+  for (const rule of rules) {
+    if (!rulesOfPlace.has(rule.id)) continue;
+    for (const draft of rule.find(scene)) {
+      const severity = draft.severity ?? rule.severity;
+      if (severity !== 'advice') trouble.set(keyOf(rule.id, draft.subjects, draft.figure ?? null), severity);
+    }
+  }
+  return trouble;
 }
 
 /** The worst that an arrangement has against it and that the one before had not: null when there is nothing new. */
 export function worstAdded(before: Trouble, after: Trouble): 'stop' | 'accept' | null {
-  const known = new Set(before.map((finding) => finding.key));
-  const added = after.filter((finding) => !known.has(finding.key));
-  if (added.some((finding) => finding.severity === 'stop')) return 'stop';
-  return added.length > 0 ? 'accept' : null;
+  let worst: 'accept' | null = null;
+  for (const [key, severity] of after) {
+    if (before.has(key)) continue;
+    if (severity === 'stop') return 'stop';
+    worst = severity;
+  }
+  return worst;
 }

@@ -1,5 +1,4 @@
 import { holderSpotWords, holderWords, paperWords, poseWords, spotWords } from './describe-place';
-import { letterFindings } from './evaluate-load';
 import type { Finding } from './finding';
 import { findHolderKind, findItem, nameOf, shelfIdOf, shelvesUpward } from './look-up';
 import type { LoadHolder, LoadPackage, LoadView } from './model';
@@ -40,12 +39,18 @@ export function textTwin(view: LoadView, findings: readonly Finding[]): readonly
   return parts;
 }
 
+/** A to Z, then AA, AB and so on: the same letter on the map, in the list and at the gate. */
+export function findingLetter(index: number): string {
+  const last = String.fromCharCode(65 + (index % 26));
+  return index < 26 ? last : findingLetter(Math.floor(index / 26) - 1) + last;
+}
+
 type Notes = (place: string) => readonly string[];
 
 function notesOf(findings: readonly Finding[]): Notes {
   const byPlace = new Map<string, string[]>();
-  for (const { letter, finding } of letterFindings(findings)) {
-    const note = `Finding ${letter}: ${finding.title}`;
+  for (const [index, finding] of findings.entries()) {
+    const note = `Finding ${findingLetter(index)}: ${finding.title}`;
     for (const place of finding.places.length > 0 ? finding.places : [{ on: 'load' as const }]) {
       const key =
         place.on === 'load'

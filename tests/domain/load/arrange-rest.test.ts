@@ -101,9 +101,10 @@ describe('arrangeRest', () => {
         expect(view).toEqual(frozen);
         placed += edits.length;
       }),
+      { numRuns: 50 },
     );
-    expect(placed).toBeGreaterThan(50);
-  });
+    expect(placed).toBeGreaterThan(25);
+  }, 60_000);
 });
 
 describe('expectedShelves', () => {

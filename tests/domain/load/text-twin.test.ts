@@ -1,5 +1,5 @@
 import type { Finding } from '#domain/load/finding';
-import { textTwin } from '#domain/load/text-twin';
+import { findingLetter, textTwin } from '#domain/load/text-twin';
 import { describe, expect, it } from 'vitest';
 import {
   aHolder,
@@ -110,5 +110,11 @@ describe('textTwin', () => {
     for (const name of ['D&C set, on top', 'Adson forceps pair, on top', 'General container set A', 'Eye micro set']) {
       expect(text.split(name).length - 1, name).toBe(1);
     }
+  });
+});
+
+describe('findingLetter', () => {
+  it('goes on after Z as columns of a table do', () => {
+    expect([0, 25, 26, 51, 52, 701, 702].map(findingLetter)).toEqual(['A', 'Z', 'AA', 'AZ', 'BA', 'ZZ', 'AAA']);
   });
 });
