@@ -17,6 +17,14 @@ export type ItemChanges = Partial<{
   device_identifier: string | null;
   mass_kg: number;
   mass_limit_kg: number | null;
+  length_mm: number;
+  width_mm: number;
+  height_mm: number;
+  metal_mass_kg: number;
+  clearance_mm: number | null;
+  pose: string;
+  preferred_holder: string | null;
+  cycle_needs: string;
 }>;
 
 let counted = 0;
