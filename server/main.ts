@@ -62,10 +62,18 @@ async function stop(): Promise<void> {
   await closed;
   await sessionPool.end();
   await db.destroy();
+  // An open channel would keep this process alive.
+  if (process.connected) process.disconnect();
 }
 
 for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) {
   process.on(signal, () => {
+    void stop();
+  });
+}
+// The channel closes by itself when the parent dies: nobody would be left to stop this server.
+if (process.connected) {
+  process.on('disconnect', () => {
     void stop();
   });
 }

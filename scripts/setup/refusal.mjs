@@ -8,16 +8,16 @@ export class Refusal extends Error {
 }
 
 /**
- * Runs a command's body and turns a refusal into a plain sentence and exit code 1.
- * @param {() => Promise<number>} body resolves to the exit code
- * @returns {Promise<void>}
+ * Runs a command to its end: exits with the code its body resolves to, or with 1 and a plain sentence.
+ * @param {() => Promise<number>} body
+ * @returns {Promise<never>}
  */
-export async function runCommand(body) {
+export async function runMain(body) {
   try {
-    process.exitCode = await body();
+    process.exit(await body());
   } catch (error) {
-    process.exitCode = 1;
     if (error instanceof Refusal) console.error(`\n${error.message}\n`);
     else console.error(error);
+    process.exit(1);
   }
 }
