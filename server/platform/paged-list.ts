@@ -42,11 +42,11 @@ export async function pageOf<Row>(
   },
 ): Promise<Page<Row>> {
   const counted = await query.clone().count({ count: '*' }).first<{ readonly count: number } | undefined>();
-  const rows = await query
+  const found: unknown[] = await query
     .clone()
     .orderBy(orderBy.map((column) => ({ column, order: isDescending ? 'desc' : 'asc' })))
     .limit(pageSize)
     .offset((page - 1) * pageSize)
-    .select<Row[]>([...select]);
-  return { rows, total: counted?.count ?? 0, page, pageSize };
+    .select([...select]);
+  return { rows: found as Row[], total: counted?.count ?? 0, page, pageSize };
 }
