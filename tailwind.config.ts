@@ -48,9 +48,6 @@ const config: Config = {
         film: '0 1px 0 rgb(255 255 255 / .7) inset, 0 1px 2px rgb(10 64 72 / .10), 0 6px 18px -10px rgb(10 64 72 / .28)',
         sheet: '0 2px 6px rgb(26 37 40 / .18), 0 24px 60px -12px rgb(26 37 40 / .45)',
       },
-      width: { rail: '4.75rem' },
-      minHeight: { target: '3rem' },
-      minWidth: { target: '3rem' },
     },
   },
 };

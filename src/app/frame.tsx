@@ -6,7 +6,7 @@ import { Outlet, useLocation, useNavigate } from 'react-router-dom';
 import { z } from 'zod';
 import { WaitingState } from '../components/ui/states';
 import { ChangePersonSheet } from '../features/session/components/change-person-sheet';
-import { leave, useSignOut } from '../features/session/mutations';
+import { leave, useChooseFacility, useSignOut } from '../features/session/mutations';
 import { sessionQueries, useShownSession } from '../features/session/queries';
 import { useIdleEnd } from '../features/session/use-idle-end';
 import { api } from '../lib/api-client';
@@ -33,6 +33,7 @@ export function Frame() {
   const queryClient = useQueryClient();
   const navigate = useNavigate();
   const signOut = useSignOut();
+  const chooseFacility = useChooseFacility();
   const [sheet, setSheet] = useState<Sheet>('none');
   const [firstBadge, setFirstBadge] = useState<string | null>(null);
   const hasEnded = useStore(signedOutGate.isClosed);
@@ -56,7 +57,7 @@ export function Frame() {
     timeoutSeconds: session.idleTimeoutSeconds,
     isWatching: !hasEnded,
     onStillHere: () => {
-      void queryClient.fetchQuery({ ...sessionQueries.current(), staleTime: 0 }).catch((error: unknown) => {
+      void queryClient.query({ ...sessionQueries.current(), staleTime: 0 }).catch((error: unknown) => {
         if (isProblem(error) && error.httpStatus === 401) signedOutGate.close();
       });
     },
@@ -79,7 +80,7 @@ export function Frame() {
   return (
     <SessionContext value={session}>
       <FacilityContext value={facility}>
-        <div className="grid h-dvh overflow-hidden max-tablet:grid-rows-[minmax(0,1fr)_auto] tablet:grid-cols-[var(--width-rail)_minmax(0,1fr)] print:block print:h-auto print:overflow-visible">
+        <div className="grid h-dvh overflow-hidden max-tablet:grid-rows-[minmax(0,1fr)_auto] tablet:grid-cols-[4.75rem_minmax(0,1fr)] print:block print:h-auto print:overflow-visible">
           <Rail
             places={places}
             person={person}
@@ -105,6 +106,11 @@ export function Frame() {
           onChangePerson={() => {
             setFirstBadge(null);
             setSheet('change-person');
+          }}
+          onChooseFacility={async (facilityId) => {
+            await chooseFacility.mutateAsync({ facilityId });
+            close();
+            await navigate('/');
           }}
           onSignOut={async (where) => {
             await signOut.mutateAsync(where);
@@ -141,7 +147,7 @@ function Screen() {
     if (shownPath.current === pathname) return;
     shownPath.current = pathname;
     place.current?.focus({ preventScroll: true });
-    place.current?.scrollTo?.(0, 0);
+    if (place.current) place.current.scrollTop = 0;
   }, [pathname]);
   return (
     <main ref={place} tabIndex={-1} className="bg-fibre flex min-h-0 flex-col overflow-auto bg-paper-1 outline-none">

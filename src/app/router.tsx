@@ -9,7 +9,7 @@ import { RequirePermission } from './require-permission';
 import { RouteError } from './route-error';
 import { Starting } from './starting';
 
-/** What a file in `routes/` exports. The loader is made with the query client: `queryClient.ensureQueryData(...)`. */
+/** What a file in `routes/` exports. The loader is made with the query client: `queryClient.query({ ...options, staleTime: 'static' })`. */
 export type RouteModule = {
   readonly Component: ComponentType;
   readonly loader?: (queryClient: QueryClient) => LoaderFunction;
@@ -31,7 +31,7 @@ function lazily(queryClient: QueryClient, load: () => Promise<RouteModule>): Non
 function requireSession(queryClient: QueryClient): LoaderFunction {
   return async ({ request }) => {
     try {
-      const session = await queryClient.ensureQueryData(sessionQueries.current());
+      const session = await queryClient.query({ ...sessionQueries.current(), staleTime: 'static' });
       return session.person.mustChangePassword ? redirect('/new-password') : null;
     } catch (error) {
       if (!isProblem(error) || error.httpStatus !== 401) throw error;

@@ -60,7 +60,9 @@ function StretchInRow({ stretch }: { stretch: Stretch }) {
       className={`stretch stretch-${state} ${state === 'failed' ? 'torn' : ''} ${motion}`}
       style={{ flexGrow: share }}
     >
-      <b className={`block truncate pr-5 text-small leading-4 ${state === 'not-asked' ? 'font-medium' : 'font-label'}`}>
+      <b
+        className={`block truncate text-small leading-4 ${mark === undefined ? '' : 'pr-3.5'} ${state === 'not-asked' ? 'font-medium' : 'font-label'}`}
+      >
         {label}
       </b>
       <span className="block truncate text-least font-normal">
@@ -112,7 +114,7 @@ export function ProofStripe({ stretches, form = 'full', label = 'Proof stripe' }
       ))}
     </ol>
   ) : (
-    <ol aria-label={label} className="flex h-12">
+    <ol aria-label={label} className="stripe flex h-12">
       {stretches.map((stretch) => (
         <StretchInRow key={stretch.label} stretch={stretch} />
       ))}

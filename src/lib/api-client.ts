@@ -1,5 +1,6 @@
 import { problemSchema } from '#contract/problem';
 import { z } from 'zod';
+import { msSinceAct } from './activity';
 import { NoLineError, ProblemError } from './errors';
 import { noteLineDown, noteLineUp } from './line';
 import { noteServerTime } from './server-clock';
@@ -20,6 +21,9 @@ export const noContentSchema = z.undefined();
 
 const defaultPatienceMs = 20_000;
 
+/** Longer without a touch or a key, and what is asked is asked by the screen itself. */
+const handsOffMs = 10_000;
+
 /** What a proxy in front of the server says when the server itself is away: RFC 9110, 15.6.3 to 15.6.5. */
 const gatewayStatuses: readonly number[] = [502, 503, 504];
 
@@ -35,6 +39,9 @@ function requestInit({ method, body, options }: Call): RequestInit {
   if (method !== 'GET') {
     // A form on a foreign page cannot set this header, so the server takes no write without it.
     headers.set('X-Requested-With', 'paperside');
+  } else if (msSinceAct() > handsOffMs) {
+    // A screen that asks by itself keeps nobody signed in.
+    headers.set('X-Background', 'yes');
   }
   const patience = AbortSignal.timeout(options.patienceMs ?? defaultPatienceMs);
   const init: RequestInit = {

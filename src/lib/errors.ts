@@ -38,9 +38,10 @@ export function sentenceOf(error: unknown): string {
   return 'Something went wrong on this screen. Try again.';
 }
 
-/** The last name in a JSON pointer (RFC 6901), which is how a form calls its field: "/packages/0/code" gives "packages.0.code". */
+/** How a form calls the field a JSON pointer (RFC 6901) of the server names: "/body/packages/0/code" is "packages.0.code". */
 export function fieldNameOf(pointer: string): string {
   return pointer
+    .replace(/^\/body(?=\/)/, '')
     .split('/')
     .filter((part) => part !== '')
     .map((part) => part.replaceAll('~1', '/').replaceAll('~0', '~'))

@@ -9,7 +9,7 @@ export const loader =
   (queryClient: QueryClient): LoaderFunction =>
   async () => {
     try {
-      await queryClient.ensureQueryData(sessionQueries.current());
+      await queryClient.query({ ...sessionQueries.current(), staleTime: 'static' });
       return null;
     } catch (error) {
       if (isProblem(error) && error.httpStatus === 401) return redirect('/sign-in');

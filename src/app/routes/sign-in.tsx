@@ -10,7 +10,7 @@ export const loader =
   (queryClient: QueryClient): LoaderFunction =>
   async ({ request }) => {
     try {
-      await queryClient.ensureQueryData(sessionQueries.current());
+      await queryClient.query({ ...sessionQueries.current(), staleTime: 'static' });
     } catch (error) {
       // Nobody is: that is what this screen is for. Silence too: it shows, and says so when tried.
       if (isProblem(error) && error.httpStatus !== 401) throw error;

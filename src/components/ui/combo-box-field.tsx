@@ -34,8 +34,8 @@ export function ComboBoxField({
     <ComboBox
       className={className}
       items={choices}
-      selectedKey={chosenId}
-      onSelectionChange={(key: Key | null) => {
+      value={chosenId}
+      onChange={(key: Key | null) => {
         onChoose(key === null ? null : String(key));
       }}
       defaultFilter={(text, typed) =>

@@ -32,7 +32,7 @@ export type DataTableProps<Row> = {
   /** In place of the rows when there are none. */
   empty: ReactNode;
   sortedBy?: Sort;
-  /** Scrolls inside this many rows and keeps half of another showing, so that nobody takes the cut for the end. */
+  /** Scrolls inside this many rows and keeps most of another showing, so that nobody takes the cut for the end. */
   visibleRows?: number;
 };
 
@@ -120,7 +120,7 @@ export function DataTable<Row>({
             tabIndex: 0,
             role: 'region',
             'aria-label': label,
-            style: { maxHeight: `${(visibleRows + 0.5) * rowHeightRem + 2.25}rem` },
+            style: { maxHeight: `${(visibleRows + 0.66) * rowHeightRem + 2.25}rem` },
           }
         : {})}
     >
@@ -202,7 +202,7 @@ function HeaderCell<Row>({
       <button
         type="button"
         onClick={onSort}
-        className={`-my-1 inline-flex min-h-11 items-center gap-1 font-medium hover:text-ink-1 ${isSorted ? 'font-label text-ink-1' : ''}`}
+        className={`-my-1 inline-flex min-h-11 items-center gap-1 font-medium hover:text-ink-1 ${column.align === 'end' ? 'flex-row-reverse' : ''} ${isSorted ? 'font-label text-ink-1' : ''}`}
       >
         {column.header}
         <Icon name={isSorted && sort.isDown ? 'down' : 'up'} size={14} className={isSorted ? '' : 'opacity-0'} />

@@ -85,7 +85,7 @@ function PadField({
   return (
     <div className="grid gap-3">
       <div>
-        <label htmlFor={id} className="mb-1 block text-small font-medium">
+        <label htmlFor={id} className="mb-2 block text-small font-medium">
           {label}
         </label>
         {hint !== undefined && (

@@ -3,11 +3,28 @@ import { sentenceOf } from '../../lib/errors';
 import { Icon } from '../icon';
 import { Button } from './button';
 
+/** Headings of these panels: 2 on a screen of their own, 3 inside a panel that has a heading. */
+type Level = 2 | 3;
+
+function StateHeading({ level, children }: { level: Level; children: ReactNode }) {
+  return level === 2 ? <h2 className="text-head">{children}</h2> : <h3 className="text-head">{children}</h3>;
+}
+
 /** Nothing here yet: one sentence, one act. No pictures. */
-export function EmptyState({ title, children, act }: { title: string; children?: ReactNode; act?: ReactNode }) {
+export function EmptyState({
+  title,
+  children,
+  act,
+  level = 2,
+}: {
+  title: string;
+  children?: ReactNode;
+  act?: ReactNode;
+  level?: Level;
+}) {
   return (
     <section className="border border-paper-edge px-5 py-4.5">
-      <h3 className="text-head">{title}</h3>
+      <StateHeading level={level}>{title}</StateHeading>
       {children !== undefined && <div className="mt-1 text-row">{children}</div>}
       {act !== undefined && <div className="mt-3.5 flex flex-wrap gap-2">{act}</div>}
     </section>
@@ -17,7 +34,18 @@ export function EmptyState({ title, children, act }: { title: string; children?:
 const waitUntilSaidMs = 4_000;
 
 /** Bare paper with dashed lines where words will come. After four seconds it says what it waits for. */
-export function WaitingState({ title, waitsFor, lines = 3 }: { title: string; waitsFor: string; lines?: number }) {
+export function WaitingState({
+  title,
+  waitsFor,
+  lines = 3,
+  level = 2,
+}: {
+  title: string;
+  /** Said after four seconds: "The server has not answered yet." */
+  waitsFor: string;
+  lines?: number;
+  level?: Level;
+}) {
   const [isLong, setIsLong] = useState(false);
   useEffect(() => {
     const timer = window.setTimeout(() => {
@@ -29,7 +57,7 @@ export function WaitingState({ title, waitsFor, lines = 3 }: { title: string; wa
   }, []);
   return (
     <section aria-busy="true" className="px-5 py-4.5">
-      <h3 className="text-head">{title}</h3>
+      <StateHeading level={level}>{title}</StateHeading>
       <div aria-hidden="true" className="mt-2">
         {Array.from({ length: lines }, (_, line) => (
           <div key={line} className="dashes my-2.5 h-3.5" style={{ width: `${[82, 64, 74, 58][line % 4] ?? 70}%` }} />
@@ -51,13 +79,14 @@ type WrongStateProps = {
   onTryAgain?: () => void;
   /** The second way on. */
   other?: ReactNode;
+  level?: Level;
 };
 
 /** Something went wrong: what happened, what it means, two ways on. No numbers, no blame. */
-export function WrongState({ title, children, error, onTryAgain, other }: WrongStateProps) {
+export function WrongState({ title, children, error, onTryAgain, other, level = 2 }: WrongStateProps) {
   return (
     <section role="alert" className="bg-madder-1 px-5 py-4.5 shadow-[inset_5px_0_0_var(--color-madder-3)]">
-      <h3 className="text-head">{title}</h3>
+      <StateHeading level={level}>{title}</StateHeading>
       <div className="mt-1 text-row">{children ?? <p>{sentenceOf(error)}</p>}</div>
       {(onTryAgain !== undefined || other !== undefined) && (
         <div className="mt-3 flex flex-wrap gap-2">

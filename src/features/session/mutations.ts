@@ -3,6 +3,8 @@ import {
   sessionResponseSchema,
   type BadgeSignInRequest,
   type ChangePasswordRequest,
+  type ChangePinRequest,
+  type ChooseFacilityRequest,
   type SessionResponse,
   type SignInRequest,
 } from '#contract/session';
@@ -63,13 +65,25 @@ export function useSignIn() {
   });
 }
 
-export function useChangePassword() {
+/** Each of these answers with the session as it is afterwards. */
+function useSessionChange<Request>(path: string) {
   const queryClient = useQueryClient();
   return useMutation({
-    mutationFn: (request: ChangePasswordRequest) =>
-      api.post(paths.sessionPassword, request, anyReplySchema, asksItself),
-    onSuccess: () => queryClient.fetchQuery({ ...sessionQueries.current(), staleTime: 0 }),
+    mutationFn: (request: Request) => api.post(path, request, sessionResponseSchema, asksItself),
+    onSuccess: (session) => enter(queryClient, session),
   });
+}
+
+export function useChangePassword() {
+  return useSessionChange<ChangePasswordRequest>(paths.sessionPassword);
+}
+
+export function useChangePin() {
+  return useSessionChange<ChangePinRequest>(paths.sessionPin);
+}
+
+export function useChooseFacility() {
+  return useSessionChange<ChooseFacilityRequest>(paths.sessionFacility);
 }
 
 /** Ends the sign-in here, or wherever this person is signed in. */
@@ -79,7 +93,7 @@ export function useSignOut() {
     mutationFn: async (where: 'here' | 'everywhere') => {
       try {
         if (where === 'here') await api.delete(paths.session, undefined, anyReplySchema, asksItself);
-        else await api.post(paths.signOutEverywhere, {}, anyReplySchema, asksItself);
+        else await api.post(paths.signOutEverywhere, undefined, anyReplySchema, asksItself);
       } catch (error) {
         // The sign-in had ended already, which is what was wanted.
         if (!isProblem(error) || error.httpStatus !== 401) throw error;

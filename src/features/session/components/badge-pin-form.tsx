@@ -1,3 +1,4 @@
+import { greatestPinLength, leastPinLength } from '#domain/people/pin-policy';
 import type { SessionResponse } from '#contract/session';
 import { Icon } from '../../../components/icon';
 import { Button } from '../../../components/ui/button';
@@ -33,6 +34,8 @@ export function BadgePinForm({ badge, onSignedIn, onBack }: BadgePinFormProps) {
         error={signIn.isError ? sentenceOf(signIn.error) : undefined}
         doneWords="Sign in"
         waitingWords={signIn.isPending ? 'Signing in' : undefined}
+        leastDigits={leastPinLength}
+        mostDigits={greatestPinLength}
         onDone={(pin) => {
           signIn.mutate({ by: 'badge', badge, pin }, { onSuccess: onSignedIn });
         }}

@@ -1,3 +1,4 @@
+import { leastPasswordLength } from '#domain/people/password-policy';
 import { changePasswordRequestSchema } from '#contract/session';
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useForm } from 'react-hook-form';
@@ -40,11 +41,13 @@ export function NewPasswordScreen({ personName, because, onDone, onLeave }: NewP
       },
     });
   });
-  const refusal = change.isError ? sentenceOf(change.error) : null;
+  // What belongs to a field stands at the field.
+  const isAtField = isProblem(change.error) && change.error.fields.length > 0;
+  const refusal = change.isError && !isAtField ? sentenceOf(change.error) : null;
   return (
     <div className="bg-fibre grid h-full content-start justify-items-center overflow-auto bg-paper-1 tablet:content-center">
       <title>New password · Paperside</title>
-      <FilmPanel className="w-full max-w-[33rem]" label="New password">
+      <FilmPanel className="w-full max-w-[33rem]">
         <main className="grid gap-5 px-6 pt-8 pb-7">
           <div className="flex items-center gap-3.5">
             <Mark size={40} />
@@ -64,7 +67,7 @@ export function NewPasswordScreen({ personName, because, onDone, onLeave }: NewP
             />
             <PasswordField
               label="New password"
-              hint="Length is what counts: a few words in a row are good. Capitals and signs are not needed."
+              hint={`${leastPasswordLength} characters or more. A few words in a row are good; capitals and signs are not needed.`}
               autoComplete="new-password"
               error={formState.errors.next?.message}
               {...register('next')}
