@@ -2,7 +2,7 @@ import { applyEdits } from './apply-edit';
 import type { LoadEdit } from './finding';
 import { findItem, nameOf, shelfIdOf } from './look-up';
 import type { CatalogueItem, LoadPackage, LoadView } from './model';
-import { troubleOf, worstAdded } from './place-trouble';
+import { troubleOf } from './place-trouble';
 import type { LoadPolicy } from './policy';
 import { findPlace } from './suggest-place';
 
@@ -13,7 +13,8 @@ export type Arrangement = {
 
 /**
  * Places for everything scanned that has none, as edits that can be applied as they are. What is placed already stays.
- * The whole arrangement is judged once more before it is offered: it adds no finding that holds the load.
+ * Each step is judged by the rules and adds no finding that holds the load to what the step before left, so that the whole
+ * adds none either.
  * @param includeUnscanned also for what is still on the table: a preview, whose edits for those packages can be applied
  *   only once they are scanned.
  */
@@ -24,11 +25,10 @@ export function arrangeRest(
 ): Arrangement {
   const start = includeUnscanned ? withEverythingScanned(view) : view;
   const rest = start.packages.filter((one) => one.isScanned && one.placement === null);
-  const troubleAtStart = troubleOf(start, policy);
-  const edits: (LoadEdit & { readonly edit: 'place' })[] = [];
+  const edits: LoadEdit[] = [];
   const couldNotPlace: { packageId: string; why: string }[] = [];
   let now = start;
-  let trouble = troubleAtStart;
+  let trouble = troubleOf(start, policy);
   for (const one of inOrder(start, rest)) {
     const found = findPlace(now, one.packageId, policy, { troubleBefore: trouble });
     if (found) {
@@ -37,14 +37,6 @@ export function arrangeRest(
     } else {
       couldNotPlace.push({ packageId: one.packageId, why: whyNot(start, one) });
     }
-  }
-  // Each step was judged against the one before; together they are judged against the start.
-  while (edits.length > 0) {
-    const all = applyEdits(start, edits);
-    if (all.ok && worstAdded(troubleAtStart, troubleOf(all.value, policy)) !== 'stop') break;
-    const last = edits.pop();
-    const one = last && start.packages.find((each) => each.packageId === last.packageId);
-    if (one) couldNotPlace.push({ packageId: one.packageId, why: whyNot(start, one) });
   }
   return { edits, couldNotPlace };
 }

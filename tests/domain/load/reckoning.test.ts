@@ -71,6 +71,8 @@ describe('reckon', () => {
     ];
     expect(reckon({ ...onCart, packages, counts }).isEven).toBe(true);
     expect(reckon({ ...onCart, packages, counts: counts.slice(1) }).isEven).toBe(false);
+    // Scanned and on no shelf: every shelf agrees, the load does not.
+    expect(reckon({ ...onCart, packages: [...packages, aPackage('t1', tray)], counts }).isEven).toBe(false);
     // One too many here and one too few there is no agreement, although the sums agree.
     const swapped = [
       { shelfId: lowerShelf.id, counted: 3 },

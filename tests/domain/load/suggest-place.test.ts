@@ -123,6 +123,35 @@ describe('suggestPlace', () => {
     expect(suggest(view, tray)).toBeNull();
   });
 
+  it('has no answer rather than one that a rule forbids: the only place left would cover an open lid filter', () => {
+    const full = anItem({ code: 'FULL', lengthMm: mm(1090), widthMm: mm(500) });
+    const base = { ...container, lengthMm: mm(1090), widthMm: mm(500) };
+    const packages = [
+      aPackage('c1', base, { placement: onShelf(lowerShelf, 30, 30) }),
+      aPackage('f1', full, { placement: onShelf(upperShelf, 30, 30) }),
+    ];
+    const withLid = (filterZones: typeof base.filterZones) =>
+      suggest(aView({ items: [stacker, full, { ...base, filterZones }], packages }), stacker)?.placement.at;
+    const wholeLid = { face: 'lid', xMm: mm(100), yMm: mm(100), lengthMm: mm(800), widthMm: mm(300) } as const;
+    expect(withLid([])).toBe('package');
+    expect(withLid([wholeLid])).toBeUndefined();
+    expect(withLid([{ ...wholeLid, face: 'base' }])).toBe('package');
+  });
+
+  it('takes a place that a lead would have to accept only when there is no better', () => {
+    // Chamber no wider than its shelf: what stands at the edge is too near to the wall, and racks stand where they stand.
+    const sterilizer = { ...aView().sterilizer, chamberWidthMm: mm(560) };
+    const near = aHolder('rs-0', smallRack, { xMm: mm(0) });
+    // Slot 1 is 17 mm from the wall, slot 2 is 45 mm.
+    expect(suggest(aView({ sterilizer, holders: [near] }), forceps)?.placement).toEqual(inSlot('rs-0', 2));
+    const inTheWay = Array.from({ length: 7 }, (_, index) =>
+      aPackage(`in${index}`, forceps, { placement: inSlot('rs-0', index + 2) }),
+    );
+    expect(suggest(aView({ sterilizer, holders: [near], packages: inTheWay }), forceps)?.placement).toEqual(
+      inSlot('rs-0', 1),
+    );
+  });
+
   it('looks only on the shelf it is told, for a pouch in the holders on it', () => {
     const view = aView({
       holders: [aHolder('rs-1', smallRack), aHolder('rs-2', smallRack, { shelfId: lowerShelf.id })],
