@@ -4,8 +4,8 @@ import { anId } from '../../support/test-app';
 /** A person and their places as the tables hold them, to see that nothing changed. */
 export async function rowsOf(db: Db, personId: string): Promise<unknown> {
   return {
-    person: await db('people').where({ id: personId }).first<unknown>(),
-    memberships: await db('memberships').where({ person_id: personId }).orderBy('facility_id').select<unknown[]>(),
+    person: await db('people').where({ id: personId }).first<object>(),
+    memberships: await db('memberships').where({ person_id: personId }).orderBy('facility_id').select<object[]>(),
   };
 }
 
