@@ -52,6 +52,18 @@ export default defineConfig({
           setupFiles: ['tests/support/client-setup.ts'],
         },
       },
+      {
+        extends: true,
+        test: {
+          name: 'commands',
+          include: ['tests/scripts/**/*.test.ts'],
+          environment: 'node',
+          // They start and stop whole programs and wait for them.
+          testTimeout: 180_000,
+          hookTimeout: 180_000,
+          fileParallelism: false,
+        },
+      },
     ],
   },
 });
