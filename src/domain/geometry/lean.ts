@@ -19,7 +19,7 @@ export type Standing = {
  */
 export function leanOf({ heightMm, thicknessMm, gapMm, supportHeightMm }: Standing): Degree {
   if (gapMm <= 0) return degrees(0);
-  const diagonal = Math.hypot(heightMm, thicknessMm);
+  const diagonal = Math.sqrt(heightMm * heightMm + thicknessMm * thicknessMm);
   const room = thicknessMm + gapMm;
   const cornerMeets = room < diagonal ? Math.atan2(heightMm, thicknessMm) - Math.acos(room / diagonal) : Math.PI / 2;
   const meetsAt = heightMm * Math.cos(cornerMeets);

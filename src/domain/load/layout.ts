@@ -135,13 +135,13 @@ export function layOut(view: LoadView): Layout {
       const shelf = shelfOf.get(placement.shelfId);
       if (!shelf) return 'shelf-not-here';
       const box = boxAt({ x: placement.xMm, y: placement.yMm, z: 0 }, size);
-      return { ...looks(item, placement, quarters), ...alone(one, item, placement), shelf, box };
+      return bodyIn({ one, item, placement, shelf, box, quarters });
     }
     if (!packageOf.has(placement.belowPackageId)) return 'nothing-below';
     const below = bodyOf.get(placement.belowPackageId);
     if (!below) return 'base-is-nowhere';
     const box = boxAt({ x: placement.xMm, y: placement.yMm, z: below.box.top }, size);
-    return { ...looks(item, placement, quarters), ...alone(one, item, placement), shelf: below.shelf, box, below };
+    return bodyIn({ one, item, placement, shelf: below.shelf, box, quarters, below });
   };
 
   const isSettled = (packageId: string) => bodyOf.has(packageId) || nowhere.has(packageId);
@@ -224,14 +224,7 @@ function inSlot(
     turn === 0
       ? { x: frame.left + acrossFrom, y: frame.front + alongFrom, z: 0 }
       : { x: frame.left + alongFrom, y: frame.front + acrossFrom, z: 0 };
-  return {
-    ...looks(item, placement, turn / 90),
-    ...alone(one, item, placement),
-    shelf,
-    box: boxAt(corner, size),
-    holder,
-    slot,
-  };
+  return bodyIn({ one, item, placement, shelf, box: boxAt(corner, size), quarters: turn / 90, holder, slot });
 }
 
 /** The basket's frame turns with the basket: a quarter turn to the left, as seen from above. */
@@ -249,17 +242,39 @@ function inBasket(
     ? { x: frame.left + kind.alongMm - placement.yMm - inFrame.depthMm, y: frame.front + placement.xMm, z: 0 }
     : { x: frame.left + placement.xMm, y: frame.front + placement.yMm, z: 0 };
   const quarters = placement.turn / 90 + holder.holder.turn / 90;
-  return {
-    ...looks(item, placement, quarters),
-    ...alone(one, item, placement),
-    shelf,
-    box: boxAt(corner, size),
-    holder,
-  };
+  return bodyIn({ one, item, placement, shelf, box: boxAt(corner, size), quarters, holder });
 }
 
-function alone(one: LoadPackage, item: CatalogueItem, placement: Placement) {
-  return { packageId: one.packageId, package: one, item, placement, holder: null, slot: null, below: null };
+type Placed = {
+  readonly one: LoadPackage;
+  readonly item: CatalogueItem;
+  readonly placement: Placement;
+  readonly shelf: Shelf;
+  readonly box: ShelfBox;
+  /** Quarter turns to the left, as seen from above. */
+  readonly quarters: number;
+  readonly holder?: HolderBody;
+  readonly slot?: number;
+  readonly below?: Body;
+};
+
+function bodyIn({ one, item, placement, shelf, box, quarters, holder, slot, below }: Placed): Body {
+  const isUpright = item.kind === 'pouch' && placement.pose === 'on-edge';
+  const [lengthAxis, crossAxis] = quarters % 2 === 0 ? (['y', 'x'] as const) : (['x', 'y'] as const);
+  return {
+    packageId: one.packageId,
+    package: one,
+    item,
+    placement,
+    shelf,
+    box,
+    holder: holder ?? null,
+    slot: slot ?? null,
+    below: below ?? null,
+    paperLooks: item.kind === 'pouch' ? paperLooks(placement.pose, placement.paper, quarters) : null,
+    lengthAxis,
+    thinAxis: isUpright ? crossAxis : null,
+  };
 }
 
 const quarterTurn = ['left', 'front', 'right', 'back'] as const satisfies readonly Side[];
@@ -273,20 +288,11 @@ const opposite: Readonly<Record<Side, Side>> = {
   down: 'up',
 };
 
-/** How a thing lies once it has been turned to the left by so many quarters. */
-function looks(
-  item: CatalogueItem,
-  { pose, paper }: { readonly pose: Pose; readonly paper: PaperSide | null },
-  quarters: number,
-): Pick<Body, 'paperLooks' | 'lengthAxis' | 'thinAxis'> {
-  const [lengthAxis, crossAxis] = quarters % 2 === 0 ? (['y', 'x'] as const) : (['x', 'y'] as const);
-  if (item.kind !== 'pouch') return { paperLooks: null, lengthAxis, thinAxis: null };
-  if (pose !== 'on-edge') {
-    return { paperLooks: paper === 'up' || paper === 'down' ? paper : null, lengthAxis, thinAxis: null };
-  }
-  if (paper !== 'left' && paper !== 'right') return { paperLooks: null, lengthAxis, thinAxis: crossAxis };
-  const start = paper === 'left' ? 0 : 2;
-  return { paperLooks: quarterTurn[(start + quarters) % 4] ?? null, lengthAxis, thinAxis: crossAxis };
+/** Where the paper looks once the pouch has been turned to the left by so many quarters. */
+function paperLooks(pose: Pose, paper: PaperSide | null, quarters: number): Side | null {
+  if (pose !== 'on-edge') return paper === 'up' || paper === 'down' ? paper : null;
+  if (paper !== 'left' && paper !== 'right') return null;
+  return quarterTurn[((paper === 'left' ? 0 : 2) + quarters) % 4] ?? null;
 }
 
 function isDrawable(holder: LoadHolder, kind: HolderKind): boolean {

@@ -4,7 +4,7 @@
  */
 import type { Body } from '../layout';
 import { elsewhere } from './moves';
-import { clearanceBetween, reachIntoEachOther } from './near-pairs';
+import { clearanceBetween, clearanceMmOf, reachIntoEachOther } from './near-pairs';
 import { onPackage } from './places';
 import { slackMm, type Draft, type Rule } from './rule';
 import type { Scene } from './scene';
@@ -23,8 +23,9 @@ export const gap: Rule = {
 
 function find(scene: Scene): readonly Draft[] {
   return [...inRacks(scene), ...loose(scene)].flatMap(({ a, b, measured }) => {
+    const wanted = Math.max(clearanceMmOf(a, scene.policy), clearanceMmOf(b, scene.policy));
+    if (measured >= wanted - slackMm) return [];
     const { askedBy, ...limit } = clearanceBetween(a, b, scene.policy);
-    if (measured >= limit.limit - slackMm) return [];
     const figure = { measured, unit: 'mm', want: 'at-least', ...limit } as const;
     const words = figureWords(figure);
     const names = `${scene.thing(a)} and ${scene.thing(b)}`;

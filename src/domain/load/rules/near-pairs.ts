@@ -21,6 +21,13 @@ export function clearanceOf(body: Body, policy: LoadPolicy): Limit {
   return limitOf(ifu, policy, kind === 'pouch' ? 'pouchGapMm' : 'packageClearanceMm');
 }
 
+/** The same as a bare number, for the many pairs that keep it. */
+export function clearanceMmOf({ item }: Body, policy: LoadPolicy): number {
+  const { clearanceMm } = item;
+  if (clearanceMm !== null && clearanceMm >= 0) return clearanceMm;
+  return item.kind === 'pouch' ? policy.pouchGapMm : policy.packageClearanceMm;
+}
+
 /** The greater of what two things ask for, and where it comes from. */
 export function clearanceBetween(a: Body, b: Body, policy: LoadPolicy): Limit & { readonly askedBy: Body } {
   const [ofA, ofB] = [clearanceOf(a, policy), clearanceOf(b, policy)];
@@ -31,7 +38,7 @@ export function clearanceBetween(a: Body, b: Body, policy: LoadPolicy): Limit & 
 export function findNearPairs(layout: Layout, policy: LoadPolicy): readonly NearPair[] {
   const pairs: NearPair[] = [];
   for (const { bodies } of layout.shelves) {
-    const reach = bodies.reduce((greatest, body) => Math.max(greatest, clearanceOf(body, policy).limit), 0);
+    const reach = bodies.reduce((greatest, body) => Math.max(greatest, clearanceMmOf(body, policy)), 0);
     const sorted = [...bodies].sort((a, b) => a.box.left - b.box.left);
     for (let first = 0; first < sorted.length; first += 1) {
       const one = sorted[first];

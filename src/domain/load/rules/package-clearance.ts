@@ -6,7 +6,7 @@ import { planDistance } from '../../geometry/box';
 import type { FindingPlace } from '../finding';
 import type { Body } from '../layout';
 import { elsewhere } from './moves';
-import { clearanceBetween, reachIntoEachOther } from './near-pairs';
+import { clearanceBetween, clearanceMmOf, reachIntoEachOther } from './near-pairs';
 import { onHolder } from './places';
 import { slackMm, type Draft, type Rule } from './rule';
 import type { Scene } from './scene';
@@ -37,9 +37,10 @@ function find(scene: Scene): readonly Draft[] {
     const { a, b } = pair;
     if (a.item.kind === 'pouch' && b.item.kind === 'pouch') continue;
     if (reachIntoEachOther(pair)) continue;
-    const limit = clearanceBetween(a, b, scene.policy);
     const measured = planDistance(a.box, b.box);
-    if (measured >= limit.limit - slackMm) continue;
+    const wanted = Math.max(clearanceMmOf(a, scene.policy), clearanceMmOf(b, scene.policy));
+    if (measured >= wanted - slackMm) continue;
+    const limit = clearanceBetween(a, b, scene.policy);
     const key = [unitOf(a), unitOf(b)].sort().join(' ');
     const known = worst.get(key);
     if (!known || measured - limit.limit < known.measured - known.limit.limit)

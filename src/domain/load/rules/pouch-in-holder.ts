@@ -25,12 +25,13 @@ export const pouchInHolder: Rule = {
 };
 
 function find(scene: Scene): readonly Draft[] {
+  const limit = limitOf(null, scene.policy, 'greatestLeanDeg');
   return scene.layout.bodies.flatMap((body) => {
     if (body.thinAxis === null) return [];
-    const limit = limitOf(null, scene.policy, 'greatestLeanDeg');
-    const figure = { measured: leanAngle(scene, body), unit: 'deg', want: 'at-most', ...limit } as const;
-    const leansTooFar = figure.measured > figure.limit;
+    const measured = leanAngle(scene, body);
+    const leansTooFar = measured > limit.limit;
     if (body.holder && !leansTooFar) return [];
+    const figure = { measured, unit: 'deg', want: 'at-most', ...limit } as const;
     const words = figureWords(figure);
     const name = scene.thing(body);
     const falls = figure.measured > 89 ? 'can fall over' : `can lean ${words.measured}`;
@@ -50,13 +51,13 @@ function find(scene: Scene): readonly Draft[] {
 }
 
 function leanAngle(scene: Scene, body: Body): number {
-  const standing = { heightMm: body.item.widthMm, thicknessMm: body.item.heightMm };
+  const { widthMm: heightMm, heightMm: thicknessMm } = body.item;
   if (body.slot !== null) {
-    const gapMm = (body.holder?.kind.pitchMm ?? 0) - body.item.heightMm;
-    return leanOf({ ...standing, gapMm, supportHeightMm: Infinity });
+    const gapMm = (body.holder?.kind.pitchMm ?? 0) - thicknessMm;
+    return leanOf({ heightMm, thicknessMm, gapMm, supportHeightMm: Infinity });
   }
   const supports = body.holder ? supportsInBasket(scene, body, body.holder) : supportsOnShelf(scene, body);
-  return Math.max(...supports.map((support) => leanOf({ ...standing, ...support })));
+  return Math.max(...supports.map((support) => leanOf({ heightMm, thicknessMm, ...support })));
 }
 
 type Support = { readonly gapMm: number; readonly supportHeightMm: number };

@@ -3,7 +3,7 @@
  * Source: our own check; a load can be judged only from data that make sense.
  */
 import type { FindingPlace } from '../finding';
-import type { Shelf, Sterilizer } from '../model';
+import type { CatalogueItem, Shelf, Sterilizer } from '../model';
 import { isSensibleLength, isSensibleMass } from '../sensible';
 import { onLoad, onPackage, onShelf } from './places';
 import type { Draft, Rule } from './rule';
@@ -30,23 +30,27 @@ function find(scene: Scene): readonly Draft[] {
 }
 
 function ofPackages(scene: Scene): readonly Draft[] {
+  const wrongOf = new Map<CatalogueItem, string | null>();
   return scene.listed.flatMap(({ one, item }) => {
-    const name = scene.nameOf(one);
-    const lengths = item ? { length: item.lengthMm, width: item.widthMm, height: item.heightMm } : {};
-    const [badLength] = Object.entries(lengths).filter(([, value]) => !isSensibleLength(value));
-    const masses = item
-      ? { mass: item.massKg, 'metal mass': item.metalMassKg, 'textile mass': item.textileMassKg }
-      : {};
-    const [badMass] = Object.entries(masses).filter(([, value]) => !isSensibleMass(value));
-    const wrong = badLength
-      ? `a ${badLength[0]} of ${badLength[1]} mm`
-      : badMass
-        ? `a ${badMass[0]} of ${badMass[1]} kg`
-        : scene.layout.nowhere.get(one.packageId) === 'position-makes-no-sense'
-          ? 'a place that is nowhere near the cart'
-          : null;
-    return told(one.packageId, name, wrong, onPackage(one));
+    let wrong: string | null | undefined = item && wrongOf.get(item);
+    if (item && wrong === undefined) {
+      wrong = wrongOfItem(item);
+      wrongOf.set(item, wrong);
+    }
+    if (scene.layout.nowhere.get(one.packageId) === 'position-makes-no-sense') {
+      wrong ??= 'a place that is nowhere near the cart';
+    }
+    return wrong === null || wrong === undefined ? [] : told(one.packageId, scene.nameOf(one), wrong, onPackage(one));
   });
+}
+
+function wrongOfItem(item: CatalogueItem): string | null {
+  const lengths = { length: item.lengthMm, width: item.widthMm, height: item.heightMm };
+  const [badLength] = Object.entries(lengths).filter(([, value]) => !isSensibleLength(value));
+  if (badLength) return `a ${badLength[0]} of ${badLength[1]} mm`;
+  const masses = { mass: item.massKg, 'metal mass': item.metalMassKg, 'textile mass': item.textileMassKg };
+  const [badMass] = Object.entries(masses).filter(([, value]) => !isSensibleMass(value));
+  return badMass ? `a ${badMass[0]} of ${badMass[1]} kg` : null;
 }
 
 function told(id: string, name: string, wrong: string | null, places: readonly FindingPlace[]): readonly Draft[] {
