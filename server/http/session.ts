@@ -4,7 +4,8 @@ import { paths } from '#contract/paths';
 import connectPgSimple from 'connect-pg-simple';
 import express, { type Request, type RequestHandler } from 'express';
 import expressSession from 'express-session';
-import passport, { type Strategy } from 'passport';
+import passport from 'passport';
+import { Strategy as LocalStrategy } from 'passport-local';
 import type pg from 'pg';
 import { z } from 'zod';
 import { findStanding } from '../platform/standing';
@@ -28,6 +29,9 @@ const signInSchema = z.object({
   /** Milliseconds since 1970, UTC: the last act that was not the program's own. */
   activeAtMs: z.number(),
 });
+
+/** The request a session belongs to: features hand it on, and speak no HTTP themselves. */
+export type SessionRequest = Request;
 
 /** What a session holds of a sign-in. Everything else is read afresh with every request. */
 export type SignIn = z.infer<typeof signInSchema>;
@@ -163,18 +167,37 @@ export function signInOf(request: Request): SignIn | null {
   return read.success ? read.data : null;
 }
 
-/** Lets a Passport strategy judge the credentials in this request. Null when it says no. */
-export function authenticate(request: Request, strategy: Strategy): Promise<unknown> {
+/**
+ * Lets Passport take staff number and password out of this request and have them judged. The body must have been parsed:
+ * Passport reads it by itself.
+ */
+export function authenticateWithPassword<Person extends object>(
+  request: SessionRequest,
+  judge: (staffNumber: string, password: string) => Promise<Person>,
+): Promise<Person> {
+  const strategy = new LocalStrategy(
+    { usernameField: 'staffNumber', passwordField: 'password', session: false },
+    (staffNumber, password, done) => {
+      judge(staffNumber, password).then(
+        (person) => {
+          done(null, person);
+        },
+        (error: unknown) => {
+          done(error);
+        },
+      );
+    },
+  );
   return new Promise((resolve, reject) => {
-    const judge = stationOf(request).passport.authenticate(
+    const middleware = stationOf(request).passport.authenticate(
       strategy,
       { session: false },
-      (error: unknown, person: unknown) => {
-        if (error) reject(error instanceof Error ? error : new Error('the strategy failed', { cause: error }));
-        else resolve(person === false || person === undefined ? null : person);
+      (error: unknown, person: Person | false | undefined) => {
+        if (person) resolve(person);
+        else reject(error instanceof Error ? error : new Error('nobody was judged', { cause: error }));
       },
     ) as RequestHandler;
-    void judge(request, responseOf(request), reject);
+    void middleware(request, responseOf(request), reject);
   });
 }
 

@@ -1,9 +1,8 @@
 import { judgePassword } from '#domain/people/password-policy';
 import { judgePin } from '#domain/people/pin-policy';
 import type { ChangePasswordRequest, ChangePinRequest, SessionResponse } from '#contract/session';
-import type { Request } from 'express';
 import type { Services } from '../../http/define-route';
-import { beginSession, signInOf, type SignIn } from '../../http/session';
+import { beginSession, signInOf, type SignIn, type SessionRequest } from '../../http/session';
 import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import { isCommonPassword } from '../../platform/common-passwords';
@@ -21,7 +20,7 @@ import { getCredentials, lockCredentials, setPassword, setPin, type Credentials 
  */
 export async function changePassword(
   services: Services,
-  request: Request,
+  request: SessionRequest,
   actor: Actor,
   { current, next }: ChangePasswordRequest,
 ): Promise<SessionResponse> {
@@ -58,7 +57,7 @@ export async function changePassword(
 /** A person's own new PIN; the password vouches for them. */
 export async function changePin(
   services: Services,
-  request: Request,
+  request: SessionRequest,
   actor: Actor,
   { password, pin }: ChangePinRequest,
 ): Promise<SessionResponse> {
@@ -87,7 +86,7 @@ export async function changePin(
  */
 async function requireOwnPassword(
   services: Services,
-  request: Request,
+  request: SessionRequest,
   actor: Actor,
   { password, pointer }: { readonly password: string; readonly pointer: string },
 ): Promise<Credentials> {

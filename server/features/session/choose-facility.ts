@@ -1,7 +1,6 @@
 import type { ChooseFacilityRequest, SessionResponse } from '#contract/session';
-import type { Request } from 'express';
 import type { Services } from '../../http/define-route';
-import { beginSession, signInOf } from '../../http/session';
+import { beginSession, signInOf, type SessionRequest } from '../../http/session';
 import type { Actor } from '../../platform/actor';
 import { NotFound } from '../../platform/errors';
 import { getSession } from './session-read-model';
@@ -10,7 +9,7 @@ import { listFacilityIds } from './sign-in-store';
 /** Goes on in another facility of this person, perhaps in another role; so under a new session id, and not for longer. */
 export async function chooseFacility(
   { db, clock }: Services,
-  request: Request,
+  request: SessionRequest,
   actor: Actor,
   { facilityId }: ChooseFacilityRequest,
 ): Promise<SessionResponse> {

@@ -1,6 +1,5 @@
-import type { Request } from 'express';
 import type { Services } from '../../http/define-route';
-import { beginSession, signInOf, type SignIn } from '../../http/session';
+import { beginSession, signInOf, type SignIn, type SessionRequest } from '../../http/session';
 import { appendEvent } from '../../platform/audit-writer';
 import { NotSignedIn } from '../../platform/errors';
 import { isSecretOf } from '../../platform/secret-hash';
@@ -78,7 +77,7 @@ export async function judgeSignIn(services: Services, attempt: Attempt): Promise
  */
 export async function admit(
   { db, clock }: Services,
-  request: Request,
+  request: SessionRequest,
   { personId, facilityIds, tryId }: AdmittedPerson,
   by: SignIn['by'],
 ): Promise<SignIn> {

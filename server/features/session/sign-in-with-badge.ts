@@ -1,7 +1,7 @@
 import { readScan } from '#domain/label/read-scan';
 import type { BadgeSignInRequest, SessionResponse } from '#contract/session';
-import type { Request } from 'express';
 import type { Services } from '../../http/define-route';
+import type { SessionRequest } from '../../http/session';
 import { InvalidInput } from '../../platform/errors';
 import { sourceOf, subjectOf, takeTry } from '../../platform/sign-in-tries';
 import { admit, judgeSignIn } from './judge-sign-in';
@@ -11,7 +11,7 @@ import { findByBadge } from './sign-in-store';
 /** The change of person at a shared station: one request ends the former session and begins the next. */
 export async function signInWithBadge(
   services: Services,
-  request: Request,
+  request: SessionRequest,
   { badge, pin }: BadgeSignInRequest,
 ): Promise<SessionResponse> {
   const scan = readScan(badge);

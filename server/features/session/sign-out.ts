@@ -1,13 +1,12 @@
-import type { Request } from 'express';
 import type { Services } from '../../http/define-route';
-import { endSession, signInOf } from '../../http/session';
+import { endSession, signInOf, type SessionRequest } from '../../http/session';
 import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import { endSessionsOf } from '../../platform/sessions';
 import { setSignedOutEverywhere } from './sign-in-store';
 
 /** Ends the session of this station. Signing out twice is no mistake. */
-export async function signOut({ db, clock }: Services, request: Request): Promise<void> {
+export async function signOut({ db, clock }: Services, request: SessionRequest): Promise<void> {
   const signIn = signInOf(request);
   await endSession(request);
   if (!signIn) return;
@@ -23,7 +22,7 @@ export async function signOut({ db, clock }: Services, request: Request): Promis
 }
 
 /** Ends every session of this person, on every station: OWASP ASVS 5.0, 7.4.1. */
-export async function signOutEverywhere({ db, clock }: Services, request: Request, actor: Actor): Promise<void> {
+export async function signOutEverywhere({ db, clock }: Services, request: SessionRequest, actor: Actor): Promise<void> {
   const now = clock.now();
   await db.transaction(async (trx) => {
     await setSignedOutEverywhere(trx, actor.personId, now);
