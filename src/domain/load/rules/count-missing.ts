@@ -1,5 +1,5 @@
 /*
- * Each shelf with something on it has been counted by a person who did not see the scanned number.
+ * Each shelf, also an empty one, has been counted by a person who did not see the scanned number.
  * Source: our own rule; accountability for each package asks for nothing unscanned.
  */
 import { onShelf } from './places';
@@ -20,7 +20,7 @@ export const countMissing: Rule = {
 
 function find(scene: Scene): readonly Draft[] {
   return talliesOf(scene)
-    .filter(({ scanned, counted }) => scanned > 0 && counted === null)
+    .filter(({ counted }) => counted === null)
     .map(({ shelf }) => ({
       subjects: [shelf.id],
       title: `${shelf.name} has not been counted`,

@@ -43,10 +43,15 @@ function find(scene: Scene): readonly Draft[] {
     const limit = clearanceBetween(a, b, scene.policy);
     const key = [unitOf(a), unitOf(b)].sort().join(' ');
     const known = worst.get(key);
-    if (!known || measured - limit.limit < known.measured - known.limit.limit)
-      worst.set(key, { a, b, measured, limit });
+    if (!known || isWorse({ measured, limit }, known)) worst.set(key, { a, b, measured, limit });
   }
   return [...worst.values()].map((close) => draftOf(scene, close));
+}
+
+/** By how much is missing; with as much missing the nearer one, so that no order of looking decides. */
+function isWorse(one: Pick<Close, 'measured' | 'limit'>, other: Close): boolean {
+  const difference = other.limit.limit - other.measured - (one.limit.limit - one.measured);
+  return difference === 0 ? one.measured < other.measured : difference < 0;
 }
 
 function unitOf(body: Body): string {
