@@ -1,3 +1,4 @@
+import { loadStates } from '#domain/load/state-machine';
 import { z } from 'zod';
 import { idSchema, instantSchema, reasonSchema, requestIdSchema } from './common';
 import {
@@ -14,21 +15,7 @@ import {
 } from './load-view';
 import { loadPolicySchema } from './policy';
 
-export const loadStateSchema = z.enum([
-  'building',
-  'closed',
-  'in-sterilizer',
-  'cooling',
-  'awaiting-proof',
-  'ready-to-sign',
-  'released',
-  'released-implant-early',
-  'held',
-  'failed',
-  'set-aside',
-  'aborted',
-  'abandoned',
-]);
+export const loadStateSchema = z.enum(loadStates);
 export type LoadState = z.infer<typeof loadStateSchema>;
 
 /** A scan may hold anything a scanner sends; 10,000 characters are answered, more are refused at the edge. */

@@ -1,5 +1,14 @@
-/** Longest pause between two characters of one scan. Scanners leave 0 to 20 ms, hands 80 ms and more (common practice, no source). */
+/** A pause that scanners make and hands do not: they leave 0 to 20 ms, hands 80 ms and more (common practice, no source). */
 export const greatestGapMs = 60;
+
+/**
+ * A scan may stutter: radio scanners and a busy tablet hold single characters back. A pause up to this one does not break a
+ * scan in two, as long as most of its other pauses are those of a scanner.
+ */
+export const greatestStutterMs = 400;
+
+/** Of the pauses inside a scan, at least this share is a scanner's. */
+const leastQuickShare = 0.5;
 
 /** Shorter bursts are two keys rolled over one another. */
 export const fewestCharacters = 3;
@@ -51,17 +60,20 @@ const modifiers: readonly string[] = ['Shift', 'Control', 'AltGraph', 'CapsLock'
 /** Tells the keys of a scanner from those of hands, by their pace. Knows nothing of the browser. */
 export function createScanReader() {
   let buffer = '';
+  let quickGaps = 0;
   let lastKeyAtMs = Number.NEGATIVE_INFINITY;
   let lastScanAtMs = Number.NEGATIVE_INFINITY;
 
   function end(atMs: number): ScanVerdict {
     const text = buffer;
+    const isPaceOfScanner = quickGaps >= leastQuickShare * text.length;
     buffer = '';
-    if (text.length >= fewestCharacters) {
+    quickGaps = 0;
+    if (text.length >= fewestCharacters && isPaceOfScanner) {
       lastScanAtMs = atMs;
       return { kind: 'scan', text };
     }
-    if (text !== '') return { kind: 'too-short' };
+    if (text !== '') return { kind: isPaceOfScanner ? 'too-short' : 'typed' };
     return atMs - lastScanAtMs <= greatestGapMs ? { kind: 'tail' } : { kind: 'typed' };
   }
 
@@ -71,16 +83,23 @@ export function createScanReader() {
       const character = characterOf(key);
       if (character === null || key.isRepeat) {
         buffer = '';
+        quickGaps = 0;
         return { kind: 'typed' };
       }
-      if (key.atMs - lastKeyAtMs > greatestGapMs) buffer = '';
+      const gapMs = key.atMs - lastKeyAtMs;
+      const isQuick = gapMs >= 0 && gapMs <= greatestGapMs;
+      if (gapMs > greatestStutterMs || gapMs < 0) {
+        buffer = '';
+        quickGaps = 0;
+      } else if (isQuick && buffer !== '') quickGaps += 1;
       lastKeyAtMs = key.atMs;
       if (lineEnds.includes(character)) return end(key.atMs);
       const isFirst = buffer === '';
       // A lone Ctrl and letter is somebody's shortcut; GS alone can begin a scan that way.
       if (isFirst && key.isCtrl && character !== groupSeparator) return { kind: 'typed' };
       if (buffer.length < mostCharacters) buffer += character;
-      return { kind: isFirst ? 'first' : 'inside' };
+      // A slow key may be a hand's: it is left to whatever has the focus.
+      return { kind: isFirst || !isQuick ? 'first' : 'inside' };
     },
 
     forget() {

@@ -2,7 +2,7 @@ import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import { once } from '../../platform/once';
-import { requireBuilding } from './load-change';
+import { requireAct } from './load-change';
 import { lockLoad, stepVersion } from './load-store';
 
 /** Gives a load up while it is being built: its packages wait again where they waited before. */
@@ -19,7 +19,7 @@ export async function abandonLoad(
     async (trx) => {
       const at = clock.now();
       const load = await lockLoad(trx, actor.facilityId, loadId);
-      requireBuilding(load);
+      const { to } = requireAct(load, 'abandon');
       await trx('packages')
         .whereIn('id', trx('load_packages').where({ load_id: load.id }).select('package_id'))
         .whereIn('state', ['in-load', 'staged'])
@@ -38,7 +38,7 @@ export async function abandonLoad(
           .where({ id: load.run_id, state: 'taken' })
           .update({ state: 'waiting', version: trx.raw('version + 1') });
       }
-      await trx('loads').where({ id: load.id }).update({ state: 'abandoned', abandoned_reason: request.reason });
+      await trx('loads').where({ id: load.id }).update({ state: to, abandoned_reason: request.reason });
       await stepVersion(trx, load);
       await appendEvent(trx, {
         kind: 'load.abandoned',

@@ -6,7 +6,7 @@ import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import { Conflict, RuleRefused } from '../../platform/errors';
 import { once } from '../../platform/once';
-import { changeFrom, requireBuilding } from './load-change';
+import { changeFrom, requireAct } from './load-change';
 import { lockLoad, stepVersion } from './load-store';
 import { readLoadView } from './load-view-read-model';
 
@@ -24,7 +24,7 @@ export async function acceptFinding(
     async (trx) => {
       const at = clock.now();
       const load = await lockLoad(trx, actor.facilityId, loadId);
-      requireBuilding(load);
+      requireAct(load, 'accept-finding');
       const { view, policy } = await readLoadView(trx, load, at);
       const finding = evaluateLoad(view, policy).find((entry) => entry.key === request.findingKey);
       if (!finding) throw new Conflict('load.finding-gone', 'This finding is not there any more. Look again.');

@@ -8,7 +8,7 @@ import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import { RuleRefused } from '../../platform/errors';
 import { once } from '../../platform/once';
-import { requireBuilding } from './load-change';
+import { requireAct } from './load-change';
 import { lockLoad, stepVersion } from './load-store';
 import { readLoadView } from './load-view-read-model';
 
@@ -56,7 +56,7 @@ async function close(services: Services, actor: Actor, loadId: string, requestId
   return once({ db, clock, actor }, { requestId, act: 'load.close', body: { loadId } }, async (trx) => {
     const at = clock.now();
     const load = await lockLoad(trx, actor.facilityId, loadId);
-    requireBuilding(load);
+    const { to } = requireAct(load, 'close');
     const { view, policy, policyNumber, counts, acceptances } = await readLoadView(trx, load, at);
     const findings = evaluateLoad(view, policy);
     const { mayClose, blocks } = decideClose(view, policy, findings);
@@ -72,7 +72,7 @@ async function close(services: Services, actor: Actor, loadId: string, requestId
     await trx('loads')
       .where({ id: load.id })
       .update({
-        state: 'closed',
+        state: to,
         closed_by: actor.personId,
         closed_at: at,
         rule_set: ruleSetVersion,

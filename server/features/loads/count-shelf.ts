@@ -5,7 +5,7 @@ import { appendEvent } from '../../platform/audit-writer';
 import { NotFound } from '../../platform/errors';
 import { once } from '../../platform/once';
 import { differenceOf } from '#domain/load/difference';
-import { changeFrom, requireBuilding } from './load-change';
+import { changeFrom, requireAct } from './load-change';
 import { lockLoad, stepVersion } from './load-store';
 import { readLoadView } from './load-view-read-model';
 
@@ -23,7 +23,7 @@ export async function countShelf(
     async (trx) => {
       const at = clock.now();
       const load = await lockLoad(trx, actor.facilityId, loadId);
-      requireBuilding(load);
+      requireAct(load, 'build');
       const { view } = await readLoadView(trx, load, at);
       const shelf = view.cart.shelves.find((entry) => entry.id === request.shelfId);
       if (!shelf) throw new NotFound('shelf.none', 'This shelf is not on the load’s cart.');

@@ -9,7 +9,7 @@ import type { Transaction } from '../../platform/db';
 import { NotFound, RuleRefused } from '../../platform/errors';
 import { once } from '../../platform/once';
 import { holderById } from '../equipment/read-model';
-import { recordAct, requireBuilding, type ActKind } from './load-change';
+import { recordAct, requireAct, type ActKind } from './load-change';
 import { lockLoad } from './load-store';
 import { readLoadView, type LoadAsKnown } from './load-view-read-model';
 import { requireHolderFree } from './require-holder-free';
@@ -31,7 +31,7 @@ export async function editLoad(
     async (trx) => {
       const at = clock.now();
       const load = await lockLoad(trx, actor.facilityId, loadId);
-      requireBuilding(load);
+      requireAct(load, 'build');
       const known = await readLoadView(trx, load, at);
       const applied = applyEdits(known.view, request.edits, await sparesFor(trx, known, request.edits));
       if (!applied.ok) throw new RuleRefused(applied.refusal.code, applied.refusal.sentence);

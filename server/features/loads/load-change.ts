@@ -3,6 +3,7 @@ import { affectedShelves } from '#domain/load/apply-edit';
 import type { AuditKind, AuditPayloads } from '#domain/audit/event-kinds';
 import { differenceOf, isEmptyDifference, type LoadDifference } from '#domain/load/difference';
 import type { LoadView } from '#domain/load/model';
+import { decideAct, type DecidedAct, type LoadAct } from '#domain/load/state-machine';
 import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import type { Transaction } from '../../platform/db';
@@ -11,18 +12,18 @@ import { getUndoable } from './undoable-read-model';
 import type { LoadAsKnown } from './load-view-read-model';
 import { listAcceptances, listCounts, stepVersion, voidCounts, writeDifference, type LoadRow } from './load-store';
 
-/** Only a load that is still being built can be changed. */
-export function requireBuilding(load: LoadRow): void {
-  if (load.state !== 'building') {
-    throw new RuleRefused('load.not-building', `Load ${load.number} is not being built any more. Nothing was changed.`);
-  }
+/** Whether the load's state allows an act, by the one table of its life. */
+export function requireAct(load: LoadRow, act: LoadAct): DecidedAct {
+  const decided = decideAct(load.state, act);
+  if (!decided.ok) throw new RuleRefused(decided.refusal.code, decided.refusal.sentence);
+  return decided.value;
 }
 
 export type ActKind = {
   [Kind in AuditKind]: AuditPayloads[Kind] extends { readonly difference: LoadDifference } ? Kind : never;
 }[AuditKind];
 
-export type LoadAct = {
+export type ActContext = {
   readonly actor: Actor;
   readonly at: Date;
   readonly requestId: string;
@@ -34,7 +35,7 @@ export async function recordAct<Kind extends ActKind>(
   trx: Transaction,
   known: LoadAsKnown,
   after: LoadView,
-  act: LoadAct,
+  act: ActContext,
   tell: (difference: LoadDifference) => { readonly kind: Kind; readonly payload: AuditPayloads[Kind] },
 ): Promise<LoadChange> {
   const { load, view } = known;

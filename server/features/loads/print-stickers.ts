@@ -5,6 +5,7 @@ import type { Db } from '../../platform/db';
 import { NotFound, RuleRefused } from '../../platform/errors';
 import { once } from '../../platform/once';
 import { drawLoadStickers } from '../labels/draw/draw-load-stickers';
+import { requireAct } from './load-change';
 import { getLoad, lockLoad } from './load-store';
 
 type Scanned = {
@@ -35,12 +36,7 @@ export async function printStickers(
     async (trx) => {
       const at = clock.now();
       const load = await lockLoad(trx, actor.facilityId, loadId);
-      if (load.state !== 'building' && load.state !== 'closed') {
-        throw new RuleRefused(
-          'load.no-stickers-now',
-          `Load ${load.number} is not open any more: no stickers are printed for it.`,
-        );
-      }
+      requireAct(load, 'print-stickers');
       const scanned = await trx('load_packages as listed')
         .join('packages as package', 'package.id', 'listed.package_id')
         .leftJoin('load_stickers as sticker', (join) => {

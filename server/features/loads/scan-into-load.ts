@@ -11,7 +11,7 @@ import { once } from '../../platform/once';
 import { holderByPlaceCode, shelfByPlaceCode } from '../equipment/read-model';
 import { catalogueItems } from '../items/read-model';
 import { findPackageByCode, lockPackages } from '../packages/read-model';
-import { recordAct, requireBuilding, type LoadAct } from './load-change';
+import { recordAct, requireAct, type ActContext } from './load-change';
 import { lockLoad } from './load-store';
 import { readLoadView, type LoadAsKnown } from './load-view-read-model';
 import { whyHolderIsNotFree } from './require-holder-free';
@@ -52,9 +52,9 @@ export async function scanIntoLoad(
     async (trx) => {
       const at = clock.now();
       const load = await lockLoad(trx, actor.facilityId, loadId);
-      requireBuilding(load);
+      requireAct(load, 'build');
       const known = await readLoadView(trx, load, at);
-      const act: LoadAct = { actor, at, requestId: request.requestId, entry: request.entry };
+      const act: ActContext = { actor, at, requestId: request.requestId, entry: request.entry };
       const scan = readScan(request.raw);
       const answer = await answerScan(trx, known, scan, request.place, act);
       if (answer.change === null && answer.answer !== 'place-set') {
@@ -80,7 +80,7 @@ async function answerScan(
   known: LoadAsKnown,
   scan: Scan,
   place: ScanPlace | null,
-  act: LoadAct,
+  act: ActContext,
 ): Promise<Answer> {
   switch (scan.kind) {
     case 'package':
@@ -107,7 +107,7 @@ async function scanPackage(
   known: LoadAsKnown,
   code: string,
   place: ScanPlace | null,
-  act: LoadAct,
+  act: ActContext,
 ): Promise<Answer> {
   const { label, item } = await lockLabel(trx, known, code);
   const view =
@@ -208,7 +208,7 @@ async function scanHolder(
   known: LoadAsKnown,
   code: string,
   place: ScanPlace | null,
-  act: LoadAct,
+  act: ActContext,
 ): Promise<Answer> {
   const holder = await holderByPlaceCode(trx, known.load.facility_id, code);
   if (!holder) return refused('No holder here has this code.');

@@ -6,7 +6,7 @@ import { Conflict, RuleRefused } from '../../platform/errors';
 import { once } from '../../platform/once';
 import { holderById } from '../equipment/read-model';
 import { findPackages, lockPackages } from '../packages/read-model';
-import { recordAct, requireBuilding } from './load-change';
+import { recordAct, requireAct } from './load-change';
 import { lockLoad } from './load-store';
 import { readLoadView } from './load-view-read-model';
 import { requireHolderFree } from './require-holder-free';
@@ -23,7 +23,7 @@ export async function undoLastAct(
   return once({ db, clock, actor }, { requestId, act: 'load.undo', body: { loadId } }, async (trx) => {
     const at = clock.now();
     const load = await lockLoad(trx, actor.facilityId, loadId);
-    requireBuilding(load);
+    requireAct(load, 'build');
     const undoable = await getUndoable(trx, load.id);
     if (!undoable) throw new RuleRefused('load.nothing-to-undo', 'There is nothing to take back.');
     const known = await readLoadView(trx, load, at);

@@ -10,8 +10,8 @@ import { spreadPins } from './spread-pins';
 
 /** Of the drawing only: how thick a shelf's deck is. */
 const deckMm = 16;
-const topMarginPx = 28;
-const footPx = 26;
+const topMarginPx = 18;
+const footPx = 20;
 
 type Box = { readonly left: number; readonly right: number; readonly bottom: number; readonly top: number };
 

@@ -82,6 +82,9 @@ export const ShelfPlan = memo(function ShelfPlan(props: ShelfPlanProps) {
         toPixels={toPixels}
         describe={(body) => `${body.item.name}, ${placementWords(view, body.placement, body.item)}`}
       />
+      {holders.map((holder) => (
+        <HolderLabel key={holder.holder.holderId} holder={holder} bodies={bodies} toPixels={toPixels} />
+      ))}
       <Gaps findings={findings} layout={layout} shelf={shelf} toPixels={toPixels} />
       {next?.shelfId === shelf.id && <NextSpot box={toPixels(next.box)} />}
       {pins.map(({ x, y, letter, finding }) => (
@@ -134,11 +137,8 @@ function HolderPlan({
   onHolder: ((holderId: string) => void) | undefined;
 }) {
   const box = toPixels(holder.box);
-  const { name, holderId } = holder.holder;
+  const { holderId } = holder.holder;
   const free = freeSlots(holder, bodies);
-  const slots = holder.kind.slots ?? 0;
-  const label =
-    slots === 0 ? name : free.length === 0 ? `${name}, full` : `${name}, ${slots - free.length} of ${slots}`;
   return (
     <g
       {...(onHolder
@@ -157,13 +157,28 @@ function HolderPlan({
       />
       {holder.kind.form === 'rack' &&
         free.map((slot) => <GhostLeaf key={slot} box={toPixels(ghostSlotBox(holder, slot))} />)}
-      <rect
-        x={box.x + 1}
-        y={box.y + box.height - 15}
-        width={Math.min(box.width - 2, label.length * 6.7 + 5)}
-        height={14}
-        className="fill-paper-0/90"
-      />
+    </g>
+  );
+}
+
+/** Over the leaves, at the holder's foot: its name and how full it is. */
+function HolderLabel({
+  holder,
+  bodies,
+  toPixels,
+}: {
+  holder: HolderBody;
+  bodies: readonly Body[];
+  toPixels: (rect: PlanRect) => PixelBox;
+}) {
+  const box = toPixels(holder.box);
+  const { name } = holder.holder;
+  const slots = holder.kind.slots ?? 0;
+  const taken = slots - freeSlots(holder, bodies).length;
+  const label = slots === 0 ? name : taken === slots ? `${name}, full` : `${name}, ${taken} of ${slots}`;
+  return (
+    <g className="pointer-events-none">
+      <rect x={box.x + 1} y={box.y + box.height - 16} width={box.width - 2} height={15} className="fill-paper-0" />
       <MapText x={box.x + 4} y={box.y + box.height - 4} weight={600}>
         {label}
       </MapText>

@@ -315,7 +315,7 @@ describe('closing a load', () => {
       expect({ path, status: late.status, code: problemOf(late.body).code }).toEqual({
         path,
         status: 422,
-        code: 'load.not-building',
+        code: 'load.not-in-that-state',
       });
     }
     expect(await loadSnapshot(app)).toBe(before);

@@ -26,7 +26,7 @@ export function FindingsPanel(props: FindingsPanelProps) {
   const { detail, open, settled, openKey } = props;
   const acceptanceOf = new Map(detail.acceptances.map((entry) => [entry.findingKey, entry]));
   return (
-    <section aria-label="Findings" className="min-h-0">
+    <section aria-label="Findings">
       <PanelHead
         title={`Findings, ${open.length}`}
         aside={open.length === 0 ? 'nothing found' : 'letters match the pins'}

@@ -1,4 +1,5 @@
 import type { LoadSummary } from '#contract/loads';
+import { loadStateWords } from '#domain/load/state-machine';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { Button } from '../../../components/ui/button';
@@ -11,7 +12,6 @@ import { Moment } from '../../../components/ui/time';
 import { useMay } from '../../../lib/session';
 import { loadQueries } from '../queries';
 import { OpenLoadSheet } from './open-load-sheet';
-import { stateWords } from '../state-words';
 
 const columns: readonly Column<LoadSummary>[] = [
   {
@@ -20,7 +20,7 @@ const columns: readonly Column<LoadSummary>[] = [
     cell: (load) => <Code className="font-semibold">{load.number}</Code>,
     sortBy: (load) => load.number,
   },
-  { key: 'state', header: 'Now', cell: (load) => stateWords[load.state], sortBy: (load) => load.state },
+  { key: 'state', header: 'Now', cell: (load) => loadStateWords[load.state], sortBy: (load) => load.state },
   {
     key: 'sterilizer',
     header: 'Sterilizer',

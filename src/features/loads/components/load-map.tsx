@@ -14,7 +14,7 @@ import type { LastScan } from './scan-line';
 const headPx = 28;
 /** Greatest scale, px per mm: beyond it a drawing only grows, and says no more. */
 const greatestScale = 0.52;
-const leastCloseUpPx = 150;
+const leastCloseUpPx = 178;
 
 export type MapFocus = { readonly shelfId: string | null; readonly holderId: string | null };
 

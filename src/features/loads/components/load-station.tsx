@@ -162,7 +162,7 @@ export function LoadStation({ detail }: { detail: LoadDetail }) {
           {acts.problem}
         </p>
       )}
-      <div className="grid min-h-0 flex-1 gap-5 px-4 pt-2.5 tablet:grid-cols-[minmax(0,1fr)_minmax(20rem,24rem)]">
+      <div className="grid min-h-0 flex-1 gap-5 px-4 pt-2.5 tablet:grid-cols-[minmax(0,1fr)_21.5rem] desk:grid-cols-[minmax(0,1fr)_24rem]">
         <div ref={sizeRef} className="min-h-0 min-w-0">
           {size && (
             <LoadMap
@@ -191,7 +191,7 @@ export function LoadStation({ detail }: { detail: LoadDetail }) {
           <CartInWords view={view} findings={judgement.findings} />
         </div>
         <div
-          className="flex min-h-0 flex-col gap-3 overflow-y-auto pb-3 pl-3 max-tablet:pl-0"
+          className="flex min-h-0 flex-col gap-3 overflow-y-auto pb-3 pl-3 *:flex-none max-tablet:pl-0"
           tabIndex={0}
           role="region"
           aria-label="Table and findings"

@@ -2,9 +2,14 @@ import type { LoadDetail } from '#contract/loads';
 import type { Reckoning, ShelfReckoning } from '#domain/load/reckoning';
 import { Icon } from '../../../components/icon';
 
+/** Beside the drawing there is little room: the figures say the rest. */
+function shortly({ missing, counted, difference }: ShelfReckoning): string {
+  return missing.length > 0 && counted === null ? `${missing.length} not scanned` : difference;
+}
+
 function Figure({ value, isOff, word }: { value: number | null; isOff: boolean; word: string }) {
   return (
-    <td className={`px-1 text-right text-[1.125rem] tabular-nums ${isOff ? 'font-bold text-madder-3' : 'font-medium'}`}>
+    <td className={`pl-1 text-right text-[1.125rem] tabular-nums ${isOff ? 'font-bold text-madder-3' : 'font-medium'}`}>
       {value ?? <span className="text-least font-normal text-ink-2">{word}</span>}
     </td>
   );
@@ -29,10 +34,10 @@ function Row({
           type="button"
           onClick={onChoose}
           aria-pressed={isActive}
-          className="flex min-h-14 w-full flex-col justify-center px-2.5 text-left"
+          className="flex min-h-14 w-full flex-col justify-center pl-2.5 text-left"
         >
           <b className="text-row font-semibold">{row.shelfName}</b>
-          <span className={`text-small ${isOff ? 'font-label text-madder-3' : 'text-ink-2'}`}>{row.difference}</span>
+          <span className={`text-least ${isOff ? 'font-label text-madder-3' : 'text-ink-2'}`}>{shortly(row)}</span>
         </button>
       </th>
       <Figure value={row.listed} isOff={false} word="" />
@@ -82,7 +87,7 @@ export function ReckoningPanel({ reckoning, activeShelfId, onShelf, onCount }: R
             Shelf
           </th>
           {['listed', 'scanned', 'counted'].map((word) => (
-            <th key={word} scope="col" className="w-13 px-1 text-right text-least font-medium last:w-15 last:pr-2">
+            <th key={word} scope="col" className="w-12 pl-1 text-right text-least font-medium last:w-14 last:pr-2">
               {word}
             </th>
           ))}
@@ -111,7 +116,9 @@ export function ReckoningPanel({ reckoning, activeShelfId, onShelf, onCount }: R
               Load
               {reckoning.isEven && <Icon name="tick" size={16} className="text-film-4" />}
             </span>
-            <span className="block text-small font-normal text-ink-2">{reckoning.difference}</span>
+            <span className="block text-least font-normal text-ink-2">
+              {reckoning.missing.length > 0 ? `${reckoning.missing.length} not scanned` : reckoning.difference}
+            </span>
           </th>
           <Figure value={reckoning.listed} isOff={reckoning.missing.length > 0} word="" />
           <Figure value={reckoning.scanned} isOff={reckoning.missing.length > 0} word="" />
