@@ -1,12 +1,16 @@
-import { PageHead } from '../../components/ui/heading';
-import { EmptyState } from '../../components/ui/states';
+import type { QueryClient } from '@tanstack/react-query';
+import type { LoaderFunction } from 'react-router-dom';
+import { PeopleScreen } from '../../features/people/components/people-screen';
+import { everyone, peopleQueries } from '../../features/people/queries';
+
+export const loader =
+  (queryClient: QueryClient): LoaderFunction =>
+  () => {
+    // Begun before the screen is there; the screen shows what becomes of it, a refusal too.
+    void queryClient.query({ ...peopleQueries.list(everyone), staleTime: 'static' }).catch(() => undefined);
+    return null;
+  };
 
 export function Component() {
-  return (
-    <div className="grid gap-5 p-6">
-      <title>People · Paperside</title>
-      <PageHead title="People" />
-      <EmptyState title="Not here yet">The people of this place will stand here.</EmptyState>
-    </div>
-  );
+  return <PeopleScreen />;
 }
