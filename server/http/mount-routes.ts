@@ -76,16 +76,45 @@ const requireOwnHeader: RequestHandler = (request, _response, next) => {
   next(new NotAllowed('request.foreign', 'This request did not come from Paperside.'));
 };
 
-export function mountRoutes(app: Express, routes: readonly Route[], services: Services, resolveActor: ResolveActor): void {
+/** Takes one file, and says in our words when the form around it cannot be read: its parser throws bare errors for that. */
+function uploadHandler(greatestBytes: number): RequestHandler {
+  const take = multer({
+    storage: multer.memoryStorage(),
+    limits: { fileSize: greatestBytes, files: 1, fields: 20 },
+  }).single('file');
+  return (request, response, next) => {
+    take(request, response, (error: unknown) => {
+      if (error instanceof Error && !(error instanceof multer.MulterError)) {
+        next(
+          new InvalidInput('file.not-understood', 'This upload is cut off. Choose the file and send it again.', {
+            cause: error,
+          }),
+        );
+      } else next(error);
+    });
+  };
+}
+
+export function mountRoutes(
+  app: Express,
+  routes: readonly Route[],
+  services: Services,
+  resolveActor: ResolveActor,
+): void {
   for (const route of routes) {
-    const upload = route.upload
-      ? [multer({ storage: multer.memoryStorage(), limits: { fileSize: route.upload.greatestBytes, files: 1, fields: 20 } }).single('file')]
-      : [];
+    const upload = route.upload ? [uploadHandler(route.upload.greatestBytes)] : [];
     // Whoever may not do it does not get to send a file either.
     const guard: RequestHandler = async (request, _response, next) => {
       await requireActor(route, request, resolveActor);
       next();
     };
-    app[route.method](route.path, requireOwnHeader, ...(upload.length > 0 ? [guard] : []), ...route.before, ...upload, handlerOf(route, services, resolveActor));
+    app[route.method](
+      route.path,
+      requireOwnHeader,
+      ...(upload.length > 0 ? [guard] : []),
+      ...route.before,
+      ...upload,
+      handlerOf(route, services, resolveActor),
+    );
   }
 }

@@ -20,5 +20,8 @@ export async function putItems(
     version,
     ...itemRowFrom(fields),
   }));
+  // Two items may swap their identifiers in one go, and the unique key is looked at row by row.
+  const identified = rows.filter((row) => row.device_identifier !== null && row.version > 1).map((row) => row.id);
+  if (identified.length > 0) await trx('items').whereIn('id', identified).update({ device_identifier: null });
   await putRows(trx, 'items', rows);
 }

@@ -1,4 +1,4 @@
-import { CsvError, parse, type Info } from 'csv-parse/sync';
+import { CsvError, parse } from 'csv-parse/sync';
 import { InvalidInput } from '../errors';
 import { decodeText } from './decode-text';
 
@@ -61,26 +61,40 @@ function sentenceOf(error: CsvError, text: string): string {
   }
 }
 
-type Parsed = { readonly record: string[]; readonly info: Info };
+/** Files of very old spreadsheets end their lines with a carriage return alone. */
+function lineEndsOf(text: string): string[] {
+  return text.includes('\n') ? ['\r\n', '\n'] : ['\r'];
+}
 
-function parseAll(text: string, delimiter: string, mostRecords: number): Parsed[] {
+function parseAll(text: string, delimiter: string, mostRecords: number): string[][] {
   try {
     return parse(text, {
       delimiter,
-      info: true,
+      record_delimiter: lineEndsOf(text),
       relax_column_count: true,
       skip_empty_lines: true,
       max_record_size: greatestCell,
       to: mostRecords,
-    }) as unknown as Parsed[];
+    });
   } catch (error) {
     if (error instanceof CsvError) throw new InvalidInput('file.not-csv', sentenceOf(error, text), { cause: error });
     throw error;
   }
 }
 
-function lineBreaksIn(cells: readonly string[]): number {
-  return cells.reduce((sum, cell) => sum + (cell.match(/\r\n|\n|\r/g)?.length ?? 0), 0);
+/** The line on which each record begins, in the order of the records: one may go on over several lines in quotation marks. */
+function beginningsOf(text: string): number[] {
+  const end = text.includes('\n') ? '\n' : '\r';
+  const beginnings: number[] = [];
+  let line = 0;
+  let isQuoted = false;
+  for (const part of text.split(end)) {
+    line += 1;
+    const isEmpty = part === '' || part === '\r';
+    if (!isQuoted && !isEmpty) beginnings.push(line);
+    if (part.split('"').length % 2 === 0) isQuoted = !isQuoted;
+  }
+  return beginnings;
 }
 
 /**
@@ -90,8 +104,9 @@ function lineBreaksIn(cells: readonly string[]): number {
 export function readCsvTable(bytes: Buffer, mostRows: number): CsvTable {
   const text = decodeText(bytes);
   const delimiter = delimiterOf(text);
+  const beginnings = beginningsOf(text);
   const records = parseAll(text, delimiter, mostRows + mostRemarks + 2)
-    .map(({ record, info }) => ({ line: info.lines - lineBreaksIn(record), cells: record }))
+    .map((cells, at) => ({ line: beginnings[at] ?? 0, cells }))
     .filter(({ cells }) => cells.some((cell) => cell.trim() !== ''));
   const headerAt = records.findIndex(({ cells }) => !isRemark(cells[0] ?? ''));
   const header = records[headerAt];
