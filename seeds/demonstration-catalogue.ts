@@ -221,11 +221,27 @@ export const challengePack: ItemFields = challengeDevice('PCD-01', 'Challenge pa
   note: 'Goes to the coldest place of the load',
 });
 
-/** Lays out a facility's catalogue: all items and the challenge pack, or only those with these codes. */
+/** The small one that is bought: it finds room beside a full load. */
+export const singleUseChallengeDevice: ItemFields = challengeDevice(
+  'PCD-02',
+  'Challenge device, single use',
+  [140, 80, 25],
+  0.08,
+  {
+    deviceIdentifier: null,
+    clearanceMm: mm(25),
+    service: 'Central sterile',
+    note: 'Goes to the coldest place of the load',
+  },
+);
+
+/** Lays out a facility's catalogue: all items and the challenge devices, or only those with these codes. */
 export async function seedCatalogue(
   trx: Knex.Transaction,
   { facilityId, codes }: { readonly facilityId: string; readonly codes?: readonly string[] },
 ): Promise<void> {
-  const items = [...demonstrationItems, challengePack].filter((item) => codes?.includes(item.code) ?? true);
+  const items = [...demonstrationItems, challengePack, singleUseChallengeDevice].filter(
+    (item) => codes?.includes(item.code) ?? true,
+  );
   await trx('items').insert(items.map((item) => ({ id: v7(), facility_id: facilityId, ...itemRowFrom(item) })));
 }
