@@ -3,7 +3,7 @@ import { Outlet } from 'react-router-dom';
 import { EmptyState } from '../components/ui/states';
 import { LinkButton } from '../components/ui/link-button';
 import { useSession } from '../lib/session';
-import { roleWords } from '../lib/role-words';
+import { roleWords } from '#domain/access/role-words';
 
 /** For an address that somebody typed or was sent: says that it is another role's. The server refuses in any case. */
 export function RequirePermission({ any }: { any: readonly Permission[] }) {

@@ -10,7 +10,7 @@ import { ChangePinDialog } from '../features/session/components/change-pin-dialo
 import { sentenceOf } from '../lib/errors';
 import { useSoundSwitch } from '../lib/sounds';
 import type { Place } from './places';
-import { roleWords } from '../lib/role-words';
+import { roleWords } from '#domain/access/role-words';
 
 type StationSheetProps = {
   isOpen: boolean;

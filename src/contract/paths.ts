@@ -10,6 +10,7 @@ export const paths = {
   people: '/api/people',
   peopleJoin: '/api/people/join',
   person: (personId: string) => `/api/people/${personId}`,
+  personBadge: (personId: string) => `/api/people/${personId}/badge`,
   items: '/api/items',
   itemsImport: '/api/items/import',
   programs: '/api/programs',

@@ -18,6 +18,7 @@ import { requirePasswordSignIn } from '../../http/session';
 import { addPerson, joinPerson } from './add-person';
 import { changePerson } from './change-person';
 import { listPeople } from './people-read-model';
+import { printBadge } from './print-badge';
 import { giveOneTimePassword, givePin } from './reset-secrets';
 
 const personParams = z.object({ personId: idSchema });
@@ -69,6 +70,14 @@ export const peopleRoutes: readonly Route[] = [
       requirePasswordSignIn(request);
       return changePerson(services, actor, params.personId, body);
     },
+  }),
+  defineRoute({
+    method: 'get',
+    path: paths.personBadge(':personId'),
+    permission: 'people.edit',
+    params: personParams,
+    response: 'file',
+    handle: ({ services, actor, params }) => printBadge(services, actor, params.personId),
   }),
   defineRoute({
     method: 'post',

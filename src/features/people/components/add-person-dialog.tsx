@@ -108,15 +108,18 @@ function NewPersonForm({ formId, onWaiting, onAdded }: FormProps) {
       onWaiting(false);
     }
   });
-  const name = register('displayName', {
-    onBlur: () => {
-      if (getValues('initials') === '') setValue('initials', initialsFor(getValues('displayName')));
-    },
-  });
   return (
     <form id={formId} onSubmit={submit} noValidate className="grid gap-5">
       <TextField label="Staff number" isCode error={errors.staffNumber?.message} {...register('staffNumber')} />
-      <TextField label="Name" error={errors.displayName?.message} {...name} />
+      <TextField
+        label="Name"
+        error={errors.displayName?.message}
+        {...register('displayName', {
+          onBlur: () => {
+            if (getValues('initials') === '') setValue('initials', initialsFor(getValues('displayName')));
+          },
+        })}
+      />
       <TextField
         label="Initials"
         hint="As they stand on labels and sheets."

@@ -3,7 +3,7 @@ import type { FieldValues, Path, UseFormRegisterReturn, UseFormSetError } from '
 import { SelectField } from '../../../components/ui/select-field';
 import { TextField } from '../../../components/ui/text-field';
 import { fieldNameOf, isProblem, sentenceOf } from '../../../lib/errors';
-import { roleWords } from '../../../lib/role-words';
+import { roleWords } from '#domain/access/role-words';
 
 type Registered = { readonly field: UseFormRegisterReturn; readonly error: string | undefined };
 

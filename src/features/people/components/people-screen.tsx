@@ -9,7 +9,7 @@ import { SearchField } from '../../../components/ui/search-field';
 import { SelectField } from '../../../components/ui/select-field';
 import { EmptyState, WaitingState, WrongState } from '../../../components/ui/states';
 import { countOf } from '../../../lib/format';
-import { roleWords } from '../../../lib/role-words';
+import { roleWords } from '#domain/access/role-words';
 import { useMay } from '../../../lib/session';
 import { useNow } from '../../../lib/use-now';
 import { isMeant, isOpen } from '../person-words';

@@ -3,7 +3,7 @@ import type { ReactNode } from 'react';
 import { Code } from '../../../components/ui/code';
 import { DataTable, type Column } from '../../../components/ui/data-table';
 import { useFacility } from '../../../lib/facility';
-import { roleWords } from '../../../lib/role-words';
+import { roleWords } from '#domain/access/role-words';
 import { useNow } from '../../../lib/use-now';
 import { badgeWords, signInWords } from '../person-words';
 

@@ -1,8 +1,10 @@
+import { paths } from '#contract/paths';
 import type { ChangePersonRequest, Person } from '#contract/people';
 import { useState } from 'react';
 import { useAnnounce } from '../../../components/ui/announcer';
 import { Button } from '../../../components/ui/button';
 import { ConfirmDialog, type ConfirmDialogProps } from '../../../components/ui/confirm-dialog';
+import { LinkButton } from '../../../components/ui/link-button';
 import { useChangePerson, useGiveOneTimePassword, useGivePin } from '../mutations';
 import { useRequestId } from '../use-request-id';
 import { ChangePersonDialog } from './change-person-dialog';
@@ -121,6 +123,9 @@ export function PersonActs({ person, isSelf, onShown }: PersonActsProps) {
       </Button>
       {person.hasBadge && (
         <>
+          <LinkButton kind="quiet" icon="print" isFile to={paths.personBadge(person.id)}>
+            Print the badge
+          </LinkButton>
           <Button kind="quiet" onPress={ask('pin')}>
             {person.hasPin ? 'Give a new PIN' : 'Give a PIN'}
           </Button>
@@ -134,7 +139,7 @@ export function PersonActs({ person, isSelf, onShown }: PersonActsProps) {
           Switch the sign-in on
         </Button>
       ) : (
-        <Button kind="stop" onPress={ask('switch-off')} blockedBecause={own}>
+        <Button kind="quiet" onPress={ask('switch-off')} blockedBecause={own}>
           Switch the sign-in off
         </Button>
       )}

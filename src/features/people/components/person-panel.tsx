@@ -3,9 +3,8 @@ import { useEffect, useRef, type ReactNode } from 'react';
 import { Button } from '../../../components/ui/button';
 import { Code } from '../../../components/ui/code';
 import { FilmPanel } from '../../../components/ui/film-panel';
-import { DateText } from '../../../components/ui/time';
 import { useFacility } from '../../../lib/facility';
-import { roleWords } from '../../../lib/role-words';
+import { roleWords } from '#domain/access/role-words';
 import { useMay, useSession } from '../../../lib/session';
 import { useNow } from '../../../lib/use-now';
 import { badgeWords, signInWords } from '../person-words';
@@ -31,7 +30,11 @@ export function PersonPanel({ person, onClose, onShown }: PersonPanelProps) {
   }, [person.id]);
 
   return (
-    <FilmPanel seal="left" label={person.displayName} className="self-start px-6 py-5 max-tablet:-mx-4">
+    <FilmPanel
+      seal="left"
+      label={person.displayName}
+      className="self-start px-6 py-5 max-tablet:-mx-4 tablet:sticky tablet:top-5 tablet:max-h-[calc(100dvh-2.5rem)] tablet:overflow-auto"
+    >
       <div className="flex items-start justify-between gap-3">
         <h2 ref={head} tabIndex={-1} className="text-say outline-none">
           {person.displayName}
@@ -49,11 +52,6 @@ export function PersonPanel({ person, onClose, onShown }: PersonPanelProps) {
         <Fact name="Role">{roleWords[person.role]}</Fact>
         <Fact name="Usual shift">{person.usualShift ?? 'Not set'}</Fact>
         <Fact name="Sign-in">{signInWords(person, { now, timeZone })}</Fact>
-        {person.expiresAt !== null && (
-          <Fact name="Ends">
-            <DateText at={person.expiresAt} form="with-time" />
-          </Fact>
-        )}
         <Fact name="Badge">
           {badgeWords(person)}
           {person.badgeCode !== null && (

@@ -1,5 +1,6 @@
-import type { Role } from '#domain/access/permissions';
+import type { Role } from './permissions';
 
+/** What people call each role, on screens and on badges. */
 export const roleWords: Readonly<Record<Role, string>> = {
   technician: 'Technician',
   lead: 'Lead',
