@@ -4,7 +4,7 @@ import { limitOf, type LoadPolicy } from './policy';
 import { otherPaper } from './rules/facing-groups';
 import { isUsableRack, misfitsOf } from './rules/holder-fit';
 import { clearanceOf } from './rules/near-pairs';
-import { slackMm } from './rules/rule';
+import { slackMm } from './rules/slack';
 
 /** Whether a pouch stands in this kind of holder at all: not too tall, long or thick for it. */
 export function fitsHolder(item: CatalogueItem, kind: HolderKind): boolean {

@@ -3,10 +3,11 @@
  * Source: the pouch's instructions for use, else the facility; that pouches stand apart is common practice without a distance.
  */
 import type { Body } from '../layout';
-import { elsewhere } from './moves';
+import { moveNamed } from './moves';
 import { clearanceBetween, clearanceMmOf, reachIntoEachOther } from './near-pairs';
 import { onPackage } from './places';
-import { slackMm, type Draft, type Rule } from './rule';
+import type { Draft, Rule } from './rule';
+import { slackMm } from './slack';
 import type { Scene } from './scene';
 import { generalPractice } from './sources';
 import { figureWords, sourceOf } from './words';
@@ -40,8 +41,8 @@ function find(scene: Scene): readonly Draft[] {
       figure,
       source: sourceOf(limit.limitFrom, askedBy.item, generalPractice),
       *fixes() {
-        yield* elsewhere(scene, { one: b.package, item: b.item, body: b });
-        yield* elsewhere(scene, { one: a.package, item: a.item, body: a });
+        yield* moveNamed(scene, b);
+        yield* moveNamed(scene, a);
       },
     };
   });

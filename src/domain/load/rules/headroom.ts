@@ -5,7 +5,8 @@
 import type { Body } from '../layout';
 import { elsewhere } from './moves';
 import { onHolder, onPackage } from './places';
-import { slackMm, type Draft, type Rule } from './rule';
+import type { Draft, Rule } from './rule';
+import { slackMm } from './slack';
 import type { Scene } from './scene';
 import { equipment } from './sources';
 import { figureWords } from './words';

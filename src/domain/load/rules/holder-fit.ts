@@ -2,7 +2,7 @@ import type { Figure } from '../finding';
 import type { HolderBody } from '../layout';
 import type { CatalogueItem, HolderKind } from '../model';
 import { isSensibleLength } from '../sensible';
-import { slackMm } from './rule';
+import { slackMm } from './slack';
 
 export type Misfit = { readonly what: 'tall' | 'long' | 'thick'; readonly figure: Figure };
 

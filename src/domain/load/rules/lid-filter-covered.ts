@@ -4,9 +4,10 @@
  */
 import { areaOf, commonRect, coveredArea } from '../../geometry/box';
 import { filterRects, type Body } from '../layout';
-import { elsewhere } from './moves';
+import { moveAll } from './moves';
 import { onPackage } from './places';
-import { slackMm, type Draft, type Rule } from './rule';
+import type { Draft, Rule } from './rule';
+import { slackMm } from './slack';
 import type { Scene } from './scene';
 import { commonPractice } from './sources';
 import { figureWords, listWords, sourceOf } from './words';
@@ -49,7 +50,6 @@ function draftOf(scene: Scene, container: Body, covering: readonly Body[], share
     want: 'at-most',
     limitFrom: 'ifu',
   } as const;
-  const [only] = covering;
   const verb = covering.length === 1 ? 'covers' : 'cover';
   const names = listWords(covering.map((body) => scene.nameOf(body.package)));
   return {
@@ -59,7 +59,6 @@ function draftOf(scene: Scene, container: Body, covering: readonly Body[], share
     places: onPackage(container, ...covering),
     figure,
     ...(container.item.ifuReference === null ? {} : { source: sourceOf('ifu', container.item, commonPractice) }),
-    fixes: () =>
-      only && covering.length === 1 ? elsewhere(scene, { one: only.package, item: only.item, body: only }) : [],
+    fixes: () => moveAll(scene, covering),
   };
 }

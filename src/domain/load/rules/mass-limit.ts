@@ -1,5 +1,5 @@
 import type { Draft } from './rule';
-import { slackKg } from './rule';
+import { slackKg } from './slack';
 import { figureWords, sentence } from './words';
 import { houseRule } from './sources';
 

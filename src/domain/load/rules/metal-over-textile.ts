@@ -2,7 +2,7 @@
  * Metal is below textiles: nothing metal stands on a textile pack or above it on a higher shelf.
  * Source: general practice, several manuals (textiles above metal); a sterilizer instruction sheet asks the same.
  */
-import { elsewhere } from './moves';
+import { moveAll, moveNamed } from './moves';
 import { isMetalOver } from './metal';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
@@ -26,8 +26,7 @@ function find(scene: Scene): readonly Draft[] {
     .filter((body) => body.item.kind === 'textile-pack')
     .flatMap((textile) => {
       const metal = bodies.filter((body) => body !== textile && isMetalOver(body, textile, scene.policy));
-      const [only] = metal;
-      if (!only) return [];
+      if (metal.length === 0) return [];
       const names = listWords(metal.map((body) => scene.nameOf(body.package)));
       return {
         subjects: [textile.packageId, ...metal.map((body) => body.packageId)],
@@ -35,8 +34,8 @@ function find(scene: Scene): readonly Draft[] {
         remedy: 'Put the textile pack above the metal, or the metal where nothing textile is under it.',
         places: onPackage(textile, ...metal),
         *fixes() {
-          if (metal.length === 1) yield* elsewhere(scene, { one: only.package, item: only.item, body: only });
-          yield* elsewhere(scene, { one: textile.package, item: textile.item, body: textile });
+          yield* moveNamed(scene, textile);
+          yield* moveAll(scene, metal);
         },
       };
     });

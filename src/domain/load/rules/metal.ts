@@ -3,7 +3,7 @@ import { mm } from '../../units/quantity';
 import type { Body } from '../layout';
 import { limitOf, type LoadPolicy } from '../policy';
 import { massOrNothing } from '../sensible';
-import { slackKg, slackMm } from './rule';
+import { slackKg, slackMm } from './slack';
 
 /** Whether a thing holds enough metal for its water to matter to textiles below it. */
 export function hasMetal(body: Body, policy: LoadPolicy): boolean {

@@ -1,14 +1,16 @@
 import type { Millimetre } from '../../units/quantity';
 import { placementWords, placeWords, poseWords } from '../describe-place';
-import type { Fix } from '../finding';
+import { applyEdit } from '../apply-edit';
+import type { Fix, LoadEdit } from '../finding';
 import { layOut, type Body } from '../layout';
 import type { CatalogueItem, LoadHolder, LoadPackage, PaperSide, Placement, Pose } from '../model';
 import { placeCandidates } from '../place-candidates';
 import { otherPaper } from './facing-groups';
-import type { Listed, Scene } from './scene';
+import { sceneOf, type Listed, type Scene } from './scene';
 
 /** More tries than this are not worth the wait: whoever needs a better plan moves the thing by hand. */
 const mostTries = 8;
+const mostTogether = 12;
 
 /** A package that has its catalogue entry. */
 export type Known = Pick<Listed, 'one' | 'body'> & { readonly item: CatalogueItem };
@@ -38,10 +40,41 @@ export function* setPose(scene: Scene, known: Known, pose: Pose): Iterable<Fix> 
   yield* moves(scene, { ...known, item: { ...known.item, pose } }, (words) => `${label}: ${words}`);
 }
 
-/** Wherever a thing of its kind belongs: a pouch into a free slot of a holder that takes it, anything else to a free spot. */
-export function elsewhere(scene: Scene, known: Known): Iterable<Fix> {
-  const isPouch = known.item.kind === 'pouch';
-  return moves(scene, known, (words) => (isPouch ? `Stand it in ${words}` : `Move it to ${words}`));
+/**
+ * Wherever a thing of its kind belongs: a pouch into a free slot of a holder that takes it, anything else to a free spot.
+ * @param name where the finding is about several things, which of them the move is for.
+ */
+export function elsewhere(scene: Scene, known: Known, name = 'it'): Iterable<Fix> {
+  const verb = known.item.kind === 'pouch' ? `Stand ${name} in` : `Move ${name} to`;
+  return moves(scene, known, (words) => `${verb} ${words}`);
+}
+
+/** The same for something that has its place already, by its name. */
+export function moveNamed(scene: Scene, body: Body): Iterable<Fix> {
+  return elsewhere(scene, { one: body.package, item: body.item, body }, scene.nameOf(body.package));
+}
+
+/** Several things, one after the other, each to the first place that is left. One alone has more places tried. */
+export function* moveAll(scene: Scene, bodies: readonly Body[]): Iterable<Fix> {
+  const [first] = bodies;
+  if (!first || bodies.length > mostTogether) return;
+  if (bodies.length === 1) {
+    yield* moveNamed(scene, first);
+    return;
+  }
+  const edits: LoadEdit[] = [];
+  let { view } = scene;
+  for (const body of bodies) {
+    const { package: one, item } = body;
+    const [placement] = placesFor(sceneOf(view, scene.policy), { one, item, body });
+    if (!placement) return;
+    const edit = { edit: 'place', packageId: one.packageId, placement } as const;
+    const changed = applyEdit(view, edit);
+    if (!changed.ok) return;
+    edits.push(edit);
+    view = changed.value;
+  }
+  yield { label: `Give all ${bodies.length} a place of their own`, edits };
 }
 
 function* moves(scene: Scene, { one, item, body }: Known, label: (words: string) => string): Iterable<Fix> {

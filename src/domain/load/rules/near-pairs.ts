@@ -1,7 +1,7 @@
 import { gapAcross, gapAlong, gapUpward } from '../../geometry/box';
 import type { Body, Layout } from '../layout';
 import { limitOf, type Limit, type LoadPolicy } from '../policy';
-import { slackMm } from './rule';
+import { slackMm } from './slack';
 
 /** Two things that share some of their height on one shelf. Gaps below zero say how far they reach into each other. */
 export type NearPair = {

@@ -4,10 +4,11 @@
  */
 import { gapAcross, gapAlong, gapUpward, type ShelfBox } from '../../geometry/box';
 import type { HolderBody } from '../layout';
-import { elsewhere } from './moves';
+import { moveNamed } from './moves';
 import { reachIntoEachOther } from './near-pairs';
 import { onHolder, onPackage } from './places';
-import { slackMm, type Draft, type Rule } from './rule';
+import type { Draft, Rule } from './rule';
+import { slackMm } from './slack';
 import type { Scene } from './scene';
 import { drawing } from './sources';
 import { figureWords } from './words';
@@ -32,8 +33,8 @@ function ofPackages(scene: Scene): readonly Draft[] {
     ...told(`${scene.thing(b)} reaches ${depthWords(a.box, b.box)} into ${scene.thing(a)}`, a.box, b.box),
     places: onPackage(b, a),
     *fixes() {
-      yield* elsewhere(scene, { one: b.package, item: b.item, body: b });
-      yield* elsewhere(scene, { one: a.package, item: a.item, body: a });
+      yield* moveNamed(scene, b);
+      yield* moveNamed(scene, a);
     },
   }));
 }
@@ -54,7 +55,7 @@ function withHolders(scene: Scene): readonly Draft[] {
             box,
           ),
           places: [...onPackage(body), onHolder(holder)],
-          fixes: () => elsewhere(scene, { one: body.package, item: body.item, body }),
+          fixes: () => moveNamed(scene, body),
         })),
     ),
   );

@@ -5,10 +5,11 @@
 import { planDistance } from '../../geometry/box';
 import type { FindingPlace } from '../finding';
 import type { Body } from '../layout';
-import { elsewhere } from './moves';
+import { moveNamed } from './moves';
 import { clearanceBetween, clearanceMmOf, reachIntoEachOther } from './near-pairs';
 import { onHolder } from './places';
-import { slackMm, type Draft, type Rule } from './rule';
+import type { Draft, Rule } from './rule';
+import { slackMm } from './slack';
 import type { Scene } from './scene';
 import { generalPractice } from './sources';
 import { figureWords, sourceOf } from './words';
@@ -74,7 +75,7 @@ function draftOf(scene: Scene, { a, b, measured, limit: { askedBy, ...limit } }:
     source: sourceOf(limit.limitFrom, askedBy.item, generalPractice),
     *fixes() {
       for (const body of [b, a]) {
-        if (!body.holder) yield* elsewhere(scene, { one: body.package, item: body.item, body });
+        if (!body.holder) yield* moveNamed(scene, body);
       }
     },
   };

@@ -6,7 +6,8 @@
 import { limitOf } from '../policy';
 import { takeOff } from './moves';
 import { onPackage } from './places';
-import { slackKg, type Draft, type Rule } from './rule';
+import type { Draft, Rule } from './rule';
+import { slackKg } from './slack';
 import type { Scene } from './scene';
 import { figureWords, sourceOf } from './words';
 

@@ -7,7 +7,8 @@ import { mm } from '../../units/quantity';
 import type { Shelf } from '../model';
 import { elsewhere, moveHolder } from './moves';
 import { onHolder, onPackage } from './places';
-import { slackMm, type Draft, type Rule } from './rule';
+import type { Draft, Rule } from './rule';
+import { slackMm } from './slack';
 import type { Scene } from './scene';
 import { generalPractice } from './sources';
 import { figureWords } from './words';
@@ -23,7 +24,7 @@ export const shelfEdge: Rule = {
 };
 
 /** How far a thing hangs over the edge of its shelf, in mm, at the side where it does most. */
-export function overhangOf(box: ShelfBox, shelf: Shelf): number {
+function overhangOf(box: ShelfBox, shelf: Shelf): number {
   return Math.max(0 - box.left, box.right - shelf.widthMm, 0 - box.front, box.back - shelf.depthMm, 0);
 }
 

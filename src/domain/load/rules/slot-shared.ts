@@ -3,7 +3,7 @@
  * Source: CDC guideline (2008), loading, as restated: pouches stand apart; no stacking of pouches is general practice.
  */
 import type { Body } from '../layout';
-import { elsewhere } from './moves';
+import { moveNamed } from './moves';
 import { onHolder, onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import type { Scene } from './scene';
@@ -44,7 +44,7 @@ function find(scene: Scene): readonly Draft[] {
       *fixes() {
         if (inSlot.length > 2) return;
         for (const body of [...inSlot].reverse()) {
-          yield* elsewhere(scene, { one: body.package, item: body.item, body });
+          yield* moveNamed(scene, body);
         }
       },
     };

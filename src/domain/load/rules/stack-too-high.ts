@@ -5,7 +5,8 @@
 import type { Body } from '../layout';
 import { elsewhere } from './moves';
 import { onPackage } from './places';
-import { slackMm, type Draft, type Rule } from './rule';
+import type { Draft, Rule } from './rule';
+import { slackMm } from './slack';
 import type { Scene } from './scene';
 import { instructions } from './sources';
 import { figureWords, sourceOf } from './words';

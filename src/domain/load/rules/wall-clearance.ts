@@ -7,9 +7,9 @@ import type { Body } from '../layout';
 import { limitOf } from '../policy';
 import { elsewhere, moveHolder } from './moves';
 import { onHolder, onPackage } from './places';
-import { slackMm, type Draft, type Rule } from './rule';
+import type { Draft, Rule } from './rule';
+import { slackMm } from './slack';
 import type { Scene } from './scene';
-import { overhangOf } from './shelf-edge';
 import { generalPractice } from './sources';
 import { figureWords } from './words';
 
@@ -29,8 +29,6 @@ function find(scene: Scene): readonly Draft[] {
   const limit = limitOf(null, scene.policy, 'wallClearanceMm');
   const nearest = new Map<string, { body: Body; wall: Wall }>();
   for (const body of scene.layout.bodies) {
-    // Over the edge of the shelf is told as that.
-    if (overhangOf(body.box, body.shelf) > slackMm) continue;
     const wall = nearestWall(scene, body);
     if (wall.measured >= limit.limit - slackMm) continue;
     const unit = body.holder?.holder.holderId ?? body.packageId;
