@@ -20,7 +20,7 @@ import { dropLease, hasOtherLease, takeLease } from './leases';
 import { findFreePort, isPortFree } from './ports';
 import { ensurePostgresPrograms, findPostgresPrograms } from './postgres-programs';
 import { findPostmaster, readPostmaster, type Postmaster } from './postmaster';
-import { processName } from './processes';
+import { isRunning } from './processes';
 import { Refusal } from './refusal.mjs';
 import { identityOf } from './users';
 
@@ -46,7 +46,7 @@ export async function holdCluster(folder: string, elsewhere: string): Promise<Cl
   return exclusively(folder, purpose, async () => {
     ensurePostgresPrograms();
     const home = chooseClusterHome(folder, elsewhere);
-    if (!existsSync(path.join(home.data, 'PG_VERSION'))) makeData(home);
+    if (!existsSync(home.data)) makeData(home);
     const { port } = (await settle(home)) ?? (await start(home));
     takeLease(home.leases);
     home.handOver(home.leases);
@@ -70,7 +70,7 @@ function makeData(home: ClusterHome): void {
   const unfinished = `${home.data}.unfinished`;
   const passwordForInitdb = path.join(home.folder, 'password-for-initdb');
   const password = randomBytes(24).toString('base64url');
-  for (const remains of [home.data, unfinished, passwordForInitdb]) rmSync(remains, { recursive: true, force: true });
+  for (const remains of [unfinished, passwordForInitdb]) rmSync(remains, { recursive: true, force: true });
   mkdirSync(unfinished, { mode: 0o700 });
   writeFileSync(passwordForInitdb, password, { mode: 0o600 });
   if (home.serverUser !== undefined) {
@@ -187,13 +187,20 @@ async function stop(home: ClusterHome): Promise<void> {
  */
 function clearForeignProcessId(home: ClusterHome): void {
   const written = readPostmaster(home.data);
-  if (written !== undefined && processName(written.pid) !== undefined) {
+  if (written !== undefined && isRunning(written.pid)) {
     rmSync(path.join(home.data, 'postmaster.pid'), { force: true });
   }
 }
 
 function programsFor(home: ClusterHome): string {
-  const version = readFileSync(path.join(home.data, 'PG_VERSION'), 'utf8').trim();
+  const versionFile = path.join(home.data, 'PG_VERSION');
+  if (!existsSync(versionFile)) {
+    throw new Refusal(
+      `The database in ${home.data} is damaged: its file PG_VERSION is missing. Bring the folder back from a copy, or ` +
+        'remove it and the data in it to begin anew.',
+    );
+  }
+  const version = readFileSync(versionFile, 'utf8').trim();
   const programs = findPostgresPrograms(version);
   if (programs !== undefined) return programs;
   throw new Refusal(

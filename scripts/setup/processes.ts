@@ -1,24 +1,30 @@
 import { readFileSync, readlinkSync } from 'node:fs';
 
-/** When a process began, in clock ticks since boot; with the id it names one process for good. */
-export function processStart(pid: number): string | undefined {
+/** Fields of proc(5)'s stat from the third on; the second, the name, may itself hold blanks and brackets. */
+function readStat(pid: number): string[] | undefined {
   try {
     const stat = readFileSync(`/proc/${pid}/stat`, 'utf8');
-    // Field 22 of proc(5); the name in field 2 may hold blanks and brackets, so count from its last bracket.
-    return stat.slice(stat.lastIndexOf(')') + 2).split(' ')[19];
+    const fields = stat.slice(stat.lastIndexOf(')') + 2).split(' ');
+    // Ended, and only waiting for its parent to ask how.
+    return fields[0] === 'Z' || fields[0] === 'X' ? undefined : fields;
   } catch {
     return undefined;
   }
 }
 
+export function isRunning(pid: number): boolean {
+  return readStat(pid) !== undefined;
+}
+
+/** When a process began, in clock ticks since boot; with the id it names one process for good. */
+export function processStart(pid: number): string | undefined {
+  return readStat(pid)?.[19];
+}
+
 /** Id of the process that started this one; changes when that one ends. */
 export function processParent(pid: number): number | undefined {
-  try {
-    const stat = readFileSync(`/proc/${pid}/stat`, 'utf8');
-    return Number(stat.slice(stat.lastIndexOf(')') + 2).split(' ')[1]);
-  } catch {
-    return undefined;
-  }
+  const parent = readStat(pid)?.[1];
+  return parent === undefined ? undefined : Number(parent);
 }
 
 export function processName(pid: number): string | undefined {

@@ -1,0 +1,77 @@
+import { execFileSync } from 'node:child_process';
+import { existsSync, readFileSync } from 'node:fs';
+import path from 'node:path';
+import { describe, expect, it } from 'vitest';
+
+const top = path.resolve(import.meta.dirname, '../..');
+
+/** What git keeps, with what is new and not yet kept: what lies in ignored folders is this machine's own. */
+const files = execFileSync('git', ['ls-files', '--cached', '--others', '--exclude-standard'], {
+  cwd: top,
+  encoding: 'utf8',
+})
+  .split('\n')
+  .filter((file) => file !== '' && existsSync(path.join(top, file)));
+
+const allowedFolders = ['.ci', '.github', 'migrations', 'public', 'scripts', 'seeds', 'server', 'src', 'tests'];
+
+/** Each lies where the tool or the reader it is for looks for it. */
+const allowedFiles = [
+  ...['.dependency-cruiser.cjs', '.editorconfig', '.env.example', '.gitignore', '.npmrc', '.nvmrc'],
+  ...['.prettierignore', '.prettierrc', 'DEVELOPERS.md', 'LICENSE', 'README.md', 'eslint.config.js', 'index.html'],
+  ...['knexfile.ts', 'knip.json', 'package-lock.json', 'package.json', 'postcss.config.js', 'tailwind.config.ts'],
+  ...['tsconfig.json', 'vite.config.ts'],
+];
+
+function isText(file: string): boolean {
+  return !/\.(png|jpg|pdf|woff2|ico|wav|mp3|ttf)$/.test(file);
+}
+
+function read(file: string): string {
+  return readFileSync(path.join(top, file), 'utf8');
+}
+
+describe('the checkout', () => {
+  it('holds nothing at the top but what belongs there', () => {
+    const names = new Set(files.map((file) => file.split('/')[0] ?? ''));
+    expect(names.size).toBeGreaterThan(10);
+    expect([...names].filter((name) => ![...allowedFolders, ...allowedFiles].includes(name))).toEqual([]);
+  });
+
+  it('names files in kebab-case', () => {
+    const named = files.filter((file) => /^(src|server|seeds|scripts|tests)\/.*\.(ts|tsx|mjs)$/.test(file));
+    const odd = named.filter(
+      (file) => !/^[a-z0-9]+(-[a-z0-9]+)*(\.(routes|test))?\.(ts|tsx|mjs)$/.test(path.basename(file)),
+    );
+    expect(named.length).toBeGreaterThan(100);
+    expect(odd).toEqual([]);
+  });
+
+  it('names no path of one machine', () => {
+    // Put together here, or this file would find itself.
+    const machinePaths = new RegExp(['/wo' + 'rk/', '/ho' + 'me/[a-z]', '/ro' + 'ot/[a-z.]', '/Us' + 'ers/'].join('|'));
+    expect(files.filter(isText).filter((file) => machinePaths.test(read(file)))).toEqual([]);
+  });
+
+  it('pins packages by version and checksum, not by the host they came from', () => {
+    const lock = read('package-lock.json');
+    expect(lock).toContain('"integrity"');
+    expect(lock).not.toContain('"resolved"');
+    const settings = [read('package.json'), read('.npmrc')].join('\n');
+    expect(settings).not.toMatch(/registry\s*=|https?:\/\//);
+  });
+
+  it('has every path that its guide for developers names', () => {
+    const named = listNamedPaths(read('DEVELOPERS.md'));
+    expect(named.length).toBeGreaterThan(10);
+    expect(named.filter((place) => !existsSync(path.join(top, place)))).toEqual([]);
+  });
+});
+
+/** What stands between backticks and begins with one of our folders; a pattern with * or <name> is no path. */
+function listNamedPaths(text: string): string[] {
+  const starts = new RegExp(`^(${allowedFolders.map((name) => name.replace('.', '\\.')).join('|')})/`);
+  return [...text.matchAll(/`([^`\s]+)`/g)]
+    .map((match) => match[1] ?? '')
+    .filter((place) => starts.test(place) && !/[*<>{}]/.test(place));
+}
