@@ -10,6 +10,7 @@ import {
 } from '#contract/people';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { api } from '../../lib/api-client';
+import { isProblem } from '../../lib/errors';
 
 /** Once a person was changed, every screen that names them is asked for again; the change counts as done only then. */
 function usePeopleChanged() {
@@ -39,6 +40,10 @@ export function useChangePerson(personId: string) {
   return useMutation({
     mutationFn: (request: ChangePersonRequest) => api.patch(paths.person(personId), request, personResponseSchema),
     onSuccess: changed,
+    onError: (error) => {
+      // The screen behind shows what there is to look at again.
+      if (isProblem(error, 'people.changed-meanwhile')) void changed();
+    },
   });
 }
 

@@ -151,3 +151,25 @@ test('refuses extra and missing fields', async () => {
     await administrator.post(`/api/people/${anId()}/${act}`).send({ requestId: anId() }).expect(404);
   }
 });
+
+describe('a printed badge', () => {
+  test('is a PDF for who gives badges out, and never kept by a browser', async () => {
+    const person = await aTechnician();
+    const reply = await (await app.as('administrator')).get(`/api/people/${person.id}/badge`).expect(200);
+    expect(reply.type).toBe('application/pdf');
+    expect(reply.headers['cache-control']).toBe('no-store');
+    expect((reply.body as Buffer).subarray(0, 5).toString()).toBe('%PDF-');
+  });
+
+  test('is nobody else’s to have', async () => {
+    const person = await aTechnician();
+    for (const role of ['technician', 'lead', 'supervisor', 'surveyor'] as const) {
+      await (await app.as(role)).get(`/api/people/${person.id}/badge`).expect(403);
+    }
+    const foreign = await (await app.as('administrator', 'B')).get(`/api/people/${person.id}/badge`).expect(404);
+    expect(foreign.body).toMatchObject({ code: 'people.none' });
+    await app.db('people').where({ id: person.id }).update({ badge_code: null });
+    const none = await (await app.as('administrator')).get(`/api/people/${person.id}/badge`).expect(404);
+    expect(none.body).toMatchObject({ code: 'people.no-badge' });
+  });
+});

@@ -1,6 +1,6 @@
 import type { Person } from '#contract/people';
 import { zodResolver } from '@hookform/resolvers/zod';
-import { useId } from 'react';
+import { useId, useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { useAnnounce } from '../../../components/ui/announcer';
 import { Button } from '../../../components/ui/button';
@@ -21,7 +21,9 @@ export function ChangePersonDialog(props: ChangePersonDialogProps) {
 
 const names = ['displayName', 'initials', 'role', 'usualShift', 'expiresAt'] as const;
 
-function OpenChangePersonDialog({ person, onClose }: ChangePersonDialogProps) {
+function OpenChangePersonDialog({ person: current, onClose }: ChangePersonDialogProps) {
+  // As it was when it was opened: what somebody else changes meanwhile must not be taken for one's own change.
+  const [person] = useState(current);
   const formId = useId();
   const announce = useAnnounce();
   const { name: facilityName, timeZone } = useFacility();

@@ -35,7 +35,7 @@ export function PeopleScreen() {
   const now = useNow();
   const [isAdding, setIsAdding] = useState(false);
   const [shown, setShown] = useState<ShownOnce | null>(null);
-  const { search, role, personId, setSearch, setRole, setPersonId } = usePeopleAddress();
+  const { search, role, personId, setSearch, setRole, setPersonId, showEverybody } = usePeopleAddress();
   const rowBefore = useRef<HTMLElement | null>(null);
 
   useEffect(() => {
@@ -115,14 +115,7 @@ export function PeopleScreen() {
               <EmptyState
                 title="Nobody like that here"
                 act={
-                  <Button
-                    size="small"
-                    kind="quiet"
-                    onPress={() => {
-                      setSearch('');
-                      setRole(null);
-                    }}
-                  >
+                  <Button size="small" kind="quiet" onPress={showEverybody}>
                     Show everybody
                   </Button>
                 }
@@ -161,31 +154,41 @@ export function PeopleScreen() {
   );
 }
 
+/** The address keeps all three, so that a page loaded again shows the same. */
 function usePeopleAddress() {
   const [params, setParams] = useSearchParams();
-  function set(name: string, value: string | null) {
+  // The router takes its time; a field that waited for it would lose letters.
+  const [search, setSearch] = useState(params.get('search') ?? '');
+  function write(changes: Readonly<Record<string, string | null>>) {
     setParams(
       (before) => {
         const next = new URLSearchParams(before);
-        if (value === null || value === '') next.delete(name);
-        else next.set(name, value);
+        for (const [name, value] of Object.entries(changes)) {
+          if (value === null || value === '') next.delete(name);
+          else next.set(name, value);
+        }
         return next;
       },
       { replace: true },
     );
   }
   return {
-    search: params.get('search') ?? '',
+    search,
     role: roleOf(params.get('role')),
     personId: params.get('person'),
     setSearch: (text: string) => {
-      set('search', text);
+      setSearch(text);
+      write({ search: text });
     },
     setRole: (role: Role | null) => {
-      set('role', role);
+      write({ role });
     },
     setPersonId: (id: string | null) => {
-      set('person', id);
+      write({ person: id });
+    },
+    showEverybody: () => {
+      setSearch('');
+      write({ search: null, role: null });
     },
   };
 }
