@@ -298,8 +298,11 @@ export const policyParameters: readonly PolicyParameter[] = [
 
 export type Limit = { readonly limit: number; readonly limitFrom: Figure['limitFrom'] };
 
-/** The limit that holds: of the item's instructions for use where they say something, else of the facility, else the default. */
+/**
+ * The limit that holds: of the item's instructions for use where they say something, else of the facility, else the default.
+ * Instructions that say something that cannot be (no number, less than nothing) say nothing.
+ */
 export function limitOf(ifu: number | null, policy: LoadPolicy, id: QuantityId): Limit {
-  if (ifu !== null) return { limit: ifu, limitFrom: 'ifu' };
+  if (ifu !== null && ifu >= 0) return { limit: ifu, limitFrom: 'ifu' };
   return { limit: policy[id], limitFrom: policy[id] === defaultPolicy[id] ? 'default' : 'house-rule' };
 }

@@ -2,6 +2,8 @@
  * Every holder on the cart is one whose kind is known, on a shelf of this cart, with slots if it is a rack.
  * Source: our own check of the equipment as entered.
  */
+import type { HolderKind } from '../model';
+import { isSensibleLength } from '../sensible';
 import { isUsableRack } from './holder-fit';
 import { onHolder } from './places';
 import type { Draft, Rule } from './rule';
@@ -31,7 +33,7 @@ function find(scene: Scene): readonly Draft[] {
         ? 'is on a shelf of another cart'
         : kind.form === 'rack' && !isUsableRack(kind)
           ? 'has no slots or no pitch entered'
-          : needsFrame && !scene.layout.holderOf.has(holder.holderId)
+          : needsFrame && (!scene.layout.holderOf.has(holder.holderId) || !takesSomething(kind))
             ? 'has a size or a place that makes no sense'
             : null;
     if (says === null) return [];
@@ -45,4 +47,9 @@ function find(scene: Scene): readonly Draft[] {
       ],
     };
   });
+}
+
+function takesSomething({ greatestHeightMm, greatestLengthMm, greatestThicknessMm }: HolderKind): boolean {
+  const limits = [greatestHeightMm, greatestLengthMm, greatestThicknessMm];
+  return limits.every((limit) => limit === null || isSensibleLength(limit));
 }

@@ -17,8 +17,7 @@ const greatestPairs = 20_000;
 /** The free space a thing asks for around itself. */
 export function clearanceOf(body: Body, policy: LoadPolicy): Limit {
   const { clearanceMm, kind } = body.item;
-  const ifu = clearanceMm !== null && clearanceMm >= 0 ? clearanceMm : null;
-  return limitOf(ifu, policy, kind === 'pouch' ? 'pouchGapMm' : 'packageClearanceMm');
+  return limitOf(clearanceMm, policy, kind === 'pouch' ? 'pouchGapMm' : 'packageClearanceMm');
 }
 
 /** The same as a bare number, for the many pairs that keep it. */
