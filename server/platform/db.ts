@@ -15,9 +15,17 @@ export type Db = Knex;
 export type Transaction = Knex.Transaction;
 
 export function openDb(url: string, largestPool = 10): Db {
+  const connection = {
+    connectionString: url,
+    application_name: 'paperside',
+    statement_timeout: 15_000,
+    // Knex's types do not know this setting of pg. What is asked together goes out together: a transaction's reads then
+    // wait for the database once, not one by one.
+    pipeline: true,
+  };
   return knexModule({
     client: 'pg',
-    connection: { connectionString: url, application_name: 'paperside', statement_timeout: 15_000 },
+    connection,
     pool: { min: 0, max: largestPool },
     acquireConnectionTimeout: 10_000,
   });

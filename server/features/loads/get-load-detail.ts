@@ -12,13 +12,16 @@ export async function getLoadDetail(services: Services, actor: Actor, loadId: st
   return services.db.transaction(
     async (trx) => {
       const load = await getLoad(trx, actor.facilityId, loadId);
-      const known = await readLoadView(trx, load, services.clock.now());
-      const summary = await findLoadSummary(trx, actor.facilityId, loadId);
+      const [known, summary, stickers, undoable] = await Promise.all([
+        readLoadView(trx, load, services.clock.now()),
+        findLoadSummary(trx, actor.facilityId, loadId),
+        trx('load_stickers')
+          .where({ load_id: load.id })
+          .whereNull('voided_at')
+          .select<{ id: string; package_id: string; copy: number }[]>('id', 'package_id', 'copy'),
+        load.state === 'building' ? getUndoable(trx, load.id) : null,
+      ]);
       if (!summary) throw new NotFound('load.none', 'There is no such load here.');
-      const stickers = await trx('load_stickers')
-        .where({ load_id: load.id })
-        .whereNull('voided_at')
-        .select<{ id: string; package_id: string; copy: number }[]>('id', 'package_id', 'copy');
       return {
         summary,
         view: known.view,
@@ -26,7 +29,7 @@ export async function getLoadDetail(services: Services, actor: Actor, loadId: st
         policyNumber: known.policyNumber,
         counts: [...known.counts],
         acceptances: [...known.acceptances],
-        undoable: load.state === 'building' ? ((await getUndoable(trx, load.id))?.words ?? null) : null,
+        undoable: undoable?.words ?? null,
         stickers: stickers.map((row) => ({ packageId: row.package_id, stickerId: row.id, copy: row.copy })),
         closing:
           load.contents_digest !== null && load.rule_set !== null

@@ -8,7 +8,7 @@ import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import type { Transaction } from '../../platform/db';
 import { RuleRefused } from '../../platform/errors';
-import { getUndoable } from './undoable-read-model';
+import { getUndoable, isUndoable, undoWords } from './undoable-read-model';
 import type { LoadAsKnown } from './load-view-read-model';
 import { listAcceptances, listCounts, stepVersion, voidCounts, writeDifference, type LoadRow } from './load-store';
 
@@ -41,25 +41,37 @@ export async function recordAct<Kind extends ActKind>(
   const { load, view } = known;
   const difference = differenceOf(view, after);
   if (isEmptyDifference(difference)) return changeFrom(trx, load, load.version, after, difference);
-  await writeDifference(trx, load.id, difference, {
-    personId: act.actor.personId,
-    at: act.at,
-    entry: act.entry ?? 'keyed',
-  });
-  await voidCounts(trx, load.id, affectedShelves(view, after));
   const { kind, payload } = tell(difference);
-  await appendEvent(trx, {
-    kind,
-    at: act.at,
-    facilityId: load.facility_id,
-    actorId: act.actor.personId,
-    subjectKind: 'load',
-    subjectId: load.id,
-    loadId: load.id,
-    requestId: act.requestId,
-    payload,
-  });
-  return changeFrom(trx, load, await stepVersion(trx, load), after, difference);
+  const scanning = { personId: act.actor.personId, at: act.at, entry: act.entry ?? 'keyed' };
+  const isVoid = new Set(affectedShelves(view, after));
+  const voided = known.counts.filter((count) => isVoid.has(count.shelfId));
+  const [version] = await Promise.all([
+    stepVersion(trx, load),
+    writeDifference(trx, load.id, difference, scanning),
+    voidCounts(
+      trx,
+      load.id,
+      voided.map((count) => count.shelfId),
+    ),
+    appendEvent(trx, {
+      kind,
+      at: act.at,
+      facilityId: load.facility_id,
+      actorId: act.actor.personId,
+      subjectKind: 'load',
+      subjectId: load.id,
+      loadId: load.id,
+      requestId: act.requestId,
+      payload,
+    }),
+  ]);
+  return {
+    ...partsOf(load, version, after, difference),
+    counts: known.counts.filter((count) => !isVoid.has(count.shelfId)),
+    acceptances: [...known.acceptances],
+    // An act that was taken back uncovers the one before it; any other is itself the last.
+    undoable: isUndoable(kind) ? undoWords(kind, payload) : ((await getUndoable(trx, load.id))?.words ?? null),
+  };
 }
 
 /** The part of a load that changed, for whoever holds the version before. */
@@ -70,20 +82,30 @@ export async function changeFrom(
   after: LoadView,
   difference: LoadDifference,
 ): Promise<LoadChange> {
-  const changed = difference.packages.flatMap((change) => (change.after ? [change.after] : []));
+  const [counts, acceptances, undoable] = await Promise.all([
+    listCounts(trx, load.id),
+    listAcceptances(trx, load.id),
+    getUndoable(trx, load.id),
+  ]);
+  return { ...partsOf(load, version, after, difference), counts, acceptances, undoable: undoable?.words ?? null };
+}
+
+function partsOf(
+  load: LoadRow,
+  version: number,
+  after: LoadView,
+  difference: LoadDifference,
+): Omit<LoadChange, 'counts' | 'acceptances' | 'undoable'> {
   const newItemIds = new Set(
     difference.packages.flatMap((change) => (change.before === null && change.after ? [change.after.itemId] : [])),
   );
   return {
     from: load.version,
     version,
-    packages: changed,
+    packages: difference.packages.flatMap((change) => (change.after ? [change.after] : [])),
     removedPackageIds: difference.packages.flatMap((change) => (change.after === null ? [change.id] : [])),
     items: after.items.filter((item) => newItemIds.has(item.id)),
     holders: [...after.holders],
     program: after.program,
-    counts: await listCounts(trx, load.id),
-    acceptances: await listAcceptances(trx, load.id),
-    undoable: (await getUndoable(trx, load.id))?.words ?? null,
   };
 }

@@ -212,6 +212,54 @@ async function removePackage(trx: Transaction, loadId: string, packageId: string
     .update({ voided_at: scanning.at, voided_by: scanning.personId, void_reason: 'Taken off the load' });
 }
 
+async function writePackage(
+  trx: Transaction,
+  loadId: string,
+  { id, before, after }: LoadDifference['packages'][number],
+  scanning: Scanning,
+): Promise<void> {
+  if (after === null) {
+    await removePackage(trx, loadId, id, scanning);
+    return;
+  }
+  const becomesScanned = after.isScanned && before?.isScanned !== true;
+  const becomesUnscanned = !after.isScanned && before?.isScanned === true;
+  await Promise.all([
+    before === null
+      ? addPackage(trx, loadId, after, scanning)
+      : trx('load_packages')
+          .where({ load_id: loadId, package_id: id })
+          .update({
+            ...placementToRow(after.placement),
+            ...(becomesScanned
+              ? { scanned_at: scanning.at, scanned_by: scanning.personId, entry: scanning.entry }
+              : {}),
+            ...(becomesUnscanned ? { scanned_at: null, scanned_by: null, entry: null } : {}),
+          }),
+    before?.state === after.state
+      ? null
+      : trx('packages')
+          .where({ id })
+          .update({ state: after.state, version: trx.raw('version + 1') }),
+  ]);
+}
+
+async function writeHolder(
+  trx: Transaction,
+  loadId: string,
+  { id, after }: LoadDifference['holders'][number],
+): Promise<void> {
+  if (after === null) {
+    await trx('load_holders').where({ load_id: loadId, holder_id: id }).delete();
+    return;
+  }
+  const place = { shelf_id: after.shelfId, x_mm: after.xMm, y_mm: after.yMm, turn: after.turn };
+  await trx('load_holders')
+    .insert({ load_id: loadId, holder_id: id, ...place })
+    .onConflict(['load_id', 'holder_id'])
+    .merge(place);
+}
+
 /** Writes what an act changed of a load's packages, holders and program. */
 export async function writeDifference(
   trx: Transaction,
@@ -219,43 +267,11 @@ export async function writeDifference(
   difference: LoadDifference,
   scanning: Scanning,
 ): Promise<void> {
-  for (const { id, before, after } of difference.packages) {
-    if (after === null) {
-      await removePackage(trx, loadId, id, scanning);
-      continue;
-    }
-    if (before === null) await addPackage(trx, loadId, after, scanning);
-    else {
-      const becomesScanned = after.isScanned && !before.isScanned;
-      const becomesUnscanned = !after.isScanned && before.isScanned;
-      await trx('load_packages')
-        .where({ load_id: loadId, package_id: id })
-        .update({
-          ...placementToRow(after.placement),
-          ...(becomesScanned ? { scanned_at: scanning.at, scanned_by: scanning.personId, entry: scanning.entry } : {}),
-          ...(becomesUnscanned ? { scanned_at: null, scanned_by: null, entry: null } : {}),
-        });
-    }
-    if (before?.state !== after.state) {
-      await trx('packages')
-        .where({ id })
-        .update({ state: after.state, version: trx.raw('version + 1') });
-    }
-  }
-  for (const { id, after } of difference.holders) {
-    if (after === null) {
-      await trx('load_holders').where({ load_id: loadId, holder_id: id }).delete();
-      continue;
-    }
-    const place = { shelf_id: after.shelfId, x_mm: after.xMm, y_mm: after.yMm, turn: after.turn };
-    await trx('load_holders')
-      .insert({ load_id: loadId, holder_id: id, ...place })
-      .onConflict(['load_id', 'holder_id'])
-      .merge(place);
-  }
-  if (difference.program) {
-    await trx('loads').where({ id: loadId }).update({ program_id: difference.program.after.id });
-  }
+  await Promise.all([
+    ...difference.packages.map((change) => writePackage(trx, loadId, change, scanning)),
+    ...difference.holders.map((change) => writeHolder(trx, loadId, change)),
+    difference.program && trx('loads').where({ id: loadId }).update({ program_id: difference.program.after.id }),
+  ]);
 }
 
 /** One step on: everybody who holds an older version fetches anew. */

@@ -39,17 +39,29 @@ function present<Thing>(thing: Thing | undefined, what: string): Thing {
 /** Reads everything the rules look at. Inside a transaction that has locked the load, nothing of it can move meanwhile. */
 export async function readLoadView(db: Db | Transaction, load: LoadRow, at: Date): Promise<LoadAsKnown> {
   const facilityId = load.facility_id;
-  const facility = await facilityAt(db, facilityId, at);
-  const sterilizer = present(await sterilizerById(db, facilityId, load.sterilizer_id), 'a sterilizer');
-  const cart = present(await cartWithShelves(db, facilityId, load.cart_id), 'a cart');
-  const programs = await qualifiedPrograms(db, facilityId, load.sterilizer_id);
-  const packages = await listLoadPackages(db, load.id);
-  const holders = await listLoadHolders(db, load.id);
-  const counts = await listCounts(db, load.id);
-  const acceptances = await listAcceptances(db, load.id);
-  const policyRow = await db('policies')
-    .where({ id: load.policy_id })
-    .first<{ number: number; settings: unknown }>('number', 'settings');
+  const [facility, sterilizerRow, cartRow, programs, packages, holders, kinds, counts, acceptances, policyRow] =
+    await Promise.all([
+      facilityAt(db, facilityId, at),
+      sterilizerById(db, facilityId, load.sterilizer_id),
+      cartWithShelves(db, facilityId, load.cart_id),
+      qualifiedPrograms(db, facilityId, load.sterilizer_id),
+      listLoadPackages(db, load.id),
+      listLoadHolders(db, load.id),
+      holderKinds(db, facilityId),
+      listCounts(db, load.id),
+      listAcceptances(db, load.id),
+      db('policies').where({ id: load.policy_id }).first<{ number: number; settings: unknown }>('number', 'settings'),
+    ]);
+  const [items, airRemoval] = await Promise.all([
+    catalogueItems(
+      db,
+      facilityId,
+      packages.map((entry) => entry.itemId),
+    ),
+    airRemovalOfDay(db, facilityId, load.sterilizer_id, facility.day),
+  ]);
+  const sterilizer = present(sterilizerRow, 'a sterilizer');
+  const cart = present(cartRow, 'a cart');
   // The sterilizer may lose a qualification while a load is being built: then a rule says so.
   const qualified = programs.find((candidate) => candidate.id === load.program_id);
   return {
@@ -65,16 +77,12 @@ export async function readLoadView(db: Db | Transaction, load: LoadRow, at: Date
       qualifiedPrograms: programs,
       cart,
       holders,
-      holderKinds: await holderKinds(db, facilityId),
-      items: await catalogueItems(
-        db,
-        facilityId,
-        packages.map((entry) => entry.itemId),
-      ),
+      holderKinds: kinds,
+      items,
       packages,
       counts: counts.map(({ shelfId, counted }) => ({ shelfId, counted })),
       acceptances: acceptances.map(({ findingKey, ruleId, reason }) => ({ findingKey, ruleId, reason })),
-      airRemoval: await airRemovalOfDay(db, facilityId, load.sterilizer_id, facility.day),
+      airRemoval,
       today: facility.day,
     },
   };

@@ -10,7 +10,7 @@ import type { Transaction } from '../../platform/db';
 import { once } from '../../platform/once';
 import { holderByPlaceCode, shelfByPlaceCode } from '../equipment/read-model';
 import { catalogueItems } from '../items/read-model';
-import { findPackageByCode, lockPackages } from '../packages/read-model';
+import { findPackageByCode, lockPackageByCode } from '../packages/read-model';
 import { recordAct, requireAct, type ActContext } from './load-change';
 import { lockLoad } from './load-store';
 import { readLoadView, type LoadAsKnown } from './load-view-read-model';
@@ -30,7 +30,7 @@ const shownLength = 40;
 
 /** What was read, fit to be shown: short, and without the characters that cannot be seen. */
 function shown(raw: string): string {
-  // eslint-disable-next-line no-control-regex -- these are what is taken out
+   
   const visible = raw
     .slice(0, 400)
     .replace(/[\u0000-\u001f\u007f-\u009f\ud800-\udfff]/g, ' ')
@@ -151,15 +151,16 @@ async function lockLabel(
   code: string,
 ): Promise<{ readonly label: KnownLabel; readonly item: CatalogueItem | null }> {
   const facilityId = known.load.facility_id;
-  const found = await findPackageByCode(trx, code);
+  const none = { label: { kind: 'not-known' }, item: null } as const;
   // Another facility's label is not known here: not even that it exists.
-  if (found?.facilityId !== facilityId) return { label: { kind: 'not-known' }, item: null };
-  await lockPackages(trx, [found.id]);
+  if (!(await lockPackageByCode(trx, facilityId, code))) return none;
+  // Read only now: whoever held it before may have moved it.
   const facts = await findPackageByCode(trx, code);
+  if (!facts) return none;
   const item =
-    known.view.items.find((entry) => entry.id === found.itemId) ??
-    (await catalogueItems(trx, facilityId, [found.itemId]))[0];
-  if (!facts || !item) return { label: { kind: 'not-known' }, item: null };
+    known.view.items.find((entry) => entry.id === facts.itemId) ??
+    (await catalogueItems(trx, facilityId, [facts.itemId]))[0];
+  if (!item) return none;
   const listed = known.view.packages.find((entry) => entry.packageId === facts.id);
   return {
     item,

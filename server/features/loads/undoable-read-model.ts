@@ -18,18 +18,23 @@ const undoableKinds = [
   'load.program-changed',
 ] as const satisfies readonly AuditKind[];
 
-type EventRow = {
-  readonly id: number;
-  readonly kind: (typeof undoableKinds)[number];
-  readonly payload: {
-    readonly difference: LoadDifference;
-    readonly packageCode?: string;
-    readonly holder?: string;
-    readonly packages?: number;
-  };
+export type UndoableKind = (typeof undoableKinds)[number];
+
+type ToldAct = {
+  readonly difference: LoadDifference;
+  readonly packageCode?: string;
+  readonly holder?: string;
+  readonly packages?: number;
 };
 
-function wordsOf({ kind, payload }: EventRow): string {
+type EventRow = { readonly id: number; readonly kind: UndoableKind; readonly payload: ToldAct };
+
+export function isUndoable(kind: AuditKind): kind is UndoableKind {
+  return (undoableKinds as readonly AuditKind[]).includes(kind);
+}
+
+/** What taking an act back is called. */
+export function undoWords(kind: UndoableKind, payload: ToldAct): string {
   switch (kind) {
     case 'load.package-scanned':
       return `Scan of ${payload.packageCode ?? ''}`;
@@ -61,5 +66,5 @@ export async function getUndoable(db: Db | Transaction, loadId: string): Promise
     )
     .orderBy('event.id', 'desc')
     .first<EventRow | undefined>('event.id', 'event.kind', 'event.payload');
-  return row ? { eventId: row.id, words: wordsOf(row), difference: row.payload.difference } : null;
+  return row ? { eventId: row.id, words: undoWords(row.kind, row.payload), difference: row.payload.difference } : null;
 }

@@ -141,6 +141,18 @@ export async function lockPackages(trx: Transaction, packageIds: readonly string
     .forUpdate();
 }
 
+/**
+ * Locks the facility's package with this code. To be called before anything about it is decided.
+ * @returns whether there is one; another facility's is not locked, and not known here
+ */
+export async function lockPackageByCode(trx: Transaction, facilityId: string, code: string): Promise<boolean> {
+  const rows = await trx('packages')
+    .where({ 'packages.facility_id': facilityId, 'packages.code': code })
+    .select<{ id: string }[]>('packages.id')
+    .forUpdate();
+  return rows.length > 0;
+}
+
 /** The package with this code, of whichever facility; undefined where no label was ever printed with it. `code` as kept, with its hyphens. */
 export async function findPackageByCode(trx: Transaction | Db, code: string): Promise<PackageFacts | undefined> {
   const rows = await packageFacts(trx).where('packages.code', code);
