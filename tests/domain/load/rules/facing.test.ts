@@ -8,11 +8,13 @@ const rack = aLoad().withHolder('RS-1', 'RS', { x: 20, y: 40 });
 /** One small pouch per slot, from slot 1 on; a dot leaves the slot free. */
 function facing(sides: string, load: LoadBuilder = rack, holder = 'RS-1'): LoadBuilder {
   const paper: Readonly<Record<string, PaperSide>> = { L: 'left', R: 'right' };
-  return sides.split('').reduce(
-    (one, side, index) =>
-      side === '.' ? one : one.withPackage('P-02', inSlot(holder, index + 1, paper[side] ?? null)),
-    load,
-  );
+  return sides
+    .split('')
+    .reduce(
+      (one, side, index) =>
+        side === '.' ? one : one.withPackage('P-02', inSlot(holder, index + 1, paper[side] ?? null)),
+      load,
+    );
 }
 
 function slotsFound(load: LoadBuilder, rule: 'one-way' | 'alternating' | 'not-set' = 'one-way'): readonly string[] {
