@@ -1,6 +1,6 @@
 import type { QueryClient } from '@tanstack/react-query';
 import type { ComponentType } from 'react';
-import { createBrowserRouter, redirect, type LoaderFunction, type RouteObject } from 'react-router-dom';
+import { createBrowserRouter, Navigate, redirect, type LoaderFunction, type RouteObject } from 'react-router-dom';
 import { sessionQueries } from '../features/session/queries';
 import { isProblem } from '../lib/errors';
 import { Frame } from './frame';
@@ -80,12 +80,15 @@ export function createRoutes(queryClient: QueryClient): RouteObject[] {
             },
             {
               element: <RequirePermission any={['package.pack']} />,
-              children: [{ path: 'pack', ...lazyRoute(() => import('./routes/pack')) }],
+              children: [
+                { path: 'pack', element: <Navigate to="/pack/station" replace /> },
+                { path: 'pack/:part/:id?', ...lazyRoute(() => import('./routes/pack')) },
+              ],
             },
             {
               element: <RequirePermission any={['item.view', 'equipment.view']} />,
               children: [
-                { path: 'stock', loader: () => redirect('/stock/items') },
+                { path: 'stock', element: <Navigate to="/stock/items" replace /> },
                 { path: 'stock/:shelf', ...lazyRoute(() => import('./routes/stock')) },
               ],
             },

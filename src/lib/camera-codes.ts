@@ -31,7 +31,7 @@ export function createRepeatFilter() {
 /** Why there is no picture, and what to do, for the person holding the tablet. */
 export function cameraRefusalInWords(error: unknown): string {
   // Names of the exceptions of getUserMedia: W3C Media Capture and Streams, section 10.
-  const name = error instanceof Error ? error.name : '';
+  const name = typeof error === 'object' && error !== null && 'name' in error ? error.name : '';
   switch (name) {
     case 'NotAllowedError':
     case 'SecurityError':

@@ -57,6 +57,12 @@ const lineEnds: readonly string[] = ['\r', '\n', '\t'];
 /** They go up and down between the characters of a scan and mean nothing by themselves. */
 const modifiers: readonly string[] = ['Shift', 'Control', 'AltGraph', 'CapsLock'];
 
+/** Within a pause that scanners make. */
+function isQuickAfter(earlierMs: number, laterMs: number): boolean {
+  const gapMs = laterMs - earlierMs;
+  return gapMs >= 0 && gapMs <= greatestGapMs;
+}
+
 /** Tells the keys of a scanner from those of hands, by their pace. Knows nothing of the browser. */
 export function createScanReader() {
   let buffer = '';
@@ -64,17 +70,21 @@ export function createScanReader() {
   let lastKeyAtMs = Number.NEGATIVE_INFINITY;
   let lastScanAtMs = Number.NEGATIVE_INFINITY;
 
+  function forget() {
+    buffer = '';
+    quickGaps = 0;
+  }
+
   function end(atMs: number): ScanVerdict {
     const text = buffer;
     const isPaceOfScanner = quickGaps >= leastQuickShare * text.length;
-    buffer = '';
-    quickGaps = 0;
+    forget();
     if (text.length >= fewestCharacters && isPaceOfScanner) {
       lastScanAtMs = atMs;
       return { kind: 'scan', text };
     }
     if (text !== '') return { kind: isPaceOfScanner ? 'too-short' : 'typed' };
-    return atMs - lastScanAtMs <= greatestGapMs ? { kind: 'tail' } : { kind: 'typed' };
+    return isQuickAfter(lastScanAtMs, atMs) ? { kind: 'tail' } : { kind: 'typed' };
   }
 
   return {
@@ -82,16 +92,13 @@ export function createScanReader() {
       if (modifiers.includes(key.key)) return { kind: 'typed' };
       const character = characterOf(key);
       if (character === null || key.isRepeat) {
-        buffer = '';
-        quickGaps = 0;
+        forget();
         return { kind: 'typed' };
       }
       const gapMs = key.atMs - lastKeyAtMs;
-      const isQuick = gapMs >= 0 && gapMs <= greatestGapMs;
-      if (gapMs > greatestStutterMs || gapMs < 0) {
-        buffer = '';
-        quickGaps = 0;
-      } else if (isQuick && buffer !== '') quickGaps += 1;
+      const isQuick = isQuickAfter(lastKeyAtMs, key.atMs);
+      if (gapMs > greatestStutterMs || gapMs < 0) forget();
+      else if (isQuick && buffer !== '') quickGaps += 1;
       lastKeyAtMs = key.atMs;
       if (lineEnds.includes(character)) return end(key.atMs);
       const isFirst = buffer === '';
@@ -102,8 +109,6 @@ export function createScanReader() {
       return { kind: isFirst || !isQuick ? 'first' : 'inside' };
     },
 
-    forget() {
-      buffer = '';
-    },
+    forget,
   };
 }

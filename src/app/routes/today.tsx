@@ -1,12 +1,30 @@
-import { PageHead } from '../../components/ui/heading';
-import { EmptyState } from '../../components/ui/states';
+import type { QueryClient } from '@tanstack/react-query';
+import { useState } from 'react';
+import type { LoaderFunction } from 'react-router-dom';
+import { OpenLoadSheet } from '../../features/loads/components/open-load-sheet';
+import { TodayScreen } from '../../features/today/components/today-screen';
+import { todayQueries } from '../../features/today/queries';
+
+export const loader =
+  (queryClient: QueryClient): LoaderFunction =>
+  async () => {
+    await queryClient.query({ ...todayQueries.day(), staleTime: 'static' });
+    return null;
+  };
 
 export function Component() {
+  const [openingRunId, setOpeningRunId] = useState<string | null>(null);
   return (
-    <div className="grid gap-5 p-6">
-      <title>Today · Paperside</title>
-      <PageHead title="Today" />
-      <EmptyState title="Not here yet">What is open and what waits for you will stand here.</EmptyState>
-    </div>
+    <>
+      <TodayScreen onOpenLoad={setOpeningRunId} />
+      {openingRunId !== null && (
+        <OpenLoadSheet
+          runId={openingRunId}
+          onClose={() => {
+            setOpeningRunId(null);
+          }}
+        />
+      )}
+    </>
   );
 }

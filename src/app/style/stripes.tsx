@@ -74,7 +74,7 @@ const examples: readonly Example[] = [
 ];
 
 function statesOf(example: Example): StretchState[] {
-  return [...example.states].map((letter) => letters[letter] ?? 'not-yet');
+  return Array.from(example.states).map((letter) => letters[letter] ?? 'not-yet');
 }
 
 function stretchesOf(example: Example): Stretch[] {

@@ -11,6 +11,8 @@ export type ButtonProps = {
   icon?: IconName;
   iconAfter?: IconName;
   type?: 'button' | 'submit';
+  /** Id of the form it sends, where it stands outside of it: at the foot of a dialog. */
+  form?: string;
   onPress?: () => void;
   /** Why it cannot be pressed now. The button stays in reach and full in contrast, and says this when pressed. */
   blockedBecause?: string | undefined;

@@ -1,5 +1,5 @@
 import { useId, type ComponentPropsWithRef, type ReactNode } from 'react';
-import { FieldError } from './field';
+import { describedBy, FieldError } from './field';
 
 export type CheckboxFieldProps = Omit<ComponentPropsWithRef<'input'>, 'id' | 'className' | 'type'> & {
   label: ReactNode;
@@ -11,9 +11,6 @@ export type CheckboxFieldProps = Omit<ComponentPropsWithRef<'input'>, 'id' | 'cl
 /** Yes or no. The whole row is the target. Takes what `register('name')` gives. */
 export function CheckboxField({ label, hint, error, className = '', ...input }: CheckboxFieldProps) {
   const id = useId();
-  const describedBy = [hint !== undefined && `${id}-hint`, error !== undefined && `${id}-error`]
-    .filter(Boolean)
-    .join(' ');
   return (
     <div className={className}>
       <label className="flex min-h-12 items-center gap-3 py-1.5">
@@ -21,7 +18,7 @@ export function CheckboxField({ label, hint, error, className = '', ...input }: 
           {...input}
           type="checkbox"
           id={id}
-          aria-describedby={describedBy || undefined}
+          aria-describedby={describedBy(id, { hint, error })}
           aria-invalid={error === undefined ? undefined : true}
           className="tick-box"
         />

@@ -1,7 +1,7 @@
 import { useId, type ReactNode } from 'react';
 import { Button, ComboBox, Input, Label, ListBox, ListBoxItem, Popover, type Key } from 'react-aria-components';
 import { Icon } from '../icon';
-import { controlLook, FieldError } from './field';
+import { controlLook, describedBy, FieldError } from './field';
 
 export type ComboBoxChoice = { readonly id: string; readonly label: string; readonly note?: string };
 
@@ -29,11 +29,11 @@ export function ComboBoxField({
   autoFocus = false,
   className = '',
 }: ComboBoxFieldProps) {
-  const errorId = useId();
+  const id = useId();
   return (
     <ComboBox
       className={className}
-      items={choices}
+      defaultItems={choices}
       value={chosenId}
       onChange={(key: Key | null) => {
         onChoose(key === null ? null : String(key));
@@ -50,18 +50,22 @@ export function ComboBoxField({
       allowsEmptyCollection
     >
       <Label className="mb-1 block text-small font-medium">{label}</Label>
-      {hint !== undefined && <p className="mb-1.5 text-small text-ink-2">{hint}</p>}
+      {hint !== undefined && (
+        <p id={`${id}-hint`} className="mb-1.5 text-small text-ink-2">
+          {hint}
+        </p>
+      )}
       <div className="relative">
         <Input
           className={`${controlLook} pr-14`}
-          aria-describedby={errorId}
+          aria-describedby={describedBy(id, { hint, error })}
           {...(placeholder ? { placeholder } : {})}
         />
         <Button className="absolute inset-y-0 right-0 grid w-12 place-items-center text-film-4">
           <Icon name="down" />
         </Button>
       </div>
-      <FieldError id={errorId} error={error} />
+      <FieldError id={`${id}-error`} error={error} />
       <Popover className="w-(--trigger-width) overflow-auto bg-paper-0 shadow-sheet" offset={2}>
         <ListBox
           className="max-h-[22rem] overflow-auto outline-none"

@@ -18,6 +18,12 @@ export type FieldControl = {
   'aria-invalid': true | undefined;
 };
 
+/** The ids of those words that are there, as `aria-describedby` wants them. */
+export function describedBy(id: string, { hint, error }: Pick<FieldWords, 'hint' | 'error'>): string | undefined {
+  const ids = [hint !== undefined && `${id}-hint`, error !== undefined && `${id}-error`].filter((one) => one !== false);
+  return ids.length === 0 ? undefined : ids.join(' ');
+}
+
 type FieldProps = FieldWords & {
   className?: string;
   children: (control: FieldControl) => ReactNode;
@@ -34,9 +40,6 @@ export function Field({
   children,
 }: FieldProps) {
   const id = useId();
-  const hintId = `${id}-hint`;
-  const errorId = `${id}-error`;
-  const describedBy = [hint !== undefined && hintId, error !== undefined && errorId].filter(Boolean).join(' ');
   return (
     <div className={className}>
       <label htmlFor={id} className={isLabelHidden ? 'sr-only' : 'mb-1 block text-small font-medium'}>
@@ -44,16 +47,16 @@ export function Field({
         {isOptional && <span className="font-normal text-ink-2"> (may stay empty)</span>}
       </label>
       {hint !== undefined && (
-        <p id={hintId} className="mb-1.5 text-small text-ink-2">
+        <p id={`${id}-hint`} className="mb-1.5 text-small text-ink-2">
           {hint}
         </p>
       )}
       {children({
         id,
-        'aria-describedby': describedBy || undefined,
+        'aria-describedby': describedBy(id, { hint, error }),
         'aria-invalid': error === undefined ? undefined : true,
       })}
-      <FieldError id={errorId} error={error} />
+      <FieldError id={`${id}-error`} error={error} />
     </div>
   );
 }

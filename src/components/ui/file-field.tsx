@@ -1,6 +1,6 @@
 import { useId, useState, type DragEvent, type ReactNode } from 'react';
 import { Icon } from '../icon';
-import { FieldError } from './field';
+import { describedBy, FieldError } from './field';
 
 type FileFieldProps = {
   label: string;
@@ -69,7 +69,7 @@ export function FileField({ label, hint, error, accept, file, onChoose, classNam
           className="sr-only"
           accept={accept}
           aria-labelledby={`${id}-label`}
-          aria-describedby={`${hint === undefined ? '' : `${id}-hint `}${id}-error`}
+          aria-describedby={describedBy(id, { hint, error })}
           aria-invalid={error === undefined ? undefined : true}
           onChange={(event) => {
             onChoose(event.target.files?.[0] ?? null);

@@ -1,7 +1,7 @@
 import { useId, useRef, useState, type ReactNode } from 'react';
 import { Icon } from '../icon';
 import { Button } from './button';
-import { FieldError } from './field';
+import { describedBy, FieldError } from './field';
 
 const digits = ['1', '2', '3', '4', '5', '6', '7', '8', '9'] as const;
 
@@ -102,7 +102,7 @@ function PadField({
           data-scan="yes"
           // The pad is the only thing to do here, and keyboards start on it.
           autoFocus={autoFocus}
-          aria-describedby={`${hint === undefined ? '' : `${id}-hint `}${id}-error`}
+          aria-describedby={describedBy(id, { hint, error })}
           aria-invalid={error === undefined ? undefined : true}
           value={value}
           onChange={(event) => {

@@ -1,5 +1,5 @@
 import { useId, type ComponentPropsWithRef, type ReactNode } from 'react';
-import { FieldError } from './field';
+import { describedBy, FieldError } from './field';
 
 export type RadioOption = {
   readonly value: string;
@@ -43,10 +43,7 @@ export function RadioGroupField({
   const id = useId();
   const isSideBySide = layout === 'side-by-side';
   return (
-    <fieldset
-      className={className}
-      aria-describedby={[hint !== undefined && `${id}-hint`, `${id}-error`].filter(Boolean).join(' ')}
-    >
+    <fieldset className={className} aria-describedby={describedBy(id, { hint, error })}>
       <legend className={isLabelHidden ? 'sr-only' : 'mb-1 text-small font-medium'}>{label}</legend>
       {hint !== undefined && (
         <p id={`${id}-hint`} className="mb-1.5 text-small text-ink-2">

@@ -1,20 +1,17 @@
 import { greatestPinLength, leastPinLength } from '#domain/people/pin-policy';
-import type { SessionResponse } from '#contract/session';
 import { Icon } from '../../../components/icon';
 import { Button } from '../../../components/ui/button';
 import { PinPad } from '../../../components/ui/key-pad';
-import { sentenceOf } from '../../../lib/errors';
-import { useSignIn } from '../mutations';
 
 type BadgePinFormProps = {
-  badge: string;
-  onSignedIn: (session: SessionResponse) => void;
+  onPin: (pin: string) => void;
   onBack: () => void;
+  isWaiting: boolean;
+  error: string | undefined;
 };
 
 /** The badge has been read; its PIN makes it a sign-in. */
-export function BadgePinForm({ badge, onSignedIn, onBack }: BadgePinFormProps) {
-  const signIn = useSignIn();
+export function BadgePinForm({ onPin, onBack, isWaiting, error }: BadgePinFormProps) {
   return (
     <div className="grid gap-4">
       <div className="flex items-center gap-4">
@@ -25,20 +22,18 @@ export function BadgePinForm({ badge, onSignedIn, onBack }: BadgePinFormProps) {
           <h2 className="text-say">Badge read</h2>
           <p className="text-row text-ink-2">Now its PIN.</p>
         </div>
-        <Button kind="plain" size="small" onPress={onBack}>
+        <Button kind="plain" size="small" className="-mr-3" onPress={onBack}>
           Not mine
         </Button>
       </div>
       <PinPad
         label="PIN"
-        error={signIn.isError ? sentenceOf(signIn.error) : undefined}
+        error={error}
         doneWords="Sign in"
-        waitingWords={signIn.isPending ? 'Signing in' : undefined}
+        waitingWords={isWaiting ? 'Signing in' : undefined}
         leastDigits={leastPinLength}
         mostDigits={greatestPinLength}
-        onDone={(pin) => {
-          signIn.mutate({ by: 'badge', badge, pin }, { onSuccess: onSignedIn });
-        }}
+        onDone={onPin}
       />
     </div>
   );

@@ -49,12 +49,7 @@ function OpenChangePinDialog({ onClose }: { onClose: () => void }) {
       title="PIN for your badge"
       actions={
         <>
-          <Button
-            waitingWords={change.isPending ? 'Keeping it' : undefined}
-            onPress={() => {
-              void submit();
-            }}
-          >
+          <Button type="submit" form={formId} waitingWords={change.isPending ? 'Keeping it' : undefined}>
             Keep this PIN
           </Button>
           <Button kind="quiet" onPress={onClose}>
@@ -81,8 +76,6 @@ function OpenChangePinDialog({ onClose }: { onClose: () => void }) {
         <p role="alert" className={refusal === null ? 'sr-only' : 'font-semibold text-madder-3'}>
           {refusal}
         </p>
-        {/* Enter in a field sends the form; the button at the foot lies outside of it. */}
-        <button type="submit" className="hidden" tabIndex={-1} aria-hidden="true" />
       </form>
     </Dialog>
   );

@@ -1,12 +1,17 @@
 import { parseBadgeCode } from '#domain/label/badge-code';
+import { greatestPinLength, leastPinLength } from '#domain/people/pin-policy';
 import type { SessionResponse } from '#contract/session';
 import { useState } from 'react';
 import { Icon } from '../../../components/icon';
 import { Button } from '../../../components/ui/button';
+import { sentenceOf } from '../../../lib/errors';
 import { LazyCameraScanner } from '../../../lib/lazy-camera-scanner';
 import { useScanner, type Scan, type ScanLayer } from '../../../lib/scanner-input';
+import { useSignIn } from '../mutations';
 import { BadgePinForm } from './badge-pin-form';
 import { StaffNumberForm } from './staff-number-form';
+
+const pinShape = new RegExp(`^[0-9]{${leastPinLength},${greatestPinLength}}$`);
 
 type IdentifyPersonProps = {
   layer: ScanLayer;
@@ -21,10 +26,28 @@ export function IdentifyPerson({ layer, firstBadge = null, onSignedIn }: Identif
   const [refusal, setRefusal] = useState<string | null>(null);
   const [isCameraOn, setIsCameraOn] = useState(false);
 
+  const signIn = useSignIn();
+
+  function tryPin(pin: string) {
+    if (badge !== null && !signIn.isPending) {
+      signIn.mutate({ by: 'badge', badge, pin }, { onSuccess: onSignedIn });
+    }
+  }
+
+  function askForPinOf(next: string | null) {
+    signIn.reset();
+    setBadge(next);
+  }
+
   function take(scan: Scan) {
+    // Fingers that know their PIN are as quick as a scanner.
+    if (badge !== null && scan.entry === 'wedge' && pinShape.test(scan.text)) {
+      tryPin(scan.text);
+      return;
+    }
     const read = parseBadgeCode(scan.text);
     if (read.ok) {
-      setBadge(read.value.code);
+      askForPinOf(read.value.code);
       setRefusal(null);
       setIsCameraOn(false);
     } else setRefusal(read.refusal.sentence);
@@ -56,10 +79,11 @@ export function IdentifyPerson({ layer, firstBadge = null, onSignedIn }: Identif
       ) : (
         <BadgePinForm
           key={badge}
-          badge={badge}
-          onSignedIn={onSignedIn}
+          isWaiting={signIn.isPending}
+          error={signIn.isError ? sentenceOf(signIn.error) : undefined}
+          onPin={tryPin}
           onBack={() => {
-            setBadge(null);
+            askForPinOf(null);
           }}
         />
       )}
