@@ -1,0 +1,131 @@
+import { importPreviewSchema, importResultSchema, type ImportMode, type ImportPreview } from '#contract/csv-import';
+import { useQueryClient } from '@tanstack/react-query';
+import { useState } from 'react';
+import { api } from '../../lib/api-client';
+import { sentenceOf } from '../../lib/errors';
+import { countOf } from '../../lib/format';
+import { useAnnounce } from '../ui/announcer';
+import { Button } from '../ui/button';
+import { Dialog } from '../ui/dialog';
+import { FileField } from '../ui/file-field';
+import { ImportPreviewView } from './import-preview-view';
+import { useWrite } from './use-write';
+
+type ImportSheetProps = {
+  /** Address of the list: "/api/items". */
+  path: string;
+  /** "items" */
+  things: string;
+  /** What has to be asked for anew once something was taken over. */
+  queryKey: readonly unknown[];
+  onClose: () => void;
+};
+
+type Look =
+  | { readonly at: 'choosing'; readonly file: File | null; readonly refusal: string | null }
+  | { readonly at: 'reading'; readonly file: File }
+  | { readonly at: 'seen'; readonly file: File; readonly preview: ImportPreview; readonly refusal: string | null }
+  | { readonly at: 'taking'; readonly file: File; readonly preview: ImportPreview };
+
+function formOf(file: File, fields: Readonly<Record<string, string>> = {}): FormData {
+  const form = new FormData();
+  for (const [name, value] of Object.entries(fields)) form.append(name, value);
+  form.append('file', file);
+  return form;
+}
+
+/** A file is looked at first: what it would add and change, and what is wrong where. Then all of it is taken over, or the good rows. */
+export function ImportSheet({ path, things, queryKey, onClose }: ImportSheetProps) {
+  const [look, setLook] = useState<Look>({ at: 'choosing', file: null, refusal: null });
+  const queryClient = useQueryClient();
+  const announce = useAnnounce();
+  const write = useWrite();
+
+  async function read(file: File | null) {
+    if (file === null) return;
+    setLook({ at: 'reading', file });
+    try {
+      const preview = await api.upload(`${path}/import/preview`, formOf(file), importPreviewSchema);
+      setLook({ at: 'seen', file, preview, refusal: null });
+      announce(`${countOf(preview.rows, 'row')}. ${String(preview.refused)} to put right.`);
+    } catch (error) {
+      setLook({ at: 'choosing', file, refusal: sentenceOf(error) });
+    }
+  }
+
+  async function take({ file, preview }: { file: File; preview: ImportPreview }, mode: ImportMode) {
+    setLook({ at: 'taking', file, preview });
+    try {
+      const result = await write((requestId) =>
+        api.upload(`${path}/import`, formOf(file, { requestId, mode, digest: preview.digest }), importResultSchema),
+      );
+      await queryClient.invalidateQueries({ queryKey });
+      announce(`Taken over: ${String(result.added)} added, ${String(result.changed)} changed.`);
+      onClose();
+    } catch (error) {
+      setLook({ at: 'seen', file, preview, refusal: sentenceOf(error) });
+    }
+  }
+
+  const isTaking = look.at === 'taking';
+  const preview = look.at === 'seen' || look.at === 'taking' ? look.preview : null;
+  const moving = preview === null ? 0 : preview.added + preview.changed;
+  const refusal = look.at === 'choosing' || look.at === 'seen' ? look.refusal : null;
+  return (
+    <Dialog
+      isOpen
+      size="wide"
+      title={`Take over ${things} from a CSV`}
+      onClose={isTaking ? undefined : onClose}
+      actions={
+        <>
+          {preview !== null && moving > 0 && (
+            <Button
+              waitingWords={isTaking ? 'Taking it over' : undefined}
+              onPress={() => {
+                if (look.at === 'seen') void take(look, preview.refused === 0 ? 'all-or-nothing' : 'good-rows');
+              }}
+            >
+              {preview.refused === 0
+                ? `Take over ${countOf(moving, 'row')}`
+                : `Take over the ${countOf(moving, 'good row')}, leave the other ${String(preview.refused)}`}
+            </Button>
+          )}
+          <Button kind="quiet" onPress={onClose} blockedBecause={isTaking ? 'It is being done now.' : undefined}>
+            Leave it
+          </Button>
+        </>
+      }
+    >
+      <div className="grid gap-5 pt-1">
+        <p className="text-row">
+          One line for each, with the columns named on the first.{' '}
+          <a href={`${path}/import/template`} download>
+            The template
+          </a>{' '}
+          explains them;{' '}
+          <a href={`${path}/export`} download>
+            what is here now
+          </a>{' '}
+          reads back to the same.
+        </p>
+        <FileField
+          label="CSV file"
+          accept=".csv,.txt,.tsv,text/csv"
+          file={look.file}
+          error={look.at === 'choosing' ? (refusal ?? undefined) : undefined}
+          onChoose={(file) => {
+            void read(file);
+          }}
+        />
+        {look.at === 'reading' && <p role="status">Reading {look.file.name}…</p>}
+        {preview !== null && <ImportPreviewView preview={preview} />}
+        {look.at === 'seen' && refusal !== null && (
+          <p role="alert" className="font-semibold text-madder-3">
+            {refusal}
+          </p>
+        )}
+      </div>
+    </Dialog>
+  );
+}

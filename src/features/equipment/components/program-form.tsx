@@ -1,0 +1,109 @@
+import { programFieldsSchema, type ProgramOnFile } from '#contract/equipment';
+import type { ProgramFields } from '#domain/catalogue/equipment-fields';
+import { cycleTypes } from '#domain/catalogue/cycle-need-text';
+import { zodResolver } from '@hookform/resolvers/zod';
+import { useForm } from 'react-hook-form';
+import type { z } from 'zod';
+import { cycleTypeWords } from '../../../components/stock/cycle-words';
+import { countProblems, FormPage, FormPart } from '../../../components/stock/form-page';
+import { QuantityField } from '../../../components/stock/quantity-field';
+import { showAtFields, useWrite } from '../../../components/stock/use-write';
+import { useAnnounce } from '../../../components/ui/announcer';
+import { CheckboxField } from '../../../components/ui/checkbox-field';
+import { SelectField } from '../../../components/ui/select-field';
+import { TextField } from '../../../components/ui/text-field';
+import { changesBetween, optionsOf } from '../equipment-words';
+import { useKeepProgram } from '../mutations';
+
+type FormInput = z.input<typeof programFieldsSchema>;
+
+function fieldsOf({ id: _id, version: _version, qualifiedOn: _on, ...fields }: ProgramOnFile): FormInput {
+  return fields;
+}
+
+/** What a program does. Which sterilizers are qualified for it is said at the sterilizer. */
+export function ProgramForm({
+  program,
+  onLeave,
+}: {
+  program: ProgramOnFile | null;
+  onLeave: (openId?: string) => void;
+}) {
+  const keep = useKeepProgram();
+  const write = useWrite();
+  const announce = useAnnounce();
+  const { register, control, handleSubmit, setError, formState } = useForm<FormInput, unknown, ProgramFields>({
+    resolver: zodResolver(programFieldsSchema),
+    defaultValues:
+      program === null
+        ? { code: '', name: '', type: 'dynamic-air-removal', greatestLoadMassKg: null, isRetired: false }
+        : fieldsOf(program),
+  });
+  const { errors } = formState;
+  const send = handleSubmit(async (fields) => {
+    const { code: _code, ...changeable } = fields;
+    try {
+      const kept = await write((requestId) =>
+        program === null
+          ? keep.add({ ...fields, requestId })
+          : keep.change(program.id, { ...changesBetween(program, changeable), requestId, version: program.version }),
+      );
+      announce(`${kept.code} is kept.`);
+      onLeave(kept.id);
+    } catch (error) {
+      showAtFields(error, setError);
+    }
+  });
+  return (
+    <FormPage
+      title={program === null ? 'Add a program' : `Change ${program.code}`}
+      onSend={() => void send()}
+      onLeave={() => {
+        onLeave();
+      }}
+      sendWords={program === null ? 'Add the program' : 'Keep the changes'}
+      isSending={keep.isPending}
+      refusal={keep.error}
+      problemCount={countProblems(errors)}
+    >
+      <FormPart title="What it is">
+        {program === null && (
+          <TextField
+            label="Code"
+            hint="Your own. It stays for good."
+            isCode
+            error={errors.code?.message}
+            {...register('code')}
+          />
+        )}
+        <TextField label="Name" error={errors.name?.message} className="sm:col-span-2" {...register('name')} />
+      </FormPart>
+      <FormPart title="What it does">
+        <SelectField
+          label="Type"
+          options={optionsOf(cycleTypes, cycleTypeWords)}
+          error={errors.type?.message}
+          {...register('type')}
+        />
+        <QuantityField control={control} name="temperatureC" quantity="temperature" label="Temperature" />
+        <QuantityField control={control} name="exposureS" quantity="minutes" label="Exposure" />
+        <QuantityField control={control} name="dryS" quantity="minutes" label="Dry" />
+        <QuantityField
+          control={control}
+          name="greatestLoadMassKg"
+          quantity="mass"
+          label="Greatest load mass"
+          isOptional
+        />
+        {program !== null && (
+          <CheckboxField
+            label="Retired"
+            hint="It is no longer offered for a load."
+            className="self-end"
+            {...register('isRetired')}
+          />
+        )}
+      </FormPart>
+    </FormPage>
+  );
+}
