@@ -1,8 +1,9 @@
 import { spawn, type ChildProcess } from 'node:child_process';
-import { closeSync, existsSync, mkdirSync, openSync, readFileSync, renameSync, statSync } from 'node:fs';
+import { closeSync, existsSync, openSync, readFileSync, renameSync, statSync } from 'node:fs';
 import path from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { localFolder, top } from './checkout.mjs';
+import { handToKeeper, makeFolder } from './keeper';
 import { Refusal } from './refusal.mjs';
 import { killGroup } from './run-command';
 
@@ -87,7 +88,9 @@ async function stopProcess(child: ChildProcess, ended: Promise<void>): Promise<v
 
 /** One older log is kept. */
 function openLog(file: string): number {
-  mkdirSync(path.dirname(file), { recursive: true });
+  makeFolder(path.dirname(file));
   if (existsSync(file) && statSync(file).size > largestLog) renameSync(file, `${file}.old`);
-  return openSync(file, 'a', 0o600);
+  const log = openSync(file, 'a', 0o600);
+  handToKeeper(file);
+  return log;
 }

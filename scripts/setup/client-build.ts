@@ -1,7 +1,8 @@
 import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readdirSync, readFileSync, renameSync, rmSync, statSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, renameSync, rmSync, statSync } from 'node:fs';
 import path from 'node:path';
 import { top } from './checkout.mjs';
+import { makeFolder } from './keeper';
 import { Refusal } from './refusal.mjs';
 import { runCommand } from './run-command';
 
@@ -29,7 +30,7 @@ export async function ensureClientBuild(stop?: Promise<void>): Promise<ClientBui
   const folder = path.join(builds, hashInputs());
   if (existsSync(path.join(folder, 'index.html'))) return { folder, isNew: false };
   const unfinished = path.join(builds, `unfinished-${process.pid}`);
-  mkdirSync(unfinished, { recursive: true });
+  makeFolder(unfinished);
   try {
     const result = await runCommand({
       args: [process.execPath, '--import', 'tsx', 'scripts/setup/build-client.ts', unfinished],

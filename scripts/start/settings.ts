@@ -1,7 +1,8 @@
 import { randomBytes } from 'node:crypto';
-import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { localFolder } from '../setup/checkout.mjs';
+import { handToKeeper, makeFolder } from '../setup/keeper';
 import { isPortFree } from '../setup/ports';
 import { Refusal } from '../setup/refusal.mjs';
 
@@ -47,8 +48,9 @@ export function ensureSessionSecret(env: NodeJS.ProcessEnv): string {
   if (env.SESSION_SECRET !== undefined && env.SESSION_SECRET !== '') return env.SESSION_SECRET;
   const file = path.join(localFolder, 'session-secret');
   if (!existsSync(file)) {
-    mkdirSync(localFolder, { recursive: true });
+    makeFolder(localFolder);
     writeFileSync(file, randomBytes(32).toString('base64url'), { mode: 0o600 });
+    handToKeeper(file);
   }
   return readFileSync(file, 'utf8');
 }

@@ -31,7 +31,7 @@ export async function start({ isWatching }: { readonly isWatching: boolean }): P
     await showAddress(serving, database.url);
     const outcome = await Promise.race([stop.made.then(() => 'asked' as const), serving.ended]);
     if (outcome === 'asked') return 0;
-    throw new Refusal(`The server ended by itself. Its log is ${path.relative(top, apiLog)}.`);
+    throw new Refusal(`The server ended by itself. Its log is ${describe(apiLog)}.`);
   } catch (error) {
     // What was under way when the stop came may fail for that very reason.
     if (stop.isMade()) return 0;
@@ -51,10 +51,17 @@ async function openDatabase(): Promise<Database> {
     line('Database', `the one DATABASE_URL names, at ${readHost(given)}`);
     return { url: given, release: () => Promise.resolve() };
   }
-  const folder = path.join(localFolder, 'postgres');
-  const cluster = await holdCluster(folder, elsewhere);
-  line('Database', `PostgreSQL is running, its data is in ${path.relative(top, folder)}`);
+  const wanted = path.join(localFolder, 'postgres');
+  const cluster = await holdCluster(wanted, elsewhere);
+  const remark = cluster.folder === wanted ? '' : ", since PostgreSQL's user may not enter this checkout";
+  line('Database', `PostgreSQL is running, its data is in ${describe(cluster.folder)}${remark}`);
   return { url: cluster.url('paperside'), release: cluster.release };
+}
+
+/** Short where it lies in the checkout. */
+function describe(place: string): string {
+  const inside = path.relative(top, place);
+  return inside.startsWith('..') ? place : inside;
 }
 
 function readHost(url: string): string {
