@@ -48,28 +48,36 @@ export function CameraScanner({ onScan, className = '' }: CameraScannerProps) {
     if (!isSecure || element === null) return;
     const isNew = createRepeatFilter();
     let controls: IScannerControls | undefined;
-    // Effects run twice in development: the first camera may come only after it was given up, and must go out again.
     let isGone = false;
-    createReader()
-      .decodeFromConstraints(constraints, element, (result) => {
-        if (isGone || result === undefined) return;
-        const format = formats.get(result.getBarcodeFormat()) ?? 'other';
-        const text = codeFromCamera(result.getText(), format);
-        const atMs = performance.now();
-        if (isNew(text, atMs)) take({ text, entry: 'camera', atMs });
-      })
-      .then(
-        (started) => {
-          controls = started;
-          if (isGone) started.stop();
-          else setPicture({ is: 'on' });
-        },
-        (error: unknown) => {
-          if (!isGone) setPicture({ is: 'refused', words: cameraRefusalInWords(error) });
-        },
-      );
+
+    function start(into: HTMLVideoElement) {
+      createReader()
+        .decodeFromConstraints(constraints, into, (result) => {
+          if (isGone || result === undefined) return;
+          const format = formats.get(result.getBarcodeFormat()) ?? 'other';
+          const text = codeFromCamera(result.getText(), format);
+          const atMs = performance.now();
+          if (isNew(text, atMs)) take({ text, entry: 'camera', atMs });
+        })
+        .then(
+          (started) => {
+            controls = started;
+            // It came only after it was given up: it must go out again.
+            if (isGone) started.stop();
+            else setPicture({ is: 'on' });
+          },
+          (error: unknown) => {
+            if (!isGone) setPicture({ is: 'refused', words: cameraRefusalInWords(error) });
+          },
+        );
+    }
+
+    // Effects run twice in development. A camera that is stopped takes the picture of the next one with it, so the first
+    // of the two must never start.
+    const timer = window.setTimeout(start, 0, element);
     return () => {
       isGone = true;
+      window.clearTimeout(timer);
       controls?.stop();
     };
   }, [isSecure]);

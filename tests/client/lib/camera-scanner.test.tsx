@@ -71,7 +71,7 @@ describe('the camera', () => {
     expect(scans[0]?.text).toBe(']d20109501101530003');
   });
 
-  it('goes out when it leaves the screen, also the one of the double start in development', async () => {
+  it('starts once, also where effects run twice, and goes out when it leaves the screen', async () => {
     withCamera();
     const onScan = vi.fn();
     const { unmount } = render(
@@ -80,12 +80,32 @@ describe('the camera', () => {
       </StrictMode>,
     );
     await screen.findByText('Hold the code inside the frame.');
-    expect(camera.onFrame).toHaveLength(2);
-    expect(camera.stop).toHaveBeenCalledTimes(1);
+    expect(camera.onFrame).toHaveLength(1);
+    expect(camera.stop).not.toHaveBeenCalled();
     unmount();
-    expect(camera.stop).toHaveBeenCalledTimes(2);
+    expect(camera.stop).toHaveBeenCalledTimes(1);
     for (const show of camera.onFrame) show(frame('P1'));
     expect(onScan).not.toHaveBeenCalled();
+  });
+
+  it('that comes only after it was given up goes out again', async () => {
+    withCamera();
+    let come: () => void = () => undefined;
+    camera.start.mockReturnValue(
+      new Promise((resolve) => {
+        come = resolve;
+      }),
+    );
+    const { unmount } = render(<CameraScanner onScan={vi.fn()} />);
+    await vi.waitFor(() => {
+      expect(camera.onFrame).toHaveLength(1);
+    });
+    unmount();
+    expect(camera.stop).not.toHaveBeenCalled();
+    come();
+    await vi.waitFor(() => {
+      expect(camera.stop).toHaveBeenCalledTimes(1);
+    });
   });
 
   it('says in words why there is no picture', async () => {
