@@ -21,7 +21,7 @@ export async function endSessionsOf(trx: Transaction, personId: string): Promise
   await trx.raw(`delete from session where ${personInSession} = ?`, [personId]);
 }
 
-/** Forgets sessions that the store would not answer with any more. */
+/** Forgets sessions that the store would not answer with any more. It writes `expire` in the connection's own zone. */
 export async function sweepSessions(db: Db): Promise<void> {
-  await db.raw(`delete from session where expire < (now() at time zone 'UTC')`);
+  await db.raw('delete from session where expire < localtimestamp');
 }

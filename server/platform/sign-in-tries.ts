@@ -82,9 +82,14 @@ export async function takeTry(
   });
 }
 
-/** The try was right: what failed before it, under this name, no longer counts. */
-export async function noteSuccess(trx: Db | Transaction, tryId: number): Promise<void> {
+/** The try was right: what failed before it, under this name, counts no longer, and goes once no address needs it. */
+export async function noteSuccess(trx: Db | Transaction, tryId: number, now: Date): Promise<void> {
   await trx('sign_in_attempts').where({ id: tryId }).update({ is_success: true });
+  await trx.raw(
+    `delete from sign_in_attempts as old using sign_in_attempts as own
+      where own.id = ? and old.subject = own.subject and old.id < own.id and old.at < ?`,
+    [tryId, new Date(now.getTime() - sourceWindowS * 1000)],
+  );
 }
 
 /** Forgets the failures under a name, when an administrator gives out a new secret. */

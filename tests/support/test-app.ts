@@ -62,7 +62,7 @@ export type TestApp = {
   /** An agent nobody has signed in with. */
   readonly anyone: () => TestAgent;
   /** A second process in front of the same database, with its own connections. */
-  readonly besides: () => Promise<{ readonly anyone: () => TestAgent }>;
+  readonly besides: (settings?: { readonly isCookieSecure?: boolean }) => Promise<{ readonly anyone: () => TestAgent }>;
 };
 
 /** The id of nothing: for what is not there, and for the `requestId` of a write. */
@@ -93,14 +93,14 @@ export function openTestApp(): TestApp {
   const agents = new Map<string, { agent: TestAgent; activeMs: number }>();
   let server: Server | undefined;
 
-  async function listen(): Promise<Server> {
+  async function listen(isCookieSecure = false): Promise<Server> {
     const sessionPool = openSessionPool(database.url);
     const app = createApp(
       { db: database.db, clock, ids: timeOrderedIds, logger: openLogger('silent') },
       {
         sessionPool,
         sessionSecret: 'a secret that is only ever used in tests',
-        isCookieSecure: false,
+        isCookieSecure,
         trustProxy: 'loopback',
         clientDir: null,
       },
@@ -159,8 +159,8 @@ export function openTestApp(): TestApp {
       agents.set(key, { agent, activeMs: nowMs });
       return agent;
     },
-    async besides() {
-      const second = await listen();
+    async besides(settings = {}) {
+      const second = await listen(settings.isCookieSecure);
       return { anyone: () => agentOf(second) };
     },
   };

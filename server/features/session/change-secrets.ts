@@ -98,7 +98,7 @@ async function requireOwnPassword(
   if (!(await isSecretOf(person.passwordHash, password))) {
     refuseSecret('password.current-wrong', 'This is not your present password.', pointer);
   }
-  await noteSuccess(services.db, tryId);
+  await noteSuccess(services.db, tryId, services.clock.now());
   return person;
 }
 

@@ -86,7 +86,7 @@ export async function admit(
   const facilityId = facilityIds.find((id) => id === former) ?? facilityIds[0];
   if (facilityId === undefined) throw new Error('an admitted person works somewhere');
   await db.transaction(async (trx) => {
-    await noteSuccess(trx, tryId);
+    await noteSuccess(trx, tryId, now);
     await appendEvent(trx, {
       kind: 'person.signed-in',
       at: now,

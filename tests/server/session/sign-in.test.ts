@@ -64,6 +64,34 @@ test('keeps its cookie from scripts and foreign pages, and holds only an id in i
   expect(reply.headers['cache-control']).toBe('no-store');
 });
 
+test('behind https its cookie goes nowhere else: bound to the host, and never sent in clear', async () => {
+  const secure = await app.besides({ isCookieSecure: true });
+  const reply = await secure
+    .anyone()
+    .post('/api/session')
+    .set('X-Forwarded-Proto', 'https')
+    .send({ staffNumber: app.person('lead').staffNumber, password: testPassword })
+    .expect(200);
+  expect(String(reply.headers['set-cookie'])).toMatch(
+    /^__Host-paperside=s%3A[\w-]{32}\.[^;]+; Path=\/; HttpOnly; Secure; SameSite=Lax$/,
+  );
+});
+
+test('forgets sessions that ran out long ago, and keeps the others', async () => {
+  const row = (sid: string, hours: number) => ({
+    sid,
+    sess: '{}',
+    expire: app.db.raw(`localtimestamp + interval '${String(hours)} hours'`),
+  });
+  await app.db('session').insert([row('long gone', -1), row('still good', 1)]);
+  await app
+    .anyone()
+    .post('/api/session')
+    .send({ staffNumber: app.person('lead').staffNumber, password: testPassword })
+    .expect(200);
+  expect(await app.db('session').whereIn('sid', ['long gone', 'still good']).pluck('sid')).toEqual(['still good']);
+});
+
 test('records who signed in, where and how', async () => {
   const person = await addTestPerson(app, { role: 'technician', facilityId: app.facilities.B });
   await app.anyone().post('/api/session').send({ staffNumber: person.staffNumber, password: testPassword }).expect(200);

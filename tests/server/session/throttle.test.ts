@@ -177,6 +177,18 @@ test('stops at a hundred failures in a row, until a new one-time password is giv
   await tryPassword(app.anyone(), person.staffNumber, oneTimePassword).expect(200);
 });
 
+test('keeps what failed before a success only as long as the address it came from is counted', async () => {
+  const { staffNumber } = app.person('lead');
+  await tryPassword(app.anyone(), staffNumber).expect(401);
+  await tryPassword(app.anyone(), 'Z0001').expect(401);
+  await tryPassword(app.anyone(), staffNumber, testPassword).expect(200);
+  expect(await app.db('sign_in_attempts').select()).toHaveLength(3);
+  app.clock.advance({ minutes: 16 });
+  await tryPassword(app.anyone(), staffNumber, testPassword).expect(200);
+  const left = await app.db('sign_in_attempts').orderBy('id').pluck<boolean[]>('is_success');
+  expect(left).toEqual([false, true]);
+});
+
 test('keeps no staff number and no password among the tries', async () => {
   await tryPassword(app.anyone(), 'my secret in the wrong field').expect(401);
   const rows = await app.db('sign_in_attempts').select();
