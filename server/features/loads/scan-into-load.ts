@@ -30,7 +30,6 @@ const shownLength = 40;
 
 /** What was read, fit to be shown: short, and without the characters that cannot be seen. */
 function shown(raw: string): string {
-   
   const visible = raw
     .slice(0, 400)
     .replace(/[\u0000-\u001f\u007f-\u009f\ud800-\udfff]/g, ' ')

@@ -7,10 +7,12 @@ import {
   type LoadChange,
   type OpenLoadRequest,
   type ScanPlace,
+  type ScanResponse,
 } from '#contract/loads';
 import { paths } from '#contract/paths';
 import type { LoadEdit } from '#domain/load/finding';
-import { useMutation, useQueryClient, type QueryClient } from '@tanstack/react-query';
+import { useMutation, useQueryClient, type MutationOptions, type QueryClient } from '@tanstack/react-query';
+import { useCallback } from 'react';
 import { api, noContentSchema } from '../../lib/api-client';
 import { NoLineError } from '../../lib/errors';
 import { newRequestId } from '../../lib/request-id';
@@ -53,16 +55,23 @@ export type ScanToSend = {
   readonly place: ScanPlace | null;
 };
 
-export function useScanIntoLoad(loadId: string) {
+/** Sends scans. Its caller shows what comes of each, so no screen watches the mutation itself and is drawn for its sake. */
+export function useScanIntoLoad(loadId: string): (scan: ScanToSend) => Promise<ScanResponse> {
   const client = useQueryClient();
-  return useMutation({
-    ...inOrder(loadId),
-    // Silence is no answer: the scan stays here and is sent again until the line is back. Those after it wait their turn.
-    retry: (_failures, error) => error instanceof NoLineError,
-    retryDelay: (failures) => Math.min(500 * 2 ** failures, longestWaitMs),
-    mutationFn: (scan: ScanToSend) => api.post(`${paths.load(loadId)}/scans`, scan, scanResponseSchema),
-    onSuccess: (reply) => takeIn(client, loadId, reply.change),
-  });
+  return useCallback(
+    (scan) => {
+      const options: MutationOptions<ScanResponse, Error, ScanToSend> = {
+        ...inOrder(loadId),
+        // Silence is no answer: the scan stays here and is sent again until the line is back. Those after it wait their turn.
+        retry: (_failures, error) => error instanceof NoLineError,
+        retryDelay: (failures) => Math.min(500 * 2 ** failures, longestWaitMs),
+        mutationFn: (sent) => api.post(`${paths.load(loadId)}/scans`, sent, scanResponseSchema),
+        onSuccess: (reply) => takeIn(client, loadId, reply.change),
+      };
+      return client.getMutationCache().build(client, client.defaultMutationOptions(options)).execute(scan);
+    },
+    [client, loadId],
+  );
 }
 
 export function useEditLoad(loadId: string) {

@@ -1,5 +1,6 @@
 import type { LoadDetail } from '#contract/loads';
 import type { Program } from '#domain/load/model';
+import { memo } from 'react';
 import { Code } from '../../../components/ui/code';
 import { Clock, Moment } from '../../../components/ui/time';
 import { ProofStripe, type Stretch } from '../../../components/proof-stripe';
@@ -49,7 +50,13 @@ function stretchesOf(detail: LoadDetail, { decision, reckoning }: LoadJudgement,
 }
 
 /** The load's name, what it is built on, and its proof stripe. */
-export function LoadHead({ detail, judgement }: { detail: LoadDetail; judgement: LoadJudgement }) {
+export const LoadHead = memo(function LoadHead({
+  detail,
+  judgement,
+}: {
+  detail: LoadDetail;
+  judgement: LoadJudgement;
+}) {
   const { timeZone } = useFacility();
   const { summary, view } = detail;
   const program = useProgramWords(view.program);
@@ -76,4 +83,4 @@ export function LoadHead({ detail, judgement }: { detail: LoadDetail; judgement:
       </div>
     </header>
   );
-}
+});

@@ -278,16 +278,11 @@ function MoveIt({
     }),
     [view, entry.packageId],
   );
-  const suggestion = useMemo(
-    () =>
-      suggestPlace(
-        elsewhere,
-        entry.packageId,
-        policy,
-        kind === 'holder' ? { kind: 'holder', holderId: id } : { kind: 'shelf', shelfId: id },
-      ),
-    [elsewhere, entry.packageId, policy, kind, id],
-  );
+  const suggestion = useMemo(() => {
+    const [on, at = ''] = target.split(' ');
+    const place = on === 'holder' ? { kind: 'holder' as const, holderId: at } : { kind: 'shelf' as const, shelfId: at };
+    return suggestPlace(elsewhere, entry.packageId, policy, place);
+  }, [elsewhere, entry.packageId, policy, target]);
   const paper = current?.paper ?? suggestion?.placement.paper ?? (hasPaperSide(item) ? 'left' : null);
   return (
     <div className="grid content-start gap-3">

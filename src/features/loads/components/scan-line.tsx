@@ -2,6 +2,7 @@ import type { ScanPlace, ScanResponse } from '#contract/loads';
 import { holderWords, paperWords, placeWords } from '#domain/load/describe-place';
 import { findHolderKind } from '#domain/load/look-up';
 import type { LoadView, PaperSide } from '#domain/load/model';
+import { memo } from 'react';
 import { Icon } from '../../../components/icon';
 import { Button } from '../../../components/ui/button';
 import { Code } from '../../../components/ui/code';
@@ -188,6 +189,30 @@ type ScanLineProps = {
   readonly undoable: string | null;
 };
 
+const ScanButtons = memo(function ScanButtons({
+  onKeyIn,
+  onUndo,
+  undoable,
+}: Pick<ScanLineProps, 'onKeyIn' | 'onUndo' | 'undoable'>) {
+  return (
+    <div className="flex flex-none flex-col gap-1">
+      <Button kind="plain" size="small" icon="keys" onPress={onKeyIn}>
+        Key in
+      </Button>
+      <Button
+        kind="plain"
+        size="small"
+        icon="undo"
+        onPress={onUndo}
+        blockedBecause={undoable === null ? 'There is nothing to take back.' : undefined}
+        aria-label={undoable === null ? 'Undo' : `Undo: ${undoable}`}
+      >
+        Undo
+      </Button>
+    </div>
+  );
+});
+
 /** The one film surface of the screen: what was scanned, and where it goes. */
 export function ScanLine(props: ScanLineProps) {
   const { view, last, place, waiting } = props;
@@ -195,21 +220,7 @@ export function ScanLine(props: ScanLineProps) {
     <FilmPanel label="Last scan" className="z-10 grid min-h-29 tablet:grid-cols-[1fr_minmax(22rem,33rem)]">
       <div className="flex min-w-0 items-start justify-between gap-3 px-4 pt-3.5 pb-2">
         <Said view={view} last={last} waiting={waiting} />
-        <div className="flex flex-none flex-col gap-1">
-          <Button kind="plain" size="small" icon="keys" onPress={props.onKeyIn}>
-            Key in
-          </Button>
-          <Button
-            kind="plain"
-            size="small"
-            icon="undo"
-            onPress={props.onUndo}
-            blockedBecause={props.undoable === null ? 'There is nothing to take back.' : undefined}
-            aria-label={props.undoable === null ? 'Undo' : `Undo: ${props.undoable}`}
-          >
-            Undo
-          </Button>
-        </div>
+        <ScanButtons onKeyIn={props.onKeyIn} onUndo={props.onUndo} undoable={props.undoable} />
       </div>
       <PutItHere view={view} last={last} place={place} onClearPlace={props.onClearPlace} />
     </FilmPanel>

@@ -1,6 +1,6 @@
 import type { ScanPlace, ScanResponse } from '#contract/loads';
 import type { LoadEdit } from '#domain/load/finding';
-import { useCallback, useRef, useState } from 'react';
+import { startTransition, useCallback, useRef, useState } from 'react';
 import { useAnnounce } from '../../../components/ui/announcer';
 import { sentenceOf } from '../../../lib/errors';
 import { newRequestId } from '../../../lib/request-id';
@@ -16,7 +16,7 @@ const shownCode = 40;
 export function useLoadActs(loadId: string) {
   const announce = useAnnounce();
   const sounds = useSounds();
-  const scanMutation = useScanIntoLoad(loadId);
+  const send = useScanIntoLoad(loadId);
   const editMutation = useEditLoad(loadId);
   const undoMutation = useUndoLastAct(loadId);
   const [place, setPlace] = useState<ScanPlace | null>(null);
@@ -45,11 +45,13 @@ export function useLoadActs(loadId: string) {
     [announce, choosePlace, sounds],
   );
 
-  const { mutateAsync: send } = scanMutation;
   const queue = useRef<Promise<unknown>>(Promise.resolve());
   const scan = useCallback(
     (raw: string, entry: ScanEntry) => {
-      setWaiting((count) => count + 1);
+      // Told when there is time: first the scan has to be on its way.
+      startTransition(() => {
+        setWaiting((count) => count + 1);
+      });
       const requestId = newRequestId();
       // One after the other: a package scanned right after its place must not be sent before the place is known.
       queue.current = queue.current.then(async () => {
@@ -62,7 +64,9 @@ export function useLoadActs(loadId: string) {
           sounds.play('not-taken');
           announce(sentence, 'assertive');
         } finally {
-          setWaiting((count) => count - 1);
+          startTransition(() => {
+            setWaiting((count) => count - 1);
+          });
         }
       });
     },
@@ -102,6 +106,10 @@ export function useLoadActs(loadId: string) {
     });
   }, [announce, takeBack]);
 
+  const forgetProblem = useCallback(() => {
+    setProblem(null);
+  }, []);
+
   return {
     place,
     choosePlace,
@@ -111,9 +119,9 @@ export function useLoadActs(loadId: string) {
     applyEdits,
     undo,
     problem,
-    forgetProblem: () => {
-      setProblem(null);
-    },
+    forgetProblem,
     isEditing: editMutation.isPending,
   };
 }
+
+export type LoadActs = ReturnType<typeof useLoadActs>;

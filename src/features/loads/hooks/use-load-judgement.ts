@@ -24,7 +24,10 @@ export function useLoadJudgement({ view, policy }: Pick<LoadDetail, 'view' | 'po
       settled: lettered.filter(({ finding }) => accepted.has(finding.key)),
     };
   }, [findings, accepted]);
-  return { layout, findings, open, settled, decision, reckoning };
+  return useMemo(
+    () => ({ layout, findings, open, settled, decision, reckoning }),
+    [layout, findings, open, settled, decision, reckoning],
+  );
 }
 
 export type LoadJudgement = ReturnType<typeof useLoadJudgement>;
