@@ -162,3 +162,13 @@ export type PrintLabelsResponse = z.infer<typeof printLabelsResponseSchema>;
 
 export const labelSheetParamsSchema = z.strictObject({ batchId: idSchema });
 export const labelSheetQuerySchema = z.strictObject({ layout: labelLayoutSchema });
+
+/** One line of a packages file. How the parts hold together is the core's to check. */
+export const packageFieldsSchema = z.strictObject({
+  code: z.string().trim().max(40),
+  itemCode: textSchema(40),
+  isContentsConfirmed: z.boolean(),
+  hasInternalIndicator: z.boolean(),
+  hasExternalIndicator: z.boolean(),
+  destination: z.string().trim().max(80),
+});

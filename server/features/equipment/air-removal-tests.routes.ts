@@ -7,7 +7,7 @@ import {
 import { paths } from '#contract/paths';
 import { defineRoute, type Route } from '../../http/define-route';
 import { listAirRemovalTests } from './air-removal-test-read-model';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { listPossibleReaders, recordAirRemovalTest } from './record-air-removal-test';
 
 export const airRemovalTestRoutes: readonly Route[] = [

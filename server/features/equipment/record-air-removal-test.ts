@@ -13,7 +13,7 @@ import { once } from '../../platform/once';
 import { lockRegister } from '../../platform/register/register';
 import { getAirRemovalTest, listReaders } from './air-removal-test-read-model';
 import type { SterilizerRow } from './equipment-rows';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 
 type Stated = z.output<typeof recordAirRemovalTestRequestSchema>;
 

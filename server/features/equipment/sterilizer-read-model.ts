@@ -6,7 +6,7 @@ import { NotFound } from '../../platform/errors';
 import { pageOf, whereFound, type ListFilters } from '../../platform/paged-list';
 import type { Kept } from '../../platform/register/register';
 import { sterilizerFromRow, type SterilizerRow } from './equipment-rows';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { airRemovalOfDay } from './read-model';
 
 type PanelRow = { readonly sterilizer_id: string; readonly code: string; readonly is_qualified: boolean };

@@ -9,13 +9,13 @@ import {
   unqualifiedPrograms,
 } from '../equipment/read-model';
 import { waitingRuns } from '../packages/read-model';
-import { facilityAt } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { buildingLoadOfCart } from './open-load-read-model';
 
 /** What a load can be opened on now: sterilizers with the programs they are qualified for, carts, and runs that wait. */
 export async function getOpeningOptions({ db, clock }: Services, actor: Actor): Promise<LoadOpeningOptions> {
   const { facilityId } = actor;
-  const { day } = await facilityAt(db, facilityId, clock.now());
+  const { day } = await facilityDay(db, facilityId, clock.now());
   const carts = await Promise.all(
     (await cartsOf(db, facilityId)).map(async (cart) => {
       const used = await buildingLoadOfCart(db, cart.id);

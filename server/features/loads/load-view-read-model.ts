@@ -11,7 +11,7 @@ import {
   sterilizerById,
 } from '../equipment/read-model';
 import { catalogueItems } from '../items/read-model';
-import { facilityAt } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import {
   listAcceptances,
   listCounts,
@@ -41,7 +41,7 @@ export async function readLoadView(db: Db | Transaction, load: LoadRow, at: Date
   const facilityId = load.facility_id;
   const [facility, sterilizerRow, cartRow, programs, packages, holders, kinds, counts, acceptances, policyRow] =
     await Promise.all([
-      facilityAt(db, facilityId, at),
+      facilityDay(db, facilityId, at),
       sterilizerById(db, facilityId, load.sterilizer_id),
       cartWithShelves(db, facilityId, load.cart_id),
       qualifiedPrograms(db, facilityId, load.sterilizer_id),

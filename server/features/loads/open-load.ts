@@ -8,7 +8,7 @@ import { Conflict, InvalidInput, NotFound, RuleRefused } from '../../platform/er
 import { once } from '../../platform/once';
 import { cartWithShelves, qualifiedPrograms, sterilizerById } from '../equipment/read-model';
 import { lockPackages, lockRun, packagesOfRun } from '../packages/read-model';
-import { facilityAt, type FacilityFacts } from './facility-day';
+import { facilityDay, type FacilityDay } from '../../platform/facility-day';
 import { buildingLoadOfCart } from './open-load-read-model';
 
 /** Opens a load on a sterilizer, cart and program, and lists the packages of a run as expected. */
@@ -20,7 +20,7 @@ export async function openLoad(
   const { db, clock, ids } = services;
   return once({ db, clock, actor }, { requestId: request.requestId, act: 'load.open', body: request }, async (trx) => {
     const at = clock.now();
-    const facility = await facilityAt(trx, actor.facilityId, at);
+    const facility = await facilityDay(trx, actor.facilityId, at);
     // Counting the day's loads of a sterilizer: one at a time.
     await trx('sterilizers').where({ id: request.sterilizerId, facility_id: actor.facilityId }).forUpdate().first('id');
     const sterilizer = await sterilizerById(trx, actor.facilityId, request.sterilizerId);
@@ -107,7 +107,7 @@ async function requireCart(
     throw new Conflict('load.cart-in-use', `${cart.name} carries load ${used.number}, opened by ${used.openedBy}.`);
 }
 
-async function greatestCount(trx: Transaction, sterilizerId: string, facility: FacilityFacts): Promise<number> {
+async function greatestCount(trx: Transaction, sterilizerId: string, facility: FacilityDay): Promise<number> {
   const row = await trx('loads')
     .where({ sterilizer_id: sterilizerId, day: facility.day })
     .max<{ max: number | null } | undefined>('count_of_day as max')

@@ -4,7 +4,7 @@ import { z } from 'zod';
 import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import { NotFound } from '../../platform/errors';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { packageHistory } from './package-history-read-model';
 import { findPackageSummary } from './package-read-model';
 

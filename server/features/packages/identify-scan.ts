@@ -3,7 +3,7 @@ import { readScan } from '#domain/label/read-scan';
 import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import { findItemByDeviceIdentifier } from '../items/read-model';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { findPackageSummary } from './package-read-model';
 
 /** What was scanned at the packing station: the maker's code names an item, our own label a package. Changes nothing. */

@@ -1,57 +1,16 @@
 import type { PackRequest, PackResponse } from '#contract/packages';
-import type { ItemKind } from '#domain/load/model';
 import { decidePacking, defaultPackingPolicy, type PackingRefusal } from '#domain/package/decide-packing';
-import { expiresOn, type ExpiryRule } from '#domain/package/expiry';
+import { expiresOn } from '#domain/package/expiry';
 import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
-import type { Transaction } from '../../platform/db';
-import { NotFound, type FieldProblem } from '../../platform/errors';
+import type { FieldProblem } from '../../platform/errors';
 import { once } from '../../platform/once';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { takePackageCodes } from './package-codes';
+import { expiryRuleOf, getItemToPack } from './item-to-pack';
 import { insertPackages, type NewPackage } from './package-store';
 import { refusalError } from './refusal';
-
-type ItemToPack = {
-  readonly id: string;
-  readonly code: string;
-  readonly name: string;
-  readonly kind: ItemKind;
-  readonly mass_kg: number;
-  readonly mass_limit_kg: number | null;
-  readonly expiry_rule: 'event-related' | 'dated';
-  readonly expiry_days: number | null;
-  readonly ifu_reference: string | null;
-  readonly is_retired: boolean;
-};
-
-/** Shared lock: nobody retires the item between the decision and the labels. */
-async function getItemToPack(trx: Transaction, facilityId: string, itemId: string): Promise<ItemToPack> {
-  const row = await trx('items')
-    .where({ 'items.id': itemId, 'items.facility_id': facilityId })
-    .forShare()
-    .first<ItemToPack | undefined>(
-      'items.id',
-      'items.code',
-      'items.name',
-      'items.kind',
-      'items.mass_kg',
-      'items.mass_limit_kg',
-      'items.expiry_rule',
-      'items.expiry_days',
-      'items.ifu_reference',
-      'items.is_retired',
-    );
-  if (!row) throw new NotFound('item.none', 'There is no such item in this catalogue.');
-  return row;
-}
-
-function expiryRuleOf(item: ItemToPack): ExpiryRule {
-  return item.expiry_rule === 'dated' && item.expiry_days !== null
-    ? { rule: 'dated', days: item.expiry_days }
-    : { rule: 'event-related' };
-}
 
 const fieldOf: Readonly<Record<PackingRefusal, string>> = {
   'package.item-retired': '/body/itemId',

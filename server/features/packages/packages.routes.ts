@@ -16,17 +16,26 @@ import {
 import { paths } from '#contract/paths';
 import { parsePackageCode } from '#domain/label/package-code';
 import { defineRoute, type Route } from '../../http/define-route';
+import { registerFileRoutes } from '../../http/register-routes';
 import { drawLabelBatch } from './draw-label-batch';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { getPackage } from './get-package';
 import { identifyScan } from './identify-scan';
 import { packItem } from './pack-item';
 import { listPackages } from './package-read-model';
+import { packageRegister } from './package-register';
 import { printLabels } from './print-labels';
 import { runRoutes } from './runs.routes';
 import { todayRoutes } from './today.routes';
 
 export const packageRoutes: readonly Route[] = [
+  ...registerFileRoutes({
+    register: packageRegister,
+    path: paths.packages,
+    fileName: 'packages',
+    viewing: 'package.view',
+    editing: 'package.pack',
+  }),
   defineRoute({
     method: 'get',
     path: paths.packages,

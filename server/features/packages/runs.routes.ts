@@ -17,7 +17,7 @@ import {
 import { defineRoute, type Route } from '../../http/define-route';
 import { NotFound } from '../../platform/errors';
 import { addRun } from './add-run';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { listStagedPackages } from './package-read-model';
 import { findRunSummary, listRuns } from './run-read-model';
 import { scanIntoRun } from './scan-into-run';

@@ -5,7 +5,7 @@ import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import type { Transaction } from '../../platform/db';
 import { once } from '../../platform/once';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { setRun } from './package-store';
 import { findPackageByCode, lockPackages, type RunFacts } from './read-model';
 import { lockWaitingRun, recordStaging, type RunAct } from './run-acts';

@@ -5,7 +5,7 @@ import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import type { FieldProblem } from '../../platform/errors';
 import { once } from '../../platform/once';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { setRun } from './package-store';
 import { lockOwnPackages, lockOwnRun, lockWaitingRun, recordRun, recordStaging, type RunAct } from './run-acts';
 import { refusalError } from './refusal';

@@ -5,7 +5,7 @@ import { shiftAt } from '#domain/today/shift-at';
 import { waitsFor } from '#domain/today/waits';
 import { defineRoute, type Route, type Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
-import { facilityDay } from './facility-day';
+import { facilityDay } from '../../platform/facility-day';
 import { listRuns } from './run-read-model';
 import { cartsOfToday, countPacked, loadsOfToday, sterilizersOfToday } from './today-read-model';
 

@@ -16,14 +16,25 @@ export type AuditPayloads = {
   'items.imported': { readonly added: number; readonly changed: number; readonly refused: number };
   'equipment.added': { readonly what: string; readonly code: string };
   'equipment.changed': { readonly what: string; readonly before: unknown; readonly after: unknown };
-  'equipment.imported': { readonly what: string; readonly added: number; readonly changed: number; readonly refused: number };
+  'equipment.imported': {
+    readonly what: string;
+    readonly added: number;
+    readonly changed: number;
+    readonly refused: number;
+  };
   'package.packed': { readonly code: string; readonly itemCode: string };
+  'package.changed': { readonly before: unknown; readonly after: unknown };
+  'packages.imported': { readonly added: number; readonly changed: number; readonly refused: number };
   'package.label-printed': { readonly copy: number; readonly reason: string | null };
   'package.staged': { readonly runId: string };
   'package.unstaged': { readonly runId: string };
   'run.added': { readonly name: string };
   'run.changed': { readonly before: unknown; readonly after: unknown };
-  'air-removal-test.recorded': { readonly sterilizer: string; readonly result: 'passed' | 'failed'; readonly testDay: string };
+  'air-removal-test.recorded': {
+    readonly sterilizer: string;
+    readonly result: 'passed' | 'failed';
+    readonly testDay: string;
+  };
   'load.opened': { readonly number: string; readonly listed: number };
   'load.package-scanned': { readonly packageCode: string; readonly entry: string; readonly difference: LoadDifference };
   'load.scan-refused': { readonly answer: string; readonly read: string; readonly entry: string };

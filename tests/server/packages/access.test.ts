@@ -25,6 +25,10 @@ const packageIds = () => ({ requestId: anId(), packageIds: [target.packageId] })
 /** Every route of packages, runs and today, with a request that would be carried out for somebody who may. */
 const calls = [
   { method: 'get', path: () => '/api/packages' },
+  { method: 'get', path: () => '/api/packages/export' },
+  { method: 'get', path: () => '/api/packages/import/template' },
+  { method: 'post', path: () => '/api/packages/import/preview', body: () => ({}) },
+  { method: 'post', path: () => '/api/packages/import', body: () => ({ requestId: anId(), mode: 'good-rows' }) },
   { method: 'get', path: () => `/api/packages/${target.packageCode}` },
   { method: 'post', path: () => '/api/packages', body: () => packRequest(target.itemId) },
   { method: 'post', path: () => '/api/packages/identify', body: () => ({ raw: target.packageCode }) },
