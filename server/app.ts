@@ -69,7 +69,10 @@ export function createApp(services: Services, settings: AppSettings): Express {
 
 function serveClient(app: Express, clientDir: string | null): void {
   if (clientDir === null || !existsSync(path.join(clientDir, 'index.html'))) return;
-  app.use('/assets', express.static(path.join(clientDir, 'assets'), { immutable: true, maxAge: '1y', fallthrough: false }));
+  app.use(
+    '/assets',
+    express.static(path.join(clientDir, 'assets'), { immutable: true, maxAge: '1y', fallthrough: false }),
+  );
   app.use(express.static(clientDir, { index: false, maxAge: 0 }));
   app.get('/{*page}', (_request, response) => {
     response.set('cache-control', 'no-cache').sendFile('index.html', { root: clientDir });

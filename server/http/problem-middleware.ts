@@ -10,7 +10,9 @@ function fromParser(error: unknown): AppError | null {
   if (error instanceof MulterError) {
     return error.code === 'LIMIT_FILE_SIZE'
       ? new TooLarge('file.too-large', 'This file is too large to be taken in one go.', { cause: error })
-      : new InvalidInput('file.not-understood', 'This upload cannot be read. Choose one file and try again.', { cause: error });
+      : new InvalidInput('file.not-understood', 'This upload cannot be read. Choose one file and try again.', {
+          cause: error,
+        });
   }
   if (typeof error !== 'object' || error === null || !('type' in error)) return null;
   switch (error.type) {
@@ -53,7 +55,8 @@ export function problemMiddleware(logger: Logger): ErrorRequestHandler {
     }
     const reference = randomUUID();
     const known = error instanceof AppError ? error : (fromParser(error) ?? fromDatabase(error) ?? fromExpress(error));
-    if (!known) logger.error({ err: error, reference, method: request.method, path: request.path }, 'unexpected failure');
+    if (!known)
+      logger.error({ err: error, reference, method: request.method, path: request.path }, 'unexpected failure');
     else logger.info({ code: known.code, reference, path: request.path }, 'refused');
     const problem: ProblemDetails = {
       type: 'about:blank',
@@ -66,7 +69,11 @@ export function problemMiddleware(logger: Logger): ErrorRequestHandler {
       ...(known?.fields ? { fields: [...known.fields] } : {}),
     };
     if (known instanceof TooManyTries) response.set('retry-after', String(known.retryAfterSeconds));
-    response.status(problem.status).type(problemMediaType).set('cache-control', 'no-store').send(JSON.stringify(problem));
+    response
+      .status(problem.status)
+      .type(problemMediaType)
+      .set('cache-control', 'no-store')
+      .send(JSON.stringify(problem));
   };
 }
 

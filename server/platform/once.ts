@@ -10,7 +10,12 @@ export type OnceContext = {
   readonly actor: Actor;
 };
 
-type RequestRow = { readonly person_id: string; readonly act: string; readonly body_digest: string; readonly response: unknown };
+type RequestRow = {
+  readonly person_id: string;
+  readonly act: string;
+  readonly body_digest: string;
+  readonly response: unknown;
+};
 
 /**
  * Does a write exactly once. The client-made `requestId` is taken first, in the same transaction as the work, so a

@@ -1,6 +1,12 @@
 import type { Permission, Role } from './permissions';
 
-const viewing = ['load.view', 'item.view', 'equipment.view', 'package.view', 'policy.view'] as const satisfies Permission[];
+const viewing = [
+  'load.view',
+  'item.view',
+  'equipment.view',
+  'package.view',
+  'policy.view',
+] as const satisfies Permission[];
 
 const building = [
   ...viewing,

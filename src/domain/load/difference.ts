@@ -20,7 +20,11 @@ function isSame(one: unknown, other: unknown): boolean {
   return true;
 }
 
-function changesOf<Thing>(before: readonly Thing[], after: readonly Thing[], idOf: (thing: Thing) => string): Change<Thing>[] {
+function changesOf<Thing>(
+  before: readonly Thing[],
+  after: readonly Thing[],
+  idOf: (thing: Thing) => string,
+): Change<Thing>[] {
   const was = new Map(before.map((thing) => [idOf(thing), thing]));
   const is = new Map(after.map((thing) => [idOf(thing), thing]));
   const changes: Change<Thing>[] = [];
