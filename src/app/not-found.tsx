@@ -4,9 +4,10 @@ import { LinkButton } from '../components/ui/link-button';
 /** An address with nothing behind it. */
 export function NotFound({ sentence }: { sentence?: string | undefined }) {
   return (
-    <main className="max-w-130 p-6">
+    <div className="max-w-130 p-6">
       <title>Not here · Paperside</title>
       <EmptyState
+        level={1}
         title="There is nothing at this address"
         act={
           <LinkButton to="/" size="small">
@@ -16,6 +17,6 @@ export function NotFound({ sentence }: { sentence?: string | undefined }) {
       >
         {sentence ?? 'It may have been typed wrong, or belong to another place of work.'}
       </EmptyState>
-    </main>
+    </div>
   );
 }

@@ -12,6 +12,7 @@ export function RequirePermission({ any }: { any: readonly Permission[] }) {
   return (
     <div className="max-w-130 p-6">
       <EmptyState
+        level={1}
         title="This screen is for another role"
         act={
           <LinkButton to="/" size="small">

@@ -3,11 +3,12 @@ import { sentenceOf } from '../../lib/errors';
 import { Icon } from '../icon';
 import { Button } from './button';
 
-/** Headings of these panels: 2 on a screen of their own, 3 inside a panel that has a heading. */
-type Level = 2 | 3;
+/** Headings of these panels: 1 when they are all of the screen, 2 below its head, 3 inside a panel that has a heading. */
+type Level = 1 | 2 | 3;
 
 function StateHeading({ level, children }: { level: Level; children: ReactNode }) {
-  return level === 2 ? <h2 className="text-head">{children}</h2> : <h3 className="text-head">{children}</h3>;
+  const Heading = ({ 1: 'h1', 2: 'h2', 3: 'h3' } as const)[level];
+  return <Heading className="text-head">{children}</Heading>;
 }
 
 /** Nothing here yet: one sentence, one act. No pictures. */
@@ -108,7 +109,7 @@ export function Banner({ title, children, foot }: { title: ReactNode; children?:
     <section role="status" className="bg-straw-1 px-5 py-3.5 text-ink-1 shadow-[inset_0_0_0_2px_var(--color-straw-3)]">
       <h2 className="flex items-center gap-2.5 text-head">
         <Icon name="off" size={22} />
-        {title}
+        <span>{title}</span>
       </h2>
       {children !== undefined && <div className="mt-1 text-row">{children}</div>}
       {foot !== undefined && <p className="mt-2 text-small font-semibold">{foot}</p>}

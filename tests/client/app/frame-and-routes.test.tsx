@@ -156,11 +156,21 @@ describe('an address', () => {
     expect(within(panel).getByRole('link', { name: 'Go to Today' })).toBeVisible();
   });
 
-  it('is told apart from a server that does not answer', async () => {
-    stubServer({ 'GET /api/session': () => ({ silence: true }) });
+  it('comes by itself once a server that did not answer does', async () => {
+    let isUp = false;
+    stubServer({
+      'GET /api/session': () => (isUp ? { json: aSession() } : { silence: true }),
+      'GET /api/health': () => (isUp ? { json: { status: 'ok' } } : { silence: true }),
+    });
     vi.spyOn(console, 'error').mockImplementation(() => undefined);
+    vi.useFakeTimers({ shouldAdvanceTime: true });
     renderApp('/loads', withPlainScreens);
     expect(await screen.findByRole('heading', { name: 'The server did not answer' })).toBeVisible();
+    await act(() => vi.advanceTimersByTimeAsync(4_100));
+    expect(screen.getByRole('heading', { name: 'The server did not answer' })).toBeVisible();
+    isUp = true;
+    await act(() => vi.advanceTimersByTimeAsync(4_100));
+    expect(await screen.findByText('The screen of loads')).toBeVisible();
   });
 });
 
