@@ -16,8 +16,8 @@ import { demonstrationPersonId } from './demonstration-people';
 const hospitalZone = 'America/Chicago';
 const minuteMs = 60_000;
 
-/** Item code and how many packages of it. */
-type Contents = readonly (readonly [code: string, quantity: number])[];
+/** Item code, how many packages of it, and where they are asked for. */
+type Contents = readonly (readonly [code: string, quantity: number, destination?: string])[];
 
 type RunPlan = {
   readonly name: string;
@@ -41,10 +41,10 @@ export const demonstrationRuns = {
       ['P-01', 3],
       ['P-02', 3],
       ['P-03', 3],
-      ['P-04', 3],
-      ['P-16', 2],
-      ['P-17', 2],
-      ['C-14', 13],
+      ['P-04', 3, 'Labor ward'],
+      ['P-16', 2, 'Clinic 3'],
+      ['P-17', 2, 'Dental clinic'],
+      ['C-14', 13, 'Eye clinic'],
       ['PCD-02', 1],
     ],
   },
@@ -55,10 +55,10 @@ export const demonstrationRuns = {
     wantedInMinutes: 165,
     contents: [
       ['PCD-01', 1],
-      ['C-18', 1],
-      ['C-05', 1],
-      ['W-12', 1],
-      ['C-14', 2],
+      ['C-18', 1, 'Emergency'],
+      ['C-05', 1, 'Room 4'],
+      ['W-12', 1, 'Room 4'],
+      ['C-14', 2, 'Eye clinic'],
     ],
   },
   gravity: {
@@ -67,16 +67,16 @@ export const demonstrationRuns = {
     program: 'G121-30',
     wantedInMinutes: 240,
     contents: [
-      ['G-01', 4],
-      ['G-02', 2],
+      ['G-01', 4, 'Clinic 3'],
+      ['G-02', 2, 'Women’s clinic'],
     ],
   },
 } as const satisfies Readonly<Record<string, RunPlan>>;
 
 /** Packed, and in no run yet: C-13 may not share a load with the others, and C-12 is heavier than a set may be. */
 const onTheTable: Contents = [
-  ['P-05', 2],
-  ['P-06', 1],
+  ['P-05', 2, 'Emergency'],
+  ['P-06', 1, 'Clinic 3'],
   ['P-14', 2],
   ['P-20', 1],
   ['W-01', 1],
@@ -84,7 +84,7 @@ const onTheTable: Contents = [
   ['C-01', 1],
   ['C-17', 1],
   ['C-12', 1],
-  ['C-13', 1],
+  ['C-13', 1, 'Room 7'],
 ];
 
 type Odd = {
@@ -225,7 +225,7 @@ async function seedRun(
     payload: { name: plan.name },
   });
   const made: Made[] = [];
-  for (const [turn, [code, quantity]] of plan.contents.entries()) {
+  for (const [turn, [code, quantity, destination = '']] of plan.contents.entries()) {
     const packedBy = packers[turn % packers.length] ?? stagedBy;
     made.push(
       ...(await packAll(trx, {
@@ -234,7 +234,7 @@ async function seedRun(
         quantity,
         packedBy,
         packedAt: before(250 - 17 * turn),
-        destination: turn % 3 === 0 ? 'Room 4' : '',
+        destination,
       })),
     );
   }
@@ -295,13 +295,14 @@ export async function seedPackages(trx: Knex.Transaction, now: Date): Promise<vo
     await trx('items').where({ facility_id: hospitalId }).select<ItemRow[]>('id', 'code', 'kind'),
   );
   for (const plan of Object.values(demonstrationRuns)) await seedRun(trx, plan, itemOf, now);
-  for (const [turn, [code, quantity]] of onTheTable.entries()) {
+  for (const [turn, [code, quantity, destination = '']] of onTheTable.entries()) {
     await packAll(trx, {
       facilityId: hospitalId,
       item: itemOf(code),
       quantity,
       packedBy: demonstrationPersonId(turn % 2 === 0 ? 'HS' : 'JQ'),
       packedAt: new Date(now.getTime() - (95 - 8 * turn) * minuteMs),
+      destination,
     });
   }
   await seedOdd(trx, itemOf, now);

@@ -62,6 +62,8 @@ export const stagingScanRequestSchema = z.strictObject({
 export const stagingScanResponseSchema = z.object({
   /** Only `taken` changes anything. */
   answer: z.enum(['taken', 'already-here', 'not-ready', 'not-known', 'held', 'called-back']),
+  /** Taken, but look at this. */
+  look: z.enum(['program-not-permitted']).nullable(),
   sentence: z.string(),
   /** As it was read, for showing; shortened and without control characters. */
   code: z.string(),

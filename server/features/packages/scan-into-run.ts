@@ -1,10 +1,13 @@
 import type { StagingScanResponse } from '#contract/runs';
 import { readScan, type Scan } from '#domain/label/read-scan';
+import { fits } from '#domain/load/cycle-match';
 import { decideStaging, type StagingRefusal } from '#domain/package/decide-staging';
 import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import type { Transaction } from '../../platform/db';
 import { once } from '../../platform/once';
+import { programById } from '../equipment/read-model';
+import { catalogueItems } from '../items/read-model';
 import { facilityDay } from '../../platform/facility-day';
 import { setRun } from './package-store';
 import { findPackageByCode, lockPackages, type RunFacts } from './read-model';
@@ -59,7 +62,7 @@ export async function scanIntoRun(
     const run = await lockWaitingRun(trx, actor, runId);
     const scan = readScan(request.raw);
     if (scan.kind !== 'package') {
-      return { answer: 'not-known', sentence: notAPackage(scan), code: shown(request.raw), package: null };
+      return { answer: 'not-known', look: null, sentence: notAPackage(scan), code: shown(request.raw), package: null };
     }
     return stageScanned(trx, act, run, scan.code);
   });
@@ -69,11 +72,11 @@ async function stageScanned(trx: Transaction, act: RunAct, run: RunFacts, code: 
   const known = await findPackageByCode(trx, code);
   // Another facility's label is not known here: not even that it exists.
   if (known?.facilityId !== act.actor.facilityId) {
-    return { answer: 'not-known', sentence: `No package here has the code ${code}.`, code, package: null };
+    return { answer: 'not-known', look: null, sentence: `No package here has the code ${code}.`, code, package: null };
   }
   await lockPackages(trx, [known.id]);
   const facts = (await findPackageByCode(trx, code)) ?? known;
-  const about = { code, package: { id: facts.id, code: facts.code, itemName: facts.itemName } };
+  const about = { look: null, code, package: { id: facts.id, code: facts.code, itemName: facts.itemName } };
   const { day } = await facilityDay(trx, act.actor.facilityId, act.at);
   const decision = decideStaging(facts, run, day);
   if (!decision.ok) return { ...about, answer: answerTo[decision.refusal.code], sentence: decision.refusal.sentence };
@@ -82,5 +85,28 @@ async function stageScanned(trx: Transaction, act: RunAct, run: RunFacts, code: 
   }
   await setRun(trx, [facts.id], run.id);
   await recordStaging(trx, act, 'package.staged', [facts.id], run.id);
-  return { ...about, answer: 'taken', sentence: `${facts.itemName} waits in “${run.name}”.` };
+  const unfit = await programNotPermitted(trx, act, run, facts.itemId);
+  return unfit === null
+    ? { ...about, answer: 'taken', sentence: `${facts.itemName} waits in “${run.name}”.` }
+    : {
+        ...about,
+        answer: 'taken',
+        look: 'program-not-permitted',
+        sentence: `Its instructions for use do not permit ${unfit}. In that load it will be in the way.`,
+      };
+}
+
+/** Code of the run's program where the item's instructions for use name cycles and this is none of them. */
+async function programNotPermitted(
+  trx: Transaction,
+  act: RunAct,
+  run: RunFacts,
+  itemId: string,
+): Promise<string | null> {
+  if (run.programId === null) return null;
+  const { facilityId } = act.actor;
+  const program = await programById(trx, facilityId, run.programId);
+  const [item] = await catalogueItems(trx, facilityId, [itemId]);
+  if (!program || !item || item.cycleNeeds.length === 0 || fits(program, item.cycleNeeds)) return null;
+  return program.code;
 }

@@ -53,6 +53,7 @@ export function Component() {
         return (
           <RunsBoard
             chosenId={id}
+            boardAddress={runsAddress}
             addressOf={(runId) => `${runsAddress}/${runId}`}
             onChoose={(runId) => {
               void navigate(`${runsAddress}/${runId}`);

@@ -269,8 +269,8 @@ export function PackageDrawing({ item, hasLabel }: DrawingProps) {
   return (
     <svg
       viewBox={`${left} ${top} ${right - left} ${bottom - top}`}
-      className="h-full w-full"
-      preserveAspectRatio="xMidYMid meet"
+      className="mx-auto block max-h-72 w-full"
+      preserveAspectRatio="xMidYMin meet"
       aria-hidden="true"
     >
       {frame.body}

@@ -52,7 +52,7 @@ const columns: readonly Column<PackageSummary>[] = [
     ),
   },
   { key: 'code', header: 'Code', isWideOnly: true, width: '9.5rem', cell: (one) => <Code>{one.code}</Code> },
-  { key: 'state', header: 'Is', width: '11rem', cell: (one) => <StateWords one={one} /> },
+  { key: 'state', header: 'Now', width: '11rem', cell: (one) => <StateWords one={one} /> },
   { key: 'where', header: 'Waits in', isWideOnly: true, cell: (one) => <WhereIs one={one} /> },
   { key: 'goes', header: 'Goes to', isWideOnly: true, width: '8rem', cell: (one) => one.destination },
   {

@@ -4,15 +4,18 @@ import type { ReactNode } from 'react';
 import { Icon } from '../../../components/icon';
 import { Button } from '../../../components/ui/button';
 import { Code } from '../../../components/ui/code';
+import { ProofStripe } from '../../../components/proof-stripe';
 import { LinkButton } from '../../../components/ui/link-button';
 import { sentenceOf } from '../../../lib/errors';
 import { countOf } from '../../../lib/format';
+import { packingStripe, type Said } from '../packing-stripe';
 import { labelPlaceInWords, PackageDrawing } from './package-drawing';
 
 export type PackedBatch = {
   readonly item: Item;
   readonly packages: PackResponse['packages'];
   readonly warnings: PackResponse['warnings'];
+  readonly said: Said;
   /** Address of the labels; null while they are not printed. */
   readonly pdf: string | null;
 };
@@ -32,7 +35,7 @@ export function PackedPanel({ batch, printError, isPrinting, onPrintAgain, onPac
   const { item, packages, warnings, pdf } = batch;
   const heading = packages.length === 1 ? item.name : `${packages.length} × ${item.name}`;
   return (
-    <div className="grid content-start gap-x-8 gap-y-5 tablet:grid-cols-[minmax(0,1fr)_13.5rem]">
+    <div className="grid content-start gap-x-8 gap-y-5 tablet:grid-cols-[minmax(0,1fr)_14rem]">
       <header className="flex gap-4 tablet:col-span-2">
         <div className="grid h-22 w-16 flex-none animate-weld place-items-center content-center gap-1.5 weld text-small font-label">
           <Icon name="tick" size={34} />
@@ -45,6 +48,12 @@ export function PackedPanel({ batch, printError, isPrinting, onPrintAgain, onPac
           </p>
         </div>
       </header>
+      <div className="tablet:col-span-2">
+        <ProofStripe
+          stretches={packingStripe(item, batch.said, pdf === null ? null : packages.length)}
+          label="What is said of these packages"
+        />
+      </div>
       <div className="grid content-start gap-5">
         <ul aria-label="Codes" className="flex max-h-40 flex-wrap gap-x-5 gap-y-1 overflow-y-auto text-body">
           {packages.map((one) => (
@@ -81,7 +90,7 @@ export function PackedPanel({ batch, printError, isPrinting, onPrintAgain, onPac
         </div>
         {staging}
       </div>
-      <div className="h-56 max-tablet:hidden">
+      <div className="max-tablet:hidden">
         <PackageDrawing item={item} hasLabel={pdf !== null} />
       </div>
     </div>

@@ -3,7 +3,7 @@ import type { LabelLayout, PackRequest } from '#contract/packages';
 import { decidePacking, defaultPackingPolicy } from '#domain/package/decide-packing';
 import { useState } from 'react';
 import { ImplantMark, kindInWords } from '../../../components/item-kind';
-import { ProofStripe, type Stretch } from '../../../components/proof-stripe';
+import { ProofStripe } from '../../../components/proof-stripe';
 import { Button } from '../../../components/ui/button';
 import { CheckboxField } from '../../../components/ui/checkbox-field';
 import { Code } from '../../../components/ui/code';
@@ -14,6 +14,7 @@ import { useFacility } from '../../../lib/facility';
 import { countOf, formatSize } from '../../../lib/format';
 import { newRequestId } from '../../../lib/request-id';
 import { labelPlaceInWords, PackageDrawing } from './package-drawing';
+import { packingStripe, type Said } from '../packing-stripe';
 import { QuantityField, quantityOf } from './quantity-field';
 
 type PackingPanelProps = {
@@ -24,20 +25,6 @@ type PackingPanelProps = {
   readonly onLayout: (layout: LabelLayout) => void;
   readonly onPack: (request: PackRequest) => void;
 };
-
-type Said = { readonly contents: boolean; readonly internal: boolean; readonly external: boolean };
-
-function stripeOf(item: Item, said: Said): readonly Stretch[] {
-  const stretch = (label: string, isSaid: boolean, words: string): Stretch =>
-    isSaid ? { label, state: 'proven', words } : { label, state: 'not-yet' };
-  return [
-    { label: 'Item', state: 'proven', words: item.code },
-    stretch('Contents', said.contents, 'complete'),
-    stretch('Internal CI', said.internal, 'inside'),
-    stretch('External CI', said.external, 'on it'),
-    { label: 'Label', state: 'not-yet' },
-  ];
-}
 
 /** What has to be said of a package before it gets its label: each thing by an act of its own. */
 export function PackingPanel({ item, isWaiting, error, layout, onLayout, onPack }: PackingPanelProps) {
@@ -72,7 +59,7 @@ export function PackingPanel({ item, isWaiting, error, layout, onLayout, onPack 
 
   return (
     <form
-      className="grid h-full content-start gap-x-8 gap-y-4 tablet:grid-cols-[minmax(0,1fr)_13.5rem]"
+      className="grid gap-x-8 gap-y-4 tablet:h-full tablet:grid-cols-[minmax(0,1fr)_14rem] tablet:grid-rows-[auto_auto_minmax(0,1fr)_auto]"
       onSubmit={(event) => {
         event.preventDefault();
         if (block !== undefined || quantity === null || isWaiting) return;
@@ -99,12 +86,13 @@ export function PackingPanel({ item, isWaiting, error, layout, onLayout, onPack 
       </header>
 
       <div className="tablet:col-span-2">
-        <ProofStripe stretches={stripeOf(item, said)} label="What is said of this package" />
+        <ProofStripe stretches={packingStripe(item, said, null)} label="What is said of this package" />
       </div>
 
-      <div className="grid content-start gap-4">
+      <div className="grid content-start gap-6">
         <div className="divide-y divide-film-2">
           <CheckboxField
+            className="py-2"
             label="Contents complete and in order"
             hint="You have looked: clean, dry, whole, and everything on the list is there."
             checked={said.contents}
@@ -113,6 +101,7 @@ export function PackingPanel({ item, isWaiting, error, layout, onLayout, onPack 
             }}
           />
           <CheckboxField
+            className="py-2"
             label="Internal CI lies inside"
             hint="In each package, where steam comes last."
             checked={said.internal}
@@ -121,6 +110,7 @@ export function PackingPanel({ item, isWaiting, error, layout, onLayout, onPack 
             }}
           />
           <CheckboxField
+            className="py-2"
             label="External CI is on the outside"
             hint="Tape, or the printed field of the pouch."
             checked={said.external}
@@ -153,13 +143,13 @@ export function PackingPanel({ item, isWaiting, error, layout, onLayout, onPack 
       </div>
 
       <figure className="max-tablet:hidden">
-        <div className="h-56">
-          <PackageDrawing item={item} hasLabel={false} />
-        </div>
-        <figcaption className="mt-2 text-small text-ink-2">{labelPlaceInWords(item.kind)}</figcaption>
+        <PackageDrawing item={item} hasLabel={false} />
+        <figcaption className="mt-3 text-center text-small text-ink-2">
+          {labelPlaceInWords(item.kind)} Drawn to scale.
+        </figcaption>
       </figure>
 
-      <footer className="grid gap-3 tablet:col-span-2">
+      <footer className="grid gap-3 border-t border-film-2 pt-4 tablet:col-span-2">
         {warnings.length > 0 && (
           <ul className="grid gap-1 border-l-4 border-straw-3 bg-straw-1 px-4 py-2.5 text-row">
             {warnings.map((warning) => (

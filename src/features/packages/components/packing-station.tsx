@@ -4,6 +4,7 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useState, type ReactNode } from 'react';
 import { Icon } from '../../../components/icon';
 import { useAnnounce } from '../../../components/ui/announcer';
+import { Button } from '../../../components/ui/button';
 import { FilmPanel } from '../../../components/ui/film-panel';
 import { ScanAnswer } from '../../../components/ui/scan-answer';
 import { sentenceOf } from '../../../lib/errors';
@@ -23,12 +24,14 @@ type PackingStationProps = {
   readonly stagingOf: (packageIds: readonly string[]) => ReactNode;
   /** One of our own labels was scanned: shows that package. */
   readonly onPackage: (one: PackageSummary) => void;
+  /** Types a code, or reads it with the camera. */
+  readonly keyInOf: (props: { readonly onCode: (code: string) => void; readonly onClose: () => void }) => ReactNode;
 };
 
 type Told = { readonly turn: number; readonly title: string; readonly sentence: string };
 
 /** Choose or scan an item, say what is inside, print its labels. */
-export function PackingStation({ stagingOf, onPackage }: PackingStationProps) {
+export function PackingStation({ stagingOf, onPackage, keyInOf }: PackingStationProps) {
   const client = useQueryClient();
   const announce = useAnnounce();
   const sounds = useSounds();
@@ -40,6 +43,7 @@ export function PackingStation({ stagingOf, onPackage }: PackingStationProps) {
   const [batch, setBatch] = useState<PackedBatch | null>(null);
   const [layout, setLayout] = useState<LabelLayout>('single');
   const [printRequestId, setPrintRequestId] = useState(newRequestId);
+  const [isKeyingIn, setIsKeyingIn] = useState(false);
   const [told, setTold] = useState<Told | null>(null);
 
   function choose(next: Item) {
@@ -83,9 +87,12 @@ export function PackingStation({ stagingOf, onPackage }: PackingStationProps) {
     }
   }
 
-  useScanner((scan) => {
-    void take(scan.text);
-  });
+  useScanner(
+    (scan) => {
+      void take(scan.text);
+    },
+    { isOn: !isKeyingIn },
+  );
 
   async function printFor(made: PackedBatch, requestId: string, tab: FileTab) {
     try {
@@ -106,7 +113,12 @@ export function PackingStation({ stagingOf, onPackage }: PackingStationProps) {
     const tab = openFileTab();
     try {
       const { packages, warnings } = await pack.mutateAsync(request);
-      const made: PackedBatch = { item: of, packages, warnings, pdf: null };
+      const said = {
+        contents: request.isContentsConfirmed,
+        internal: request.hasInternalIndicator,
+        external: request.hasExternalIndicator,
+      };
+      const made: PackedBatch = { item: of, packages, warnings, said, pdf: null };
       const requestId = newRequestId();
       setPrintRequestId(requestId);
       setBatch(made);
@@ -120,10 +132,24 @@ export function PackingStation({ stagingOf, onPackage }: PackingStationProps) {
 
   return (
     <div className="grid gap-6 tablet:h-full tablet:min-h-0 tablet:grid-cols-[minmax(18rem,25rem)_minmax(0,1fr)]">
-      <ItemChooser chosenId={item?.id ?? null} onChoose={choose} />
+      <div
+        className={`grid min-h-0 gap-3 tablet:grid-rows-[minmax(0,1fr)] ${item === null ? '' : 'max-tablet:hidden'}`}
+      >
+        <Button
+          kind="quiet"
+          icon="camera"
+          className="tablet:hidden"
+          onPress={() => {
+            setIsKeyingIn(true);
+          }}
+        >
+          Read a code, or key it in
+        </Button>
+        <ItemChooser chosenId={item?.id ?? null} onChoose={choose} />
+      </div>
       <FilmPanel
         label="Pack this item"
-        className="min-h-0 overflow-y-auto px-6 pt-6 pb-5 max-tablet:-mx-4 max-tablet:px-4"
+        className={`min-h-0 overflow-y-auto px-6 pt-6 pb-5 max-tablet:-mx-4 max-tablet:px-4 ${item === null && told === null ? 'max-tablet:hidden' : ''}`}
       >
         {told !== null && (
           <div key={told.turn} role="status" className="mb-5 animate-flash-edge">
@@ -132,8 +158,24 @@ export function PackingStation({ stagingOf, onPackage }: PackingStationProps) {
             </ScanAnswer>
           </div>
         )}
+        {item !== null && (
+          <Button
+            kind="plain"
+            icon="left"
+            className="mb-3 -ml-3 tablet:hidden"
+            onPress={() => {
+              setItem(null);
+            }}
+          >
+            Another item
+          </Button>
+        )}
         {item === null ? (
-          <Ready />
+          <Ready
+            onKeyIn={() => {
+              setIsKeyingIn(true);
+            }}
+          />
         ) : batch === null ? (
           <PackingPanel
             key={`${item.id} ${turn}`}
@@ -161,11 +203,21 @@ export function PackingStation({ stagingOf, onPackage }: PackingStationProps) {
           />
         )}
       </FilmPanel>
+      {isKeyingIn &&
+        keyInOf({
+          onCode: (code) => {
+            setIsKeyingIn(false);
+            void take(code);
+          },
+          onClose: () => {
+            setIsKeyingIn(false);
+          },
+        })}
     </div>
   );
 }
 
-function Ready() {
+function Ready({ onKeyIn }: { onKeyIn: () => void }) {
   return (
     <div className="grid h-full place-content-center justify-items-center gap-4 px-6 py-10 text-center">
       <span className="grid h-22 w-16 place-items-center bg-paper-0 text-film-5 shadow-[inset_0_0_0_2.4px_var(--color-film-4)]">
@@ -175,6 +227,9 @@ function Ready() {
       <p className="max-w-[34rem] text-[1.0625rem]/[1.4375rem]">
         Then say that the contents are complete and that the CIs are in place. Only then does it get its label.
       </p>
+      <Button kind="quiet" icon="camera" onPress={onKeyIn}>
+        Read a code with the camera, or key it in
+      </Button>
     </div>
   );
 }
