@@ -12,11 +12,13 @@ function collect(message: string): void {
 }
 const customLogger = { ...createLogger('warn'), warn: collect, warnOnce: collect };
 
-await build({ customLogger, build: { outDir, emptyOutDir: true } });
-
-const assets = readdirSync(path.join(outDir, 'assets'));
-if (!assets.some((name) => name.endsWith('.woff2'))) {
-  warnings.push('The font is not in the build: its @import has to come before every other rule of the style sheet.');
+try {
+  await build({ customLogger, build: { outDir, emptyOutDir: true } });
+  if (!readdirSync(path.join(outDir, 'assets')).some((name) => name.endsWith('.woff2'))) {
+    collect('The font is not in the build: its @import has to come before every other rule of the style sheet.');
+  }
+} catch (error) {
+  collect(error instanceof Error ? error.message : String(error));
 }
 if (warnings.length > 0) {
   console.error(warnings.join('\n'));
