@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { problemMediaType, type ProblemDetails } from '#contract/problem';
 import type { ErrorRequestHandler, RequestHandler } from 'express';
 import { MulterError } from 'multer';
-import { AppError, InvalidInput, NotFound, TooLarge, TooManyTries } from '../platform/errors';
+import { AppError, Conflict, InvalidInput, NotFound, TooLarge, TooManyTries } from '../platform/errors';
 import type { Logger } from '../platform/logger';
 
 /** What the body parser and the upload parser throw, in our own words. */
@@ -32,11 +32,17 @@ function fromParser(error: unknown): AppError | null {
 
 // PostgreSQL error codes (manual, appendix A) that mean "this text cannot be kept", not "we are broken".
 const textRefused = new Set(['22021', '22P05', '22P02']);
+// Two transactions that waited for each other, or could not be put one after the other: one was rolled back whole.
+const gaveWay = new Set(['40P01', '40001']);
 
 function fromDatabase(error: unknown): AppError | null {
   if (typeof error !== 'object' || error === null || !('code' in error) || typeof error.code !== 'string') return null;
   if (textRefused.has(error.code)) {
     return new InvalidInput('request.text-not-kept', 'This has a character that cannot be kept.', { cause: error });
+  }
+  if (gaveWay.has(error.code)) {
+    const sentence = 'Somebody else changed the same thing at this moment. Nothing was saved here; try again.';
+    return new Conflict('request.gave-way', sentence, { cause: error });
   }
   return null;
 }

@@ -56,7 +56,8 @@ export async function lockPerson(
   const row = await trx('people')
     .join('memberships', 'memberships.person_id', 'people.id')
     .where({ 'people.id': personId, 'memberships.facility_id': facilityId })
-    .forUpdate()
+    // Not for update: whoever acts holds a reference to their own row, and may be waiting for this facility.
+    .forNoKeyUpdate()
     .first<LockedRow | undefined>(
       'people.id',
       'people.staff_number',

@@ -77,7 +77,7 @@ export async function getCredentials(db: Db, personId: string): Promise<Credenti
 export async function lockCredentials(trx: Transaction, personId: string): Promise<Credentials> {
   const row = await trx('people')
     .where({ id: personId })
-    .forUpdate()
+    .forNoKeyUpdate()
     .first<CredentialsRow | undefined>(...columns);
   if (!row) throw new Error('the person who is signed in is not there');
   return fromRow(row);

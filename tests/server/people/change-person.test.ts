@@ -1,4 +1,6 @@
-import { beforeEach, describe, expect, test } from 'vitest';
+import type { Test } from 'supertest';
+import type TestAgent from 'supertest/lib/agent';
+import { beforeEach, describe, expect, test, vi } from 'vitest';
 import type { Person } from '../../../src/contract/people';
 import { parseBadgeCode } from '../../../src/domain/label/badge-code';
 import { addTestPerson, anId, openTestApp, testPassword, testPin, type TestPerson } from '../../support/test-app';
@@ -163,33 +165,76 @@ describe('refuses', () => {
   });
 });
 
-describe('the last administrator', () => {
-  test('stays: two who take each other’s role at the same moment leave one', async () => {
+/** Holds the facility, lets the requests queue up behind it in this order, and lets go. */
+async function inThisOrder(requests: readonly (() => Test)[]): Promise<number[]> {
+  const held = await app.db.transaction();
+  await held('facilities').where({ id: app.facilities.A }).forNoKeyUpdate().select('id');
+  const sent: Promise<number>[] = [];
+  try {
+    for (const request of requests) {
+      sent.push(request().then(({ status }) => status));
+      await vi.waitFor(async () => {
+        const waiting = await app
+          .db('pg_stat_activity')
+          .whereRaw(`datname = current_database() and wait_event_type = 'Lock'`)
+          .select('pid');
+        expect(waiting).toHaveLength(sent.length);
+      }, 5_000);
+    }
+  } finally {
+    await held.commit();
+  }
+  return Promise.all(sent);
+}
+
+async function anAgentOf(person: TestPerson): Promise<TestAgent> {
+  const agent = app.anyone();
+  await agent.post('/api/session').send({ staffNumber: person.staffNumber, password: testPassword }).expect(200);
+  return agent;
+}
+
+describe('two administrators at the same moment', () => {
+  test('cannot both lose the role by taking it from each other', async () => {
     const [first, second] = [
       app.person('administrator'),
       await addTestPerson(app, { role: 'administrator', facilityId: app.facilities.A }),
     ];
-    const agents = await Promise.all(
-      [first, second].map(async (person) => {
-        const agent = app.anyone();
-        await agent.post('/api/session').send({ staffNumber: person.staffNumber, password: testPassword }).expect(200);
-        return agent;
-      }),
-    );
-    const demote = (index: number, personId: string, version: number) =>
-      agents[index]?.patch(`/api/people/${personId}`).send({ requestId: anId(), version, role: 'supervisor' });
-    const replies = await Promise.all([
-      demote(0, second.id, await versionOf(app.db, second.id)),
-      demote(1, first.id, await versionOf(app.db, first.id)),
+    const [byFirst, bySecond] = [await anAgentOf(first), await anAgentOf(second)];
+    const versions = { first: await versionOf(app.db, first.id), second: await versionOf(app.db, second.id) };
+    const statuses = await inThisOrder([
+      () =>
+        byFirst
+          .patch(`/api/people/${second.id}`)
+          .send({ requestId: anId(), version: versions.second, role: 'supervisor' }),
+      () =>
+        bySecond
+          .patch(`/api/people/${first.id}`)
+          .send({ requestId: anId(), version: versions.first, role: 'supervisor' }),
     ]);
-    expect(replies.map((reply) => reply?.status).filter((status) => status === 200)).toHaveLength(1);
+    expect(statuses).toEqual([200, 403]);
     const left = await app
       .db('memberships')
       .where({ facility_id: app.facilities.A, role: 'administrator' })
       .pluck<string[]>('person_id');
-    expect(left).toHaveLength(1);
+    expect(left).toEqual([first.id]);
   });
 
+  test('an act under way by one who has just lost the role is not done any more', async () => {
+    const leaving = await addTestPerson(app, { role: 'administrator', facilityId: app.facilities.A });
+    const person = await aTechnician();
+    const [staying, going] = [await anAgentOf(app.person('administrator')), await anAgentOf(leaving)];
+    const before = await rowsOf(app.db, person.id);
+    const statuses = await inThisOrder([
+      () => staying.patch(`/api/people/${leaving.id}`).send({ requestId: anId(), version: 1, isDisabled: true }),
+      () => going.post(`/api/people/${person.id}/one-time-password`).send({ requestId: anId() }),
+      () => going.patch(`/api/people/${person.id}`).send({ requestId: anId(), version: 1, role: 'administrator' }),
+    ]);
+    expect(statuses).toEqual([200, 403, 403]);
+    expect(await rowsOf(app.db, person.id)).toEqual(before);
+  });
+});
+
+describe('the last administrator', () => {
   test('stays when the other one’s access only has an end', async () => {
     const administrators = await app
       .db('memberships')

@@ -77,14 +77,29 @@ test('counts for both server processes together', async () => {
   await tryPassword(there, staffNumber, testPassword).expect(200);
 });
 
-test('lets no more than five of twenty tries through that come at the same moment', async () => {
+test('lets no more than five of twenty tries through that come at the same moment from everywhere', async () => {
   const { staffNumber } = app.person('lead');
   const agents = [app.anyone(), (await app.besides()).anyone()];
   const replies = await Promise.all(
     Array.from({ length: 20 }, async (_, index) => {
       const agent = agents[index % 2];
       if (!agent) throw new Error('there are two agents');
-      return (await tryPassword(agent, staffNumber)).status;
+      const from = `203.0.113.${String(index)}`;
+      return (await tryPassword(agent, staffNumber).set('X-Forwarded-For', from)).status;
+    }),
+  );
+  expect(replies.filter((status) => status === 401)).toHaveLength(5);
+  expect(replies.filter((status) => status === 429)).toHaveLength(15);
+});
+
+test('lets no more than the sixtieth try through when many come at the same moment from one address', async () => {
+  await layDownFromOneAddress(55);
+  const agents = [app.anyone(), (await app.besides()).anyone()];
+  const replies = await Promise.all(
+    Array.from({ length: 20 }, async (_, index) => {
+      const agent = agents[index % 2];
+      if (!agent) throw new Error('there are two agents');
+      return (await tryPassword(agent, `Y${String(index)}`)).status;
     }),
   );
   expect(replies.filter((status) => status === 401)).toHaveLength(5);
