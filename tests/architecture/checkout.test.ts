@@ -1,17 +1,32 @@
-import { execFileSync } from 'node:child_process';
-import { existsSync, readFileSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import { describe, expect, it } from 'vitest';
 
 const top = path.resolve(import.meta.dirname, '../..');
 
-/** What git keeps, with what is new and not yet kept: what lies in ignored folders is this machine's own. */
-const files = execFileSync('git', ['ls-files', '--cached', '--others', '--exclude-standard'], {
-  cwd: top,
-  encoding: 'utf8',
-})
+/** Names and endings that .gitignore keeps out: what lies there is this machine's own. */
+const ignored = readFileSync(path.join(top, '.gitignore'), 'utf8')
   .split('\n')
-  .filter((file) => file !== '' && existsSync(path.join(top, file)));
+  .filter((line) => line !== '')
+  .map((line) => line.replace(/\/$/, ''));
+
+function isIgnored(name: string): boolean {
+  return (
+    name === '.git' || ignored.some((line) => (line.startsWith('*') ? name.endsWith(line.slice(1)) : name === line))
+  );
+}
+
+function listFiles(folder: string): string[] {
+  return readdirSync(path.join(top, folder), { withFileTypes: true })
+    .filter((entry) => !isIgnored(entry.name))
+    .flatMap((entry) => {
+      const place = path.posix.join(folder, entry.name);
+      return entry.isDirectory() ? listFiles(place) : [place];
+    });
+}
+
+/** Without git, which a machine that only runs the program need not have. */
+const files = listFiles('');
 
 const allowedFolders = ['.ci', '.github', 'migrations', 'public', 'scripts', 'seeds', 'server', 'src', 'tests'];
 
@@ -68,10 +83,10 @@ describe('the checkout', () => {
   });
 });
 
-/** What stands between backticks and begins with one of our folders; a pattern with * or <name> is no path. */
+/** What stands between backticks and begins with one of our folders. `*`, `<name>`, `x` and `your-…` stand for any name. */
 function listNamedPaths(text: string): string[] {
   const starts = new RegExp(`^(${allowedFolders.map((name) => name.replace('.', '\\.')).join('|')})/`);
   return [...text.matchAll(/`([^`\s]+)`/g)]
     .map((match) => match[1] ?? '')
-    .filter((place) => starts.test(place) && !/[*<>{}]/.test(place));
+    .filter((place) => starts.test(place) && !/[*<>{}…]|\/x(\/|$)|\/your-/.test(place));
 }
