@@ -30,8 +30,10 @@ export function withPlainScreens(routes: RouteObject[]): RouteObject[] {
   return routes.map((route): RouteObject => {
     if (route.index === true) return { index: true, element: <PlainScreen name="Today" /> };
     const children = route.children ? withPlainScreens(route.children) : undefined;
-    const isScreen = route.lazy !== undefined && route.path !== undefined && !route.path.startsWith('/');
-    if (isScreen) return { path: route.path, element: <PlainScreen name={nameOf(route.path)} /> };
+    const { path } = route;
+    if (route.lazy !== undefined && path !== undefined && !path.startsWith('/')) {
+      return { path, element: <PlainScreen name={nameOf(path)} /> };
+    }
     return children ? { ...route, children } : route;
   });
 }

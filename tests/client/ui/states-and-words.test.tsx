@@ -63,7 +63,7 @@ describe('what is said to screen readers', () => {
 
   it('holds the answer to a scan in words', () => {
     renderPart(
-      <ScanAnswer look="not-taken" word="Not taken" title="Bone curette, size 1">
+      <ScanAnswer look="called-back" word="Not taken" title="Bone curette, size 1">
         Called back. Put it on the hold shelf.
       </ScanAnswer>,
     );

@@ -1,9 +1,11 @@
 import type { PackageSummary } from '#contract/packages';
 import { packagesPerPage } from '#contract/packages';
+import { paths } from '#contract/paths';
 import { useQuery } from '@tanstack/react-query';
 import { useDeferredValue, useState } from 'react';
 import { Icon } from '../../../components/icon';
 import { KindIcon } from '../../../components/item-kind';
+import { ImportSheet } from '../../../components/stock/import-sheet';
 import { Button } from '../../../components/ui/button';
 import { Code } from '../../../components/ui/code';
 import { DataTable, type Column } from '../../../components/ui/data-table';
@@ -11,6 +13,7 @@ import { SearchField } from '../../../components/ui/search-field';
 import { SelectField } from '../../../components/ui/select-field';
 import { EmptyState, WaitingState, WrongState } from '../../../components/ui/states';
 import { Moment } from '../../../components/ui/time';
+import { useMay } from '../../../lib/session';
 import { packageStateWords, troubleWith } from '../package-words';
 import { packageQueries } from '../queries';
 
@@ -88,11 +91,13 @@ export function PackageList({ onOpen }: PackageListProps) {
   const [page, setPage] = useState(1);
   const looked = useDeferredValue(search.trim());
   const packages = useQuery(packageQueries.list({ search: looked, state: state === '' ? null : state, page }));
+  const [isImporting, setIsImporting] = useState(false);
+  const mayPack = useMay('package.pack');
   const pages = Math.max(1, Math.ceil((packages.data?.total ?? 0) / packagesPerPage));
 
   return (
     <section aria-label="Packages" className="grid gap-4">
-      <div className="grid gap-3 tablet:grid-cols-[minmax(0,26rem)_12rem]">
+      <div className="grid items-end gap-3 tablet:grid-cols-[minmax(0,26rem)_12rem_auto]">
         <SearchField
           label="Find by code, item or room"
           value={search}
@@ -113,7 +118,29 @@ export function PackageList({ onOpen }: PackageListProps) {
             setPage(1);
           }}
         />
+        {mayPack && (
+          <Button
+            kind="plain"
+            icon="file"
+            className="justify-self-start"
+            onPress={() => {
+              setIsImporting(true);
+            }}
+          >
+            From a file
+          </Button>
+        )}
       </div>
+      {isImporting && (
+        <ImportSheet
+          path={paths.packages}
+          things="packages"
+          queryKey={packageQueries.all()}
+          onClose={() => {
+            setIsImporting(false);
+          }}
+        />
+      )}
       {packages.data ? (
         <DataTable
           label="Packages"
