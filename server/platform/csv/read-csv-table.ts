@@ -98,7 +98,7 @@ function beginningsOf(text: string): number[] {
 }
 
 /**
- * Reads an uploaded CSV (RFC 4180): cells parted by commas, semicolons or tabs, remarks before the header passed over.
+ * Reads an uploaded CSV (RFC 4180): cells separated by commas, semicolons or tabs, remarks before the header passed over.
  * @throws InvalidInput, with the line, for whatever is not such a file or has too many rows
  */
 export function readCsvTable(bytes: Buffer, mostRows: number): CsvTable {
@@ -115,7 +115,7 @@ export function readCsvTable(bytes: Buffer, mostRows: number): CsvTable {
   if (lines.length > mostRows) {
     throw new InvalidInput(
       'file.too-many-rows',
-      `This file has more than ${mostRows.toLocaleString('en-GB')} rows. Split it, and take the parts over one after the other.`,
+      `This file has more than ${mostRows.toLocaleString('en-GB')} rows. Split it, and import the parts one after the other.`,
     );
   }
   if (lines.length === 0)

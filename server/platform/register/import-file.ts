@@ -111,13 +111,13 @@ export async function importFile<Fields extends object>(
     if (digestOf(plan, file) !== digest) {
       throw new Conflict(
         'import.changed-meanwhile',
-        'What is here, or the file, changed since you looked at the preview. Look again, then take it over.',
+        'What is here, or the file, changed since you looked at the preview. Look again, then import it.',
       );
     }
     const counts = countsOf(plan);
     if (mode === 'all-or-nothing' && counts.refused > 0) {
       const rows = counts.refused === 1 ? 'One row has' : `${counts.refused} rows have`;
-      throw new RuleRefused('import.rows-refused', `${rows} something to put right, so nothing was taken over.`);
+      throw new RuleRefused('import.rows-refused', `${rows} something to put right, so nothing was imported.`);
     }
     const written: Written<Fields>[] = plan.lines
       .filter((line) => isAdded(line) || isChanged(line))

@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { sentenceOf } from '../../lib/errors';
 import { Button } from '../ui/button';
 import { PageHead } from '../ui/heading';
@@ -33,21 +33,31 @@ export function FormPage({
   aside,
   children,
 }: FormPageProps) {
+  const form = useRef<HTMLFormElement>(null);
+  useEffect(() => {
+    // It comes in place of a list that may be scrolled far down, under the same address.
+    const screen = form.current?.closest('main');
+    if (screen) screen.scrollTop = 0;
+    form.current?.focus({ preventScroll: true });
+  }, []);
   return (
     <form
+      ref={form}
+      tabIndex={-1}
+      aria-label={title}
       noValidate
       onSubmit={(event) => {
         event.preventDefault();
         onSend();
       }}
-      className="flex min-h-full flex-col"
+      className="flex flex-1 flex-col outline-none"
     >
       <div className="grid flex-1 content-start gap-6 px-6 py-5 max-tablet:px-4">
         <PageHead title={title} {...(facts === undefined ? {} : { facts })} />
         <div className={aside === undefined ? 'max-w-180' : 'grid gap-10 tablet:grid-cols-[minmax(0,1fr)_20rem]'}>
           <div className="grid content-start gap-9">{children}</div>
           {aside !== undefined && (
-            <div className="self-start max-tablet:row-start-1 tablet:sticky tablet:top-5">{aside}</div>
+            <div className="self-start max-tablet:hidden tablet:sticky tablet:top-5">{aside}</div>
           )}
         </div>
       </div>

@@ -16,7 +16,7 @@ type ImportSheetProps = {
   path: string;
   /** "items" */
   things: string;
-  /** What has to be asked for anew once something was taken over. */
+  /** What has to be asked for anew once something was imported. */
   queryKey: readonly unknown[];
   onClose: () => void;
 };
@@ -34,7 +34,7 @@ function formOf(file: File, fields: Readonly<Record<string, string>> = {}): Form
   return form;
 }
 
-/** A file is looked at first: what it would add and change, and what is wrong where. Then all of it is taken over, or the good rows. */
+/** A file is looked at first: what it would add and change, and what is wrong where. Then all of it is imported, or the good rows. */
 export function ImportSheet({ path, things, queryKey, onClose }: ImportSheetProps) {
   const [look, setLook] = useState<Look>({ at: 'choosing', file: null, refusal: null });
   const queryClient = useQueryClient();
@@ -60,7 +60,7 @@ export function ImportSheet({ path, things, queryKey, onClose }: ImportSheetProp
         api.upload(`${path}/import`, formOf(file, { requestId, mode, digest: preview.digest }), importResultSchema),
       );
       await queryClient.invalidateQueries({ queryKey });
-      announce(`Taken over: ${String(result.added)} added, ${String(result.changed)} changed.`);
+      announce(`Imported: ${String(result.added)} added, ${String(result.changed)} changed.`);
       onClose();
     } catch (error) {
       setLook({ at: 'seen', file, preview, refusal: sentenceOf(error) });
@@ -75,20 +75,20 @@ export function ImportSheet({ path, things, queryKey, onClose }: ImportSheetProp
     <Dialog
       isOpen
       size="wide"
-      title={`Take over ${things} from a CSV`}
+      title={`Import ${things} from a CSV`}
       onClose={isTaking ? undefined : onClose}
       actions={
         <>
           {preview !== null && moving > 0 && (
             <Button
-              waitingWords={isTaking ? 'Taking it over' : undefined}
+              waitingWords={isTaking ? 'Importing' : undefined}
               onPress={() => {
                 if (look.at === 'seen') void take(look, preview.refused === 0 ? 'all-or-nothing' : 'good-rows');
               }}
             >
               {preview.refused === 0
-                ? `Take over ${countOf(moving, 'row')}`
-                : `Take over the ${countOf(moving, 'good row')}, leave the other ${String(preview.refused)}`}
+                ? `Import ${countOf(moving, 'row')}`
+                : `Import the ${countOf(moving, 'good row')}, leave the other ${String(preview.refused)}`}
             </Button>
           )}
           <Button kind="quiet" onPress={onClose} blockedBecause={isTaking ? 'It is being done now.' : undefined}>

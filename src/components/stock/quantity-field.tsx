@@ -61,7 +61,7 @@ type CodesFieldProps<Values extends FieldValues, Transformed> = {
   hint?: ReactNode;
 };
 
-/** Codes parted by spaces or commas. */
+/** Codes separated by spaces or commas. */
 export function CodesField<Values extends FieldValues, Transformed>({
   control,
   name,

@@ -99,17 +99,18 @@ function ShelfBar({ address, searchWords, total, retiredWords, filter, add, expo
         />
       )}
       <span className="ml-auto flex flex-wrap items-center gap-1">
-        <a href={exportPath} download className={buttonLook('plain', 'normal')}>
+        <a href={exportPath} download className={`${buttonLook('plain', 'normal')} max-tablet:hidden`}>
           Save as CSV
         </a>
         {mayEdit && (
           <Button
             kind="plain"
+            className="max-tablet:hidden"
             onPress={() => {
               address.showForm('import');
             }}
           >
-            Take over a CSV
+            Import a CSV
           </Button>
         )}
         {add !== undefined && (

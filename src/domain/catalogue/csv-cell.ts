@@ -1,6 +1,6 @@
 import { accept, refuse, type Result } from '../result';
 
-/** Which sign may separate thousands in a file: where cells are parted by semicolons, the point may. */
+/** Which sign may separate thousands in a file: where cells are separated by semicolons, the point may. */
 export type NumberStyle = 'point' | 'comma';
 
 const plainNumber = /^[+-]?\d+(?:[.,]\d+)?$/;

@@ -71,7 +71,7 @@ export function choiceColumn<Choice extends string>(about: About, choices: reado
   };
 }
 
-/** Codes parted by spaces. */
+/** Codes separated by spaces. */
 export function codesColumn(about: About): Column<readonly string[]> {
   return {
     ...about,

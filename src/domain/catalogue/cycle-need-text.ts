@@ -4,7 +4,7 @@ import { celsius, seconds } from '../units/quantity';
 import { readNumberCell, shorten, type NumberStyle } from './csv-cell';
 
 /*
- * Permitted cycles as one line of text, parted by "|":
+ * Permitted cycles as one line of text, separated by "|":
  *   dynamic-air-removal 132 C 240 s dry 1800 s | gravity 121 C 1800-2700 s dry 1800 s
  * The exposure is the least, or the least and the greatest.
  */

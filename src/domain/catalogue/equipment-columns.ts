@@ -101,7 +101,7 @@ export const sterilizerColumns: ColumnSet<SterilizerFields> = {
   ),
   qualifiedPrograms: codesColumn({
     name: 'qualified_programs',
-    about: 'Codes of the programs it is qualified for, parted by spaces.',
+    about: 'Codes of the programs it is qualified for, separated by spaces.',
     example: 'W4-20 W4-30',
   }),
   otherPrograms: codesColumn({

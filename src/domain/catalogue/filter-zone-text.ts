@@ -4,7 +4,7 @@ import { mm } from '../units/quantity';
 import { readNumberCell, shorten, type NumberStyle } from './csv-cell';
 
 /*
- * Open filters as one line of text, parted by "|":
+ * Open filters as one line of text, separated by "|":
  *   lid 200 x 180 at 190 50 | base 200 x 180 at 190 50
  * Length along the item, width across it, then the corner's distance along and across from the item's own corner, in mm.
  */

@@ -65,7 +65,7 @@ export const itemColumns: ColumnSet<ItemFields> = {
   ),
   standsOn: codesColumn({
     name: 'stands_on',
-    about: 'Codes of the items it may stand on, parted by spaces. Empty: on none.',
+    about: 'Codes of the items it may stand on, separated by spaces. Empty: on none.',
     example: '',
   }),
   greatestStackHeightMm: numberOrNothingColumn(
@@ -79,7 +79,7 @@ export const itemColumns: ColumnSet<ItemFields> = {
   filterZones: {
     name: 'filter_zones',
     about:
-      'Open filters of a rigid container, in mm: face, length x width, at, distance along and across. Several: parted by |.',
+      'Open filters of a rigid container, in mm: face, length x width, at, distance along and across. Several: separated by |.',
     example: '',
     read: readFilterZones,
     write: writeFilterZones,
@@ -88,7 +88,7 @@ export const itemColumns: ColumnSet<ItemFields> = {
   cycleNeeds: {
     name: 'cycles',
     about:
-      'Cycles its instructions permit: type, temperature, least exposure (or least-greatest), dry. Several: parted by |.',
+      'Cycles its instructions permit: type, temperature, least exposure (or least-greatest), dry. Several: separated by |.',
     example: 'dynamic-air-removal 132 C 240 s dry 1800 s',
     read: readCycleNeeds,
     write: writeCycleNeeds,

@@ -1,7 +1,7 @@
 import { airRemovalTestListResponseSchema } from '#contract/air-removal-tests';
 import { sterilizerListResponseSchema } from '#contract/equipment';
 import { paths } from '#contract/paths';
-import { queryOptions } from '@tanstack/react-query';
+import { keepPreviousData, queryOptions } from '@tanstack/react-query';
 import { api, withQuery } from '../../lib/api-client';
 
 /** Keys and requests of everything about air-removal tests, together. */
@@ -12,6 +12,7 @@ export const airRemovalTestQueries = {
       queryKey: [...airRemovalTestQueries.all(), 'list', filters] as const,
       queryFn: ({ signal }) =>
         api.get(withQuery(paths.airRemovalTests, filters), airRemovalTestListResponseSchema, { signal }),
+      placeholderData: keepPreviousData,
     }),
   /** The sterilizers, with what is known of today. */
   sterilizers: () =>

@@ -241,7 +241,7 @@ describe('a file that is none', () => {
     const { body, status } = await preview(file);
     expect({ status, code: body.code }).toEqual({ status: 400, code: 'file.too-many-rows' });
     expect(body.detail).toBe(
-      'This file has more than 10,000 rows. Split it, and take the parts over one after the other.',
+      'This file has more than 10,000 rows. Split it, and import the parts one after the other.',
     );
     expect(performance.now() - startedMs).toBeLessThan(5_000);
   });
@@ -362,7 +362,7 @@ describe('taking a file over', () => {
     expect(status).toBe(422);
     expect(body).toMatchObject({
       code: 'import.rows-refused',
-      detail: 'One row has something to put right, so nothing was taken over.',
+      detail: 'One row has something to put right, so nothing was imported.',
     });
     expect(await itemsOnFile(app)).toEqual(before);
   });

@@ -115,7 +115,7 @@ export function AirRemovalForm({ sterilizers, sterilizerId, readers, lastPack, o
         {result === 'failed' && (
           <CheckboxField
             label={`Take ${chosen?.code ?? 'the sterilizer'} out of service with it`}
-            hint="No load can be opened on it until an engineer or supervisor puts it back."
+            hint="No load of it can be closed until an engineer or supervisor puts it back."
             className="bg-madder-1 px-4 py-1 shadow-[inset_5px_0_0_var(--color-madder-3)] sm:col-span-2"
             {...register('isTakenOutOfService')}
           />
@@ -133,8 +133,7 @@ export function AirRemovalForm({ sterilizers, sterilizerId, readers, lastPack, o
           {...register('isBeforeFirstLoad')}
         />
         <SelectField
-          label="Second reader"
-          hint="Where the reading was in doubt."
+          label="Second reader, where in doubt"
           isOptional
           options={[
             { value: '', label: 'Nobody' },

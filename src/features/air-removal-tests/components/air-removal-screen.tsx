@@ -14,19 +14,21 @@ export function AirRemovalScreen() {
   const sterilizerId = params.get('sterilizer');
   const mayRecord = useMay('air-removal-test.record');
   const sterilizers = useQuery(airRemovalTestQueries.sterilizers());
+  const latest = useQuery(airRemovalTestQueries.list({ sterilizerId: null }));
   const tests = useQuery(airRemovalTestQueries.list({ sterilizerId }));
 
-  if (sterilizers.isPending || tests.isPending) {
+  if (sterilizers.isPending || latest.isPending || tests.isPending) {
     return <WaitingState title="Air-removal test" waitsFor="The server has not answered yet." />;
   }
-  if (sterilizers.isError || tests.isError) {
+  if (sterilizers.isError || latest.isError || tests.isError) {
     return (
       <div className="p-6">
         <WrongState
           title="The air-removal tests could not be shown"
-          error={sterilizers.error ?? tests.error}
+          error={sterilizers.error ?? latest.error ?? tests.error}
           onTryAgain={() => {
             void sterilizers.refetch();
+            void latest.refetch();
             void tests.refetch();
           }}
         />
@@ -40,7 +42,7 @@ export function AirRemovalScreen() {
         title="Air-removal test"
         facts="Each day in the empty chamber, before the first load"
         aside={
-          <LinkButton to="/stock/sterilizers" kind="plain" size="small" icon="back">
+          <LinkButton to="/stock/sterilizers" kind="plain" size="small" icon="left">
             Sterilizers
           </LinkButton>
         }
@@ -48,12 +50,10 @@ export function AirRemovalScreen() {
       <div className="grid gap-10 tablet:grid-cols-[minmax(0,1fr)_minmax(0,25rem)]">
         {mayRecord ? (
           <AirRemovalForm
-            // Another sterilizer in the address begins the form anew.
-            key={sterilizerId ?? ''}
             sterilizers={sterilizers.data}
             sterilizerId={sterilizerId}
-            readers={tests.data.readers}
-            lastPack={tests.data.tests[0] ?? null}
+            readers={latest.data.readers}
+            lastPack={latest.data.tests[0] ?? null}
             onSterilizer={(id) => {
               setParams({ sterilizer: id }, { replace: true });
             }}

@@ -76,16 +76,8 @@ export function CartForm({ cart, onLeave }: { cart: CartOnFile | null; onLeave: 
       problemCount={countProblems(errors)}
       aside={<DrawnWhileFilledIn control={control} />}
     >
-      <FormPart title="What it is">
-        {cart === null && (
-          <TextField
-            label="Code"
-            hint="Your own. It stays for good."
-            isCode
-            error={errors.code?.message}
-            {...register('code')}
-          />
-        )}
+      <FormPart title="What it is" {...(cart === null ? { hint: 'The code is your own, and stays for good.' } : {})}>
+        {cart === null && <TextField label="Code" isCode error={errors.code?.message} {...register('code')} />}
         <TextField label="Name" error={errors.name?.message} {...register('name')} />
         <SelectField label="Size" options={optionsOf(sizeClasses, sizeClassWords)} {...register('sizeClass')} />
         <TextField label="Remark" isOptional error={errors.note?.message} {...register('note')} />
@@ -135,12 +127,12 @@ function ShelvesPart({ form: { control, register, formState }, kept }: { form: F
               {at >= kept && fields.length > 1 && (
                 <Button
                   kind="plain"
-                  aria-label={`Take out shelf ${String(at + 1)}`}
+                  aria-label={`Remove shelf ${String(at + 1)}`}
                   onPress={() => {
                     remove(at);
                   }}
                 >
-                  Take out
+                  Remove
                 </Button>
               )}
             </span>

@@ -6,7 +6,7 @@ export function ChangeButton({ onPress }: { onPress: () => void }) {
   const mayEdit = useMay('equipment.edit');
   if (!mayEdit) return null;
   return (
-    <Button size="small" icon="edit" onPress={onPress}>
+    <Button size="small" icon="edit" className="justify-self-start" onPress={onPress}>
       Change it
     </Button>
   );

@@ -58,13 +58,7 @@ export function HolderForm({ onLeave }: { onLeave: (openId?: string) => void }) 
           error={errors.kind?.message}
           {...register('kind')}
         />
-        <TextField
-          label="Name"
-          hint="As written on it: RS-6."
-          isCode
-          error={errors.name?.message}
-          {...register('name')}
-        />
+        <TextField label="Name, as written on it" isCode error={errors.name?.message} {...register('name')} />
       </FormPart>
     </FormPage>
   );

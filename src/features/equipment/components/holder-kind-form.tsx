@@ -95,16 +95,8 @@ export function HolderKindForm({
       problemCount={countProblems(errors)}
       aside={<DrawnWhileFilledIn control={control} />}
     >
-      <FormPart title="What it is">
-        {kind === null && (
-          <TextField
-            label="Code"
-            hint="Your own. It stays for good."
-            isCode
-            error={errors.code?.message}
-            {...register('code')}
-          />
-        )}
+      <FormPart title="What it is" {...(kind === null ? { hint: 'The code is your own, and stays for good.' } : {})}>
+        {kind === null && <TextField label="Code" isCode error={errors.code?.message} {...register('code')} />}
         <TextField label="Name" error={errors.name?.message} {...register('name')} />
         <SelectField
           label="Form"

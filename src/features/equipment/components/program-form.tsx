@@ -66,16 +66,8 @@ export function ProgramForm({
       refusal={keep.error}
       problemCount={countProblems(errors)}
     >
-      <FormPart title="What it is">
-        {program === null && (
-          <TextField
-            label="Code"
-            hint="Your own. It stays for good."
-            isCode
-            error={errors.code?.message}
-            {...register('code')}
-          />
-        )}
+      <FormPart title="What it is" {...(program === null ? { hint: 'The code is your own, and stays for good.' } : {})}>
+        {program === null && <TextField label="Code" isCode error={errors.code?.message} {...register('code')} />}
         <TextField label="Name" error={errors.name?.message} className="sm:col-span-2" {...register('name')} />
       </FormPart>
       <FormPart title="What it does">

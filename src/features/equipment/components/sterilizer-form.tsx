@@ -93,23 +93,16 @@ export function SterilizerForm({
       problemCount={countProblems(errors)}
       aside={<DrawnWhileFilledIn control={control} />}
     >
-      <FormPart title="What it is">
+      <FormPart
+        title="What it is"
+        {...(sterilizer === null
+          ? { hint: 'Code and number stay for good: the number stands in every load number.' }
+          : {})}
+      >
         {sterilizer === null && (
           <>
-            <TextField
-              label="Code"
-              hint="Your own. It stays for good."
-              isCode
-              error={errors.code?.message}
-              {...register('code')}
-            />
-            <TextField
-              label="Number"
-              hint="Stands in every load number, for good."
-              isCode
-              error={errors.number?.message}
-              {...register('number')}
-            />
+            <TextField label="Code" isCode error={errors.code?.message} {...register('code')} />
+            <TextField label="Number" isCode error={errors.number?.message} {...register('number')} />
           </>
         )}
         <TextField label="Name" error={errors.name?.message} {...register('name')} />
@@ -136,14 +129,12 @@ export function SterilizerForm({
           {...register('sizeClass')}
         />
       </FormPart>
-      <FormPart title="Programs">
-        <CodesField control={control} name="qualifiedPrograms" label="Qualified for" hint="Codes, parted by spaces." />
-        <CodesField
-          control={control}
-          name="otherPrograms"
-          label="On its panel, not qualified"
-          hint="Nobody can choose these."
-        />
+      <FormPart
+        title="Programs"
+        hint="Codes, separated by spaces. Only those it is qualified for can be chosen for a load."
+      >
+        <CodesField control={control} name="qualifiedPrograms" label="Qualified for" />
+        <CodesField control={control} name="otherPrograms" label="On its panel, not qualified" />
       </FormPart>
     </FormPage>
   );

@@ -48,7 +48,7 @@ export function SterilizersShelf() {
       { key: 'programs', header: 'Qualified for', isWideOnly: true, cell: (one) => one.qualifiedPrograms.join(', ') },
       {
         key: 'mass',
-        header: 'Load',
+        header: 'Greatest load',
         align: 'end',
         isWideOnly: true,
         sortBy: (one) => one.greatestLoadMassKg,

@@ -50,13 +50,13 @@ export function CyclesPart({ form: { control, register, formState } }: { form: I
             <QuantityField control={control} name={`cycleNeeds.${at}.leastDryS`} quantity="minutes" label="Dry" />
             <Button
               kind="plain"
-              aria-label={`Take out cycle ${String(at + 1)}`}
+              aria-label={`Remove cycle ${String(at + 1)}`}
               className="tablet:mt-5.5"
               onPress={() => {
                 remove(at);
               }}
             >
-              Take out
+              Remove
             </Button>
           </div>
         ))}

@@ -52,13 +52,13 @@ export function FiltersPart({ form: { control, register, formState, getValues } 
             <QuantityField control={control} name={`filterZones.${at}.yMm`} quantity="length" label="From the side" />
             <Button
               kind="plain"
-              aria-label={`Take out filter ${String(at + 1)}`}
+              aria-label={`Remove filter ${String(at + 1)}`}
               className="tablet:mt-5.5"
               onPress={() => {
                 remove(at);
               }}
             >
-              Take out
+              Remove
             </Button>
           </div>
         ))}

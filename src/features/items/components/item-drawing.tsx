@@ -1,7 +1,6 @@
-import type { CatalogueItem, FilterZone } from '#domain/load/model';
+import type { CatalogueItem } from '#domain/load/model';
 import {
   Basin,
-  ContainerFront,
   ContainerPlan,
   Leaf,
   LeafFace,
@@ -14,12 +13,13 @@ import { MapDrawing } from '../../../components/cart-map/map-patterns';
 import { useFacility } from '../../../lib/facility';
 import { formatLength, formatSize } from '../../../lib/format';
 
+type DrawnZone = { readonly face: 'lid' | 'base' } & Readonly<Record<'xMm' | 'yMm' | 'lengthMm' | 'widthMm', number>>;
+
 export type DrawnItem = Pick<CatalogueItem, 'kind' | 'pose'> & {
   readonly lengthMm: number;
   readonly widthMm: number;
   readonly heightMm: number;
-  readonly filterZones:
-    readonly Readonly<Record<'xMm' | 'yMm' | 'lengthMm' | 'widthMm', number>>[] | readonly FilterZone[];
+  readonly filterZones: readonly DrawnZone[];
 };
 
 type ItemDrawingProps = {
@@ -28,7 +28,7 @@ type ItemDrawingProps = {
   width?: number;
 };
 
-const margin = { left: 2, right: 46, top: 18, between: 44, bottom: 20 };
+const margin = { left: 2, right: 62, top: 18, between: 46, bottom: 20 };
 const highestPx = 330;
 
 /** How the item rests, from above and from the side, both to one scale, with its measures. */
@@ -69,7 +69,7 @@ export function ItemDrawing({ item, width = 304 }: ItemDrawingProps) {
         <MapText x={side.x} y={side.y - 6} className="fill-ink-2">
           From the side
         </MapText>
-        <SideBody item={item} box={side} />
+        <SideBody item={item} box={side} scale={scale} />
         <path d={`M0 ${side.y + side.height + 1}h${room + margin.left}`} strokeWidth="1.6" className="stroke-ink-1" />
         <Upright box={side} words={formatLength(standsMm, unitSystem)} />
         <MapText x={side.x + side.width / 2} y={height - 4} anchor="middle">
@@ -101,15 +101,20 @@ function PlanBody({ item, box, scale }: { item: DrawnItem; box: PixelBox; scale:
       return isOnEdge ? <Leaf box={box} isPaperFirst isAcross /> : <LeafFace box={box} isPaper />;
     case 'rigid-container':
       return (
-        <ContainerPlan
-          box={box}
-          filters={item.filterZones.map((zone) => ({
-            x: box.x + zone.xMm * scale,
-            y: box.y + zone.yMm * scale,
-            width: zone.lengthMm * scale,
-            height: zone.widthMm * scale,
-          }))}
-        />
+        <g>
+          <ContainerPlan box={box} filters={zonesOn('lid', item).map((zone) => zoneFromAbove(zone, box, scale))} />
+          {zonesOn('base', item).map((zone, at) => (
+            // The same zone may be filled in twice for a moment.
+            <rect
+              key={at}
+              {...zoneFromAbove(zone, box, scale)}
+              fill="none"
+              strokeWidth="1"
+              strokeDasharray="3 3"
+              className="stroke-film-5"
+            />
+          ))}
+        </g>
       );
     case 'wrapped-tray':
     case 'challenge-device':
@@ -121,7 +126,7 @@ function PlanBody({ item, box, scale }: { item: DrawnItem; box: PixelBox; scale:
   }
 }
 
-function SideBody({ item, box }: { item: DrawnItem; box: PixelBox }) {
+function SideBody({ item, box, scale }: { item: DrawnItem; box: PixelBox; scale: number }) {
   switch (item.kind) {
     case 'pouch':
       return item.pose === 'on-edge' ? (
@@ -130,7 +135,7 @@ function SideBody({ item, box }: { item: DrawnItem; box: PixelBox }) {
         <Leaf box={box} isPaperFirst isAcross />
       );
     case 'rigid-container':
-      return <ContainerFront box={box} />;
+      return <ContainerSide item={item} box={box} scale={scale} />;
     case 'wrapped-tray':
     case 'challenge-device':
       return <Wrapped box={box} />;
@@ -139,4 +144,46 @@ function SideBody({ item, box }: { item: DrawnItem; box: PixelBox }) {
     case 'basin':
       return <Basin box={box} isTilted={item.pose === 'tilted'} isFromAbove={false} />;
   }
+}
+
+function zonesOn(face: DrawnZone['face'], item: DrawnItem): readonly DrawnZone[] {
+  return item.filterZones.filter((zone) => zone.face === face);
+}
+
+function zoneFromAbove(zone: DrawnZone, box: PixelBox, scale: number): PixelBox {
+  return {
+    x: box.x + zone.xMm * scale,
+    y: box.y + zone.yMm * scale,
+    width: Math.max(0, zone.lengthMm * scale),
+    height: Math.max(0, zone.widthMm * scale),
+  };
+}
+
+/** A rigid container along its long side: its filters as film bars where they are, on the lid and under the base. */
+function ContainerSide({ item, box, scale }: { item: DrawnItem; box: PixelBox; scale: number }) {
+  const { x, y, width, height } = box;
+  const lid = Math.min(height * 0.26, 14);
+  return (
+    <g strokeWidth="1.5">
+      <rect
+        x={x + 2}
+        y={y + lid}
+        width={Math.max(0, width - 4)}
+        height={height - lid}
+        className="fill-paper-0 stroke-ink-1"
+      />
+      <rect x={x} y={y} width={width} height={lid} rx={3} className="fill-paper-2 stroke-ink-1" />
+      {item.filterZones.map((zone, at) => (
+        <rect
+          key={at}
+          x={x + zone.xMm * scale}
+          y={zone.face === 'lid' ? y - 2 : y + height - 4}
+          width={Math.max(0, zone.lengthMm * scale)}
+          height={4}
+          strokeWidth="1"
+          className="fill-film-2 stroke-film-5"
+        />
+      ))}
+    </g>
+  );
 }

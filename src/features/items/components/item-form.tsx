@@ -123,6 +123,7 @@ function DrawnWhileFilledIn({ control }: { control: ItemFormControl }) {
           widthMm: item.widthMm ?? 0,
           heightMm: item.heightMm ?? 0,
           filterZones: (item.filterZones ?? []).map((zone) => ({
+            face: zone.face ?? 'lid',
             xMm: zone.xMm ?? 0,
             yMm: zone.yMm ?? 0,
             lengthMm: zone.lengthMm ?? 0,
@@ -140,16 +141,8 @@ function WhatItIs({ form, isNew }: PartProps & { isNew: boolean }) {
   const { register, formState, setValue } = form;
   const { errors } = formState;
   return (
-    <FormPart title="What it is">
-      {isNew && (
-        <TextField
-          label="Code"
-          hint="Your own. It stays for good."
-          isCode
-          error={errors.code?.message}
-          {...register('code')}
-        />
-      )}
+    <FormPart title="What it is" {...(isNew ? { hint: 'The code is your own, and stays for good.' } : {})}>
+      {isNew && <TextField label="Code" isCode error={errors.code?.message} {...register('code')} />}
       <TextField label="Name" error={errors.name?.message} className="sm:col-span-2" {...register('name')} />
       <SelectField
         label="Kind"
@@ -247,7 +240,7 @@ function HowItIsLoaded({ form: { control, register, formState } }: PartProps) {
           {...register('preferredHolder', { setValueAs: emptyToNull })}
         />
       )}
-      <CodesField control={control} name="standsOn" label="May stand on" hint="Codes of items, parted by spaces." />
+      <CodesField control={control} name="standsOn" label="May stand on these codes" />
       <QuantityField
         control={control}
         name="greatestStackHeightMm"
@@ -277,8 +270,7 @@ function Papers({ form: { control, register, formState, setValue } }: PartProps)
         {...register('ifuRevision', { setValueAs: emptyToNull })}
       />
       <TextField
-        label="Device identifier"
-        hint="GTIN or HIBC, as scanned."
+        label="GTIN or HIBC"
         isOptional
         isCode
         error={errors.deviceIdentifier?.message}

@@ -31,16 +31,14 @@ function columnsOf(unitSystem: UnitSystem, isBesidePanel: boolean): readonly Col
       header: 'Item',
       sortBy: (item) => item.name,
       cell: (item) => (
-        <span className="flex items-center gap-3">
-          <KindIcon kind={item.kind} className="text-ink-2" />
-          <span>
-            <span className={item.isRetired ? 'text-ink-2 line-through' : ''}>{item.name}</span>
-            {item.isImplant && (
-              <span className="ml-2.5">
-                <ImplantMark />
-              </span>
-            )}
-          </span>
+        <span className="relative block pl-7.5">
+          <KindIcon kind={item.kind} className="absolute top-0.5 left-0 text-ink-2" />
+          <span className={item.isRetired ? 'text-ink-2 line-through' : ''}>{item.name}</span>
+          {item.isImplant && (
+            <span className="inline-block tablet:ml-3">
+              <ImplantMark />
+            </span>
+          )}
         </span>
       ),
     },
@@ -117,7 +115,7 @@ export function ItemsShelf() {
       <ShelfPage
         address={address}
         query={list}
-        searchWords="Find by name, code, identifier or place of use"
+        searchWords="Find an item"
         total={list.data?.total ?? 0}
         pageSize={itemPageSize}
         retiredWords="Retired too"
