@@ -1,7 +1,7 @@
+import { addDays } from '#domain/time/calendar-day';
 import { dayOf, formatTime } from '../../lib/format';
 
 const minuteMs = 60_000;
-const dayMs = 24 * 60 * minuteMs;
 
 /** A time of day as people type it, "14:30", "9.05" or "1430", as HH:MM; null for what is none. */
 export function timeOfText(text: string): string | null {
@@ -30,5 +30,5 @@ export function wantedAtOf(time: string, now: Date, timeZone: string): string {
   };
   const today = onDay(dayOf(now, timeZone));
   if (today.getTime() >= now.getTime() - minuteMs) return today.toISOString();
-  return onDay(dayOf(new Date(now.getTime() + dayMs), timeZone)).toISOString();
+  return onDay(addDays(dayOf(now, timeZone), 1)).toISOString();
 }

@@ -17,6 +17,7 @@ export type ItemChanges = Partial<{
   device_identifier: string | null;
   mass_kg: number;
   mass_limit_kg: number | null;
+  cycle_needs: string;
   length_mm: number;
   width_mm: number;
   height_mm: number;

@@ -290,6 +290,33 @@ describe('scanning into a run', () => {
     expect(await snapshot(app)).toBe(before);
   });
 
+  it('takes a package whose instructions for use do not permit the run’s program, and says to look', async () => {
+    const programId = await addProgram(app.facilities.A, 'W4-30');
+    const needs = (temperatureC: number) =>
+      JSON.stringify([
+        {
+          type: 'dynamic-air-removal',
+          temperatureC,
+          leastExposureS: 240,
+          greatestExposureS: null,
+          leastDryS: 1200,
+        },
+      ]);
+    const fitting = await addItem(app, { cycle_needs: needs(132) });
+    const other = await addItem(app, { cycle_needs: needs(134) });
+    const silent = await addItem(app);
+    const added = await post('/api/runs', { name: 'At 132', sterilizerId: null, programId, wantedAt: null });
+    const runId = String(added.body.runId);
+    const lookAt = async (itemId: string) => {
+      const reply = await scan(runId, (await packOne(app, itemId)).code);
+      expect(reply.body.answer).toBe('taken');
+      return reply.body.look;
+    };
+    expect(await lookAt(fitting.id)).toBeNull();
+    expect(await lookAt(other.id)).toBe('program-not-permitted');
+    expect(await lookAt(silent.id)).toBeNull();
+  });
+
   it.each([
     { what: 'held', changes: { held_reason: 'Seal open' }, answer: 'held' },
     { what: 'called back', changes: { state: 'recalled' }, answer: 'called-back' },

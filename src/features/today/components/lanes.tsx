@@ -4,6 +4,7 @@ import { Link } from 'react-router-dom';
 import { Icon } from '../../../components/icon';
 import { useFacility } from '../../../lib/facility';
 import { countOf, formatTime } from '../../../lib/format';
+import { useMay } from '../../../lib/session';
 import { useNow } from '../../../lib/use-now';
 import { useSize } from '../../../lib/use-size';
 import { hoursOf, loadBoxes, runFlags, spanOf, xOf, type LoadBox, type RunFlag, type TimeSpan } from '../lane-layout';
@@ -185,20 +186,28 @@ function Box({ box }: { box: LoadBox }) {
 }
 
 function Flag({ flag, row, timeZone }: { flag: RunFlag; row: number; timeZone: string }) {
+  const mayPack = useMay('package.pack');
   const { run, x, isLeft } = flag;
-  const words = `${run.name}, ${countOf(run.packages, 'package')}`;
-  return (
-    <Link
-      to={`/pack/runs/${run.id}`}
-      title={`${words}, wanted for ${formatTime(run.wantedAt ?? '', timeZone)}`}
-      className={`absolute flex items-center gap-2 text-small whitespace-nowrap text-ink-1 no-underline hover:underline ${isLeft ? '-translate-x-full flex-row-reverse' : ''}`}
-      style={{ left: x, top: 9 + row * rowHeight, height: boxHeight }}
-    >
+  const wanted = formatTime(run.wantedAt ?? '', timeZone);
+  const look = `absolute flex items-center gap-2 text-small whitespace-nowrap text-ink-1 no-underline ${isLeft ? '-translate-x-full flex-row-reverse' : ''}`;
+  const place = { left: x, top: 9 + row * rowHeight, height: boxHeight };
+  const inside = (
+    <>
       <i className="h-full w-0 border-l-2 border-dashed border-film-4" aria-hidden="true" />
       <span className="max-w-44 truncate">
         <b className="font-semibold">{run.packages}</b> {run.name}
-        <span className="sr-only">, wanted for {formatTime(run.wantedAt ?? '', timeZone)}</span>
+        <span className="sr-only">, wanted for {wanted}</span>
       </span>
+    </>
+  );
+  const words = `${run.name}, ${countOf(run.packages, 'package')}, wanted for ${wanted}`;
+  return mayPack ? (
+    <Link to={`/pack/runs/${run.id}`} title={words} className={`${look} hover:underline`} style={place}>
+      {inside}
     </Link>
+  ) : (
+    <span title={words} className={look} style={place}>
+      {inside}
+    </span>
   );
 }
