@@ -36,7 +36,7 @@ function vitest(project: string): Step {
       ...['run', '--project', project, '--reporter=default', '--reporter=json'],
       ...[`--outputFile.json=${reportFileOf(project)}`, '--allowOnly=false'],
     ),
-    limitMinutes: 8,
+    limitMinutes: 15,
     count: countVitest,
   };
 }
@@ -44,35 +44,35 @@ function vitest(project: string): Step {
 export const types: Step = {
   name: 'types',
   args: program('typescript/bin/tsc', '-b'),
-  limitMinutes: 5,
+  limitMinutes: 10,
   count: countExitCode,
 };
 
 export const lint: Step = {
   name: 'lint',
   args: program('eslint/bin/eslint.js', '.', '--max-warnings=0'),
-  limitMinutes: 6,
+  limitMinutes: 15,
   count: countExitCode,
 };
 
 export const format: Step = {
   name: 'format',
   args: program('prettier/bin/prettier.cjs', '--check', '--log-level=warn', '.'),
-  limitMinutes: 3,
+  limitMinutes: 5,
   count: countExitCode,
 };
 
 export const imports: Step = {
   name: 'imports',
   args: script('scripts/checks/imports.ts'),
-  limitMinutes: 3,
+  limitMinutes: 5,
   count: countExitCode,
 };
 
 export const unused: Step = {
   name: 'unused',
   args: program('knip/bin/knip.js', '--no-progress'),
-  limitMinutes: 3,
+  limitMinutes: 5,
   count: countExitCode,
 };
 
@@ -85,13 +85,13 @@ export const commands: Step = vitest('commands');
 export const build: Step = {
   name: 'build',
   args: script('scripts/checks/build.ts'),
-  limitMinutes: 5,
+  limitMinutes: 10,
   count: countExitCode,
 };
 
 export const e2e: Step = {
   name: 'e2e',
   args: script('tests/e2e/run.ts'),
-  limitMinutes: 15,
+  limitMinutes: 30,
   count: countE2e,
 };
