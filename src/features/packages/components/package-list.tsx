@@ -62,11 +62,13 @@ const columns: readonly Column<PackageSummary>[] = [
     key: 'packed',
     header: 'Packed',
     isWideOnly: true,
-    width: '15rem',
+    width: '18rem',
     cell: (one) => (
       <>
-        <Moment at={one.packedAt} />
-        <span className="ml-2 text-ink-2">{one.packedBy}</span>
+        <span className="mr-2 whitespace-nowrap">
+          <Moment at={one.packedAt} />
+        </span>
+        <span className="whitespace-nowrap text-ink-2">{one.packedBy}</span>
       </>
     ),
   },

@@ -68,7 +68,7 @@ function Told({ detail, staging }: { detail: PackageDetail; staging: ReactNode }
           {one.item.isImplant && <ImplantMark />}
         </p>
         <dl className="text-row">
-          <Fact name="Is">
+          <Fact name="Now">
             <StateWords one={one} />
             {one.heldReason !== null && <span className="block">{one.heldReason}</span>}
           </Fact>

@@ -48,7 +48,7 @@ export function PackedPanel({ batch, printError, isPrinting, onPrintAgain, onPac
           </p>
         </div>
       </header>
-      <div className="tablet:col-span-2">
+      <div className="max-tablet:hidden tablet:col-span-2">
         <ProofStripe
           stretches={packingStripe(item, batch.said, pdf === null ? null : packages.length)}
           label="What is said of these packages"

@@ -85,7 +85,7 @@ export function PackingPanel({ item, isWaiting, error, layout, onLayout, onPack 
         </p>
       </header>
 
-      <div className="tablet:col-span-2">
+      <div className="max-tablet:hidden tablet:col-span-2">
         <ProofStripe stretches={packingStripe(item, said, null)} label="What is said of this package" />
       </div>
 

@@ -145,7 +145,13 @@ export function PackingStation({ stagingOf, onPackage, keyInOf }: PackingStation
         >
           Read a code, or key it in
         </Button>
-        <ItemChooser chosenId={item?.id ?? null} onChoose={choose} />
+        <ItemChooser
+          chosenId={item?.id ?? null}
+          onChoose={(chosen) => {
+            announce(`${chosen.name}. Say what is inside, then print its label.`);
+            choose(chosen);
+          }}
+        />
       </div>
       <FilmPanel
         label="Pack this item"
