@@ -30,7 +30,7 @@ export type AppSettings = {
   readonly sessionPool: pg.Pool;
   readonly sessionSecret: string;
   readonly isCookieSecure: boolean;
-  readonly trustProxy: string | null;
+  readonly trustProxy: string | number | null;
   readonly clientDir: string | null;
 };
 

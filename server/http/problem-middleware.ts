@@ -33,7 +33,8 @@ function fromParser(error: unknown): AppError | null {
 // PostgreSQL error codes (manual, appendix A) that mean "this text cannot be kept", not "we are broken".
 const textRefused = new Set(['22021', '22P05', '22P02']);
 // Two transactions that waited for each other, or could not be put one after the other: one was rolled back whole.
-const gaveWay = new Set(['40P01', '40001']);
+// 57014 and 55P03: it waited for others longer than it may.
+const gaveWay = new Set(['40P01', '40001', '57014', '55P03']);
 
 function fromDatabase(error: unknown): AppError | null {
   if (typeof error !== 'object' || error === null || !('code' in error) || typeof error.code !== 'string') return null;
@@ -47,9 +48,15 @@ function fromDatabase(error: unknown): AppError | null {
   return null;
 }
 
+/** What Express and its parts refuse by themselves: a broken percent sign, a missing file, a range beyond its end. */
 function fromExpress(error: unknown): AppError | null {
-  // A path with a broken percent sign.
-  return error instanceof URIError ? new InvalidInput('request.not-understood', 'This address cannot be read.') : null;
+  if (error instanceof URIError) return new InvalidInput('request.not-understood', 'This address cannot be read.');
+  if (typeof error !== 'object' || error === null || !('status' in error)) return null;
+  const { status } = error;
+  if (typeof status !== 'number' || status < 400 || status > 499) return null;
+  return status === 404
+    ? new NotFound('route.none', 'There is nothing at this address.', { cause: error })
+    : new InvalidInput('request.not-understood', 'This request cannot be read.', { cause: error });
 }
 
 /** The one place where an error becomes a reply. Whatever is not ours says nothing of itself outside. */

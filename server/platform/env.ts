@@ -8,7 +8,11 @@ const envSchema = z.object({
   CLIENT_DIR: z.string().optional(),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('warn'),
   COOKIE_SECURE: z.enum(['yes', 'no']).default('no'),
-  TRUST_PROXY: z.string().optional(),
+  /** How many proxies stand in front, or their addresses: Express' own words. */
+  TRUST_PROXY: z
+    .string()
+    .transform((text) => (/^\d+$/.test(text) ? Number(text) : text))
+    .optional(),
 });
 
 export type Env = z.infer<typeof envSchema>;

@@ -193,6 +193,11 @@ export const acceptFindingRequestSchema = z.strictObject({
   reason: reasonSchema,
 });
 
+export const undoRequestSchema = z.strictObject({
+  requestId: requestIdSchema,
+  /** What the person saw as the last act: another one by now is somebody else's, and is not taken back unseen. */
+  undoing: z.string().min(1).max(200),
+});
 export const loadActRequestSchema = z.strictObject({ requestId: requestIdSchema });
 export const abandonLoadRequestSchema = z.strictObject({ requestId: requestIdSchema, reason: reasonSchema });
 

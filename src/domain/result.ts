@@ -7,8 +7,7 @@ export type Refusal<Code extends string = string> = {
 };
 
 export type Result<Value, Code extends string = string> =
-  | { readonly ok: true; readonly value: Value }
-  | { readonly ok: false; readonly refusal: Refusal<Code> };
+  { readonly ok: true; readonly value: Value } | { readonly ok: false; readonly refusal: Refusal<Code> };
 
 export function accept<Value>(value: Value): { readonly ok: true; readonly value: Value } {
   return { ok: true, value };

@@ -2,6 +2,7 @@ import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import { once } from '../../platform/once';
+import { lockPackages, lockRun } from '../packages/read-model';
 import { requireAct } from './load-change';
 import { lockLoad, stepVersion } from './load-store';
 
@@ -20,6 +21,9 @@ export async function abandonLoad(
       const at = clock.now();
       const load = await lockLoad(trx, actor.facilityId, loadId);
       const { to } = requireAct(load, 'abandon');
+      // Run first, then packages by id, as staging does: otherwise the two could wait for each other.
+      if (load.run_id !== null) await lockRun(trx, load.run_id);
+      await lockPackages(trx, await trx('load_packages').where({ load_id: load.id }).pluck<string[]>('package_id'));
       await trx('packages')
         .whereIn('id', trx('load_packages').where({ load_id: load.id }).select('package_id'))
         .whereIn('state', ['in-load', 'staged'])

@@ -18,6 +18,7 @@ import {
   printStickersResponseSchema,
   scanRequestSchema,
   scanResponseSchema,
+  undoRequestSchema,
 } from '#contract/loads';
 import { paths } from '#contract/paths';
 import { z } from 'zod';
@@ -109,9 +110,9 @@ export const loadRoutes = [
     path: `${one}/undo`,
     permission: 'load.build',
     params: loadParams,
-    body: loadActRequestSchema,
+    body: undoRequestSchema,
     response: loadChangeResponseSchema,
-    handle: ({ services, actor, params, body }) => undoLastAct(services, actor, params.loadId, body.requestId),
+    handle: ({ services, actor, params, body }) => undoLastAct(services, actor, params.loadId, body),
   }),
   defineRoute({
     method: 'post',

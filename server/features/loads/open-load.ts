@@ -7,7 +7,7 @@ import type { Transaction } from '../../platform/db';
 import { Conflict, InvalidInput, NotFound, RuleRefused } from '../../platform/errors';
 import { once } from '../../platform/once';
 import { cartWithShelves, qualifiedPrograms, sterilizerById } from '../equipment/read-model';
-import { lockPackages, lockRun, packagesOfRun } from '../packages/read-model';
+import { lockPackages, lockRun, packagesOfRun, type RunFacts } from '../packages/read-model';
 import { facilityDay, type FacilityDay } from '../../platform/facility-day';
 import { buildingLoadOfCart } from './open-load-read-model';
 
@@ -28,6 +28,9 @@ export async function openLoad(
     await requireProgram(trx, actor.facilityId, sterilizer, request.programId);
     await requireCart(trx, actor.facilityId, request.cartId, sterilizer);
 
+    // Before the load is written: its reference to the run would share a lock that two loads then could not both raise.
+    const run = request.runId === null ? null : await requireRun(trx, actor.facilityId, request.runId);
+
     const count = (await greatestCount(trx, sterilizer.id, facility)) + 1;
     const number = formatLoadNumber(
       { sterilizer: sterilizer.number, day: facility.day, count },
@@ -37,7 +40,8 @@ export async function openLoad(
       .where({ facility_id: actor.facilityId })
       .where('effective_at', '<=', at)
       .orderBy('number', 'desc')
-      .first<{ id: string }>('id');
+      .first<{ id: string } | undefined>('id');
+    if (!policy) throw new RuleRefused('load.no-policy', 'No policy is in force here yet, so no load can be judged.');
     const loadId = ids.next();
     await trx('loads').insert({
       id: loadId,
@@ -54,7 +58,7 @@ export async function openLoad(
       opened_at: at,
       policy_id: policy.id,
     });
-    const listed = request.runId === null ? 0 : await listRun(trx, actor.facilityId, request.runId, loadId, at);
+    const listed = run === null ? 0 : await listRun(trx, run, loadId, at);
     await appendEvent(trx, {
       kind: 'load.opened',
       at,
@@ -115,24 +119,28 @@ async function greatestCount(trx: Transaction, sterilizerId: string, facility: F
   return row?.max ?? 0;
 }
 
-async function listRun(trx: Transaction, facilityId: string, runId: string, loadId: string, at: Date): Promise<number> {
+async function requireRun(trx: Transaction, facilityId: string, runId: string): Promise<RunFacts> {
   const run = await lockRun(trx, runId);
   if (run?.facilityId !== facilityId) throw new NotFound('run.none', 'There is no such run here.');
   if (run.state === 'taken') throw new Conflict('run.taken', `${run.name} is already on another load.`);
   if (run.state === 'dropped') throw new InvalidInput('run.dropped', `${run.name} was dropped.`);
-  const staged = await packagesOfRun(trx, runId);
+  return run;
+}
+
+async function listRun(trx: Transaction, run: RunFacts, loadId: string, at: Date): Promise<number> {
+  const staged = await packagesOfRun(trx, run.id);
   await lockPackages(
     trx,
     staged.map((entry) => entry.id),
   );
-  const free = (await packagesOfRun(trx, runId)).filter((entry) => entry.openLoad === null);
+  const free = (await packagesOfRun(trx, run.id)).filter((entry) => entry.openLoad === null);
   if (free.length > 0) {
     await trx('load_packages').insert(
       free.map((entry) => ({ load_id: loadId, package_id: entry.id, is_open: true, was_staged: true, listed_at: at })),
     );
   }
   await trx('runs')
-    .where({ id: runId })
+    .where({ id: run.id })
     .update({ state: 'taken', version: run.version + 1 });
   return free.length;
 }

@@ -9,7 +9,7 @@ import { appendEvent } from '../../platform/audit-writer';
 import type { Transaction } from '../../platform/db';
 import { once } from '../../platform/once';
 import { holderByPlaceCode, shelfByPlaceCode } from '../equipment/read-model';
-import { catalogueItems } from '../items/read-model';
+import { catalogueItems, findItemByDeviceIdentifier } from '../items/read-model';
 import { findPackageByCode, lockPackageByCode } from '../packages/read-model';
 import { recordAct, requireAct, type ActContext } from './load-change';
 import { lockLoad } from './load-store';
@@ -35,6 +35,12 @@ function shown(raw: string): string {
     .replace(/[\u0000-\u001f\u007f-\u009f\ud800-\udfff]/g, ' ')
     .trim();
   return visible.length > shownLength ? `${visible.slice(0, shownLength)}…` : visible;
+}
+
+/** A badge is half of a key: it is named, and never kept or shown. */
+function shownOf(scan: Scan, raw: string): string {
+  if (scan.kind === 'badge') return 'a badge';
+  return 'code' in scan ? scan.code : shown(raw);
 }
 
 /** Takes one scan at an open load: a place, or a package. Only the answer `taken` changes the load. */
@@ -66,10 +72,10 @@ export async function scanIntoLoad(
           subjectId: load.id,
           loadId: load.id,
           requestId: request.requestId,
-          payload: { answer: answer.answer, read: shown(request.raw), entry: request.entry },
+          payload: { answer: answer.answer, read: shownOf(scan, request.raw), entry: request.entry },
         });
       }
-      return { ...answer, at: at.toISOString(), code: 'code' in scan ? scan.code : shown(request.raw) };
+      return { ...answer, at: at.toISOString(), code: shownOf(scan, request.raw) };
     },
   );
 }
@@ -83,7 +89,9 @@ async function answerScan(
 ): Promise<Answer> {
   switch (scan.kind) {
     case 'package':
-      return scanPackage(trx, known, scan.code, place, act);
+      return (await isOfAnotherItem(trx, known, scan))
+        ? refused('The two codes in this symbol do not belong together. Keep it off the cart and show it to a lead.')
+        : scanPackage(trx, known, scan.code, place, act);
     case 'place':
       return scan.place === 'shelf' ? scanShelf(trx, known, scan.code) : scanHolder(trx, known, scan.code, place, act);
     case 'badge':
@@ -99,6 +107,19 @@ async function answerScan(
 
 function refused(sentence: string): Answer {
   return { ...nothing, answer: 'not-known', sentence };
+}
+
+/** A symbol may hold the item's GTIN beside the package's code: then both have to mean the same item. */
+async function isOfAnotherItem(
+  trx: Transaction,
+  known: LoadAsKnown,
+  scan: Extract<Scan, { kind: 'package' }>,
+): Promise<boolean> {
+  if (scan.gtin === null) return false;
+  const item = await findItemByDeviceIdentifier(trx, known.load.facility_id, scan.gtin);
+  if (!item) return false;
+  const facts = await findPackageByCode(trx, scan.code);
+  return facts !== undefined && facts.itemId !== item.id;
 }
 
 async function scanPackage(
@@ -160,7 +181,10 @@ async function lockLabel(
     known.view.items.find((entry) => entry.id === facts.itemId) ??
     (await catalogueItems(trx, facilityId, [facts.itemId]))[0];
   if (!item) return none;
-  const listed = known.view.packages.find((entry) => entry.packageId === facts.id);
+  const asListed = known.view.packages.find((entry) => entry.packageId === facts.id);
+  // Held or called back since the list was read: what counts is what is true while nobody else can change it.
+  const { state, heldReason, expiresOn } = facts;
+  const listed = asListed && { ...asListed, state, heldReason, expiresOn };
   return {
     item,
     label: {
@@ -218,7 +242,7 @@ async function scanHolder(
   }
   const against = await whyHolderIsNotFree(trx, holder);
   if (against !== null) return { ...nothing, answer: 'place-refused', sentence: against };
-  const spot = suggestHolderSpot(known.view, holder.kind, shelfWanted(known.view, place));
+  const spot = suggestHolderSpot(known.view, holder.kind, shelfWanted(known.view, place), known.policy);
   if (!spot) {
     return {
       ...nothing,

@@ -17,15 +17,21 @@ export async function undoLastAct(
   services: Services,
   actor: Actor,
   loadId: string,
-  requestId: string,
+  { requestId, undoing }: { readonly requestId: string; readonly undoing: string },
 ): Promise<{ change: LoadChange }> {
   const { db, clock } = services;
-  return once({ db, clock, actor }, { requestId, act: 'load.undo', body: { loadId } }, async (trx) => {
+  return once({ db, clock, actor }, { requestId, act: 'load.undo', body: { loadId, undoing } }, async (trx) => {
     const at = clock.now();
     const load = await lockLoad(trx, actor.facilityId, loadId);
     requireAct(load, 'build');
     const undoable = await getUndoable(trx, load.id);
     if (!undoable) throw new RuleRefused('load.nothing-to-undo', 'There is nothing to take back.');
+    if (undoable.words !== undoing) {
+      throw new Conflict(
+        'load.changed-since',
+        `Somebody did something else meanwhile: ${undoable.words}. Nothing was taken back.`,
+      );
+    }
     const known = await readLoadView(trx, load, at);
     const back = reverseDifference(undoable.difference);
 

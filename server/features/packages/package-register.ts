@@ -158,7 +158,7 @@ async function write(context: WriteContext, written: readonly Written<PackageFie
     if (before === null) continue;
     await trx('packages')
       .where({ id: after.id })
-      .update({ destination: after.fields.destination, version: after.version });
+      .update({ destination: after.fields.destination, version: trx.raw('version + 1') });
     events.push({
       ...told(after.id),
       kind: 'package.changed',

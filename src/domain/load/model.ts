@@ -98,7 +98,13 @@ export type Placement =
       readonly paper: PaperSide | null;
     }
   /** On edge in a rack's slot, counted from 1. A slot may hold two by mistake: that is a finding, not an impossibility. */
-  | { readonly at: 'slot'; readonly holderId: string; readonly slot: number; readonly pose: Pose; readonly paper: PaperSide | null }
+  | {
+      readonly at: 'slot';
+      readonly holderId: string;
+      readonly slot: number;
+      readonly pose: Pose;
+      readonly paper: PaperSide | null;
+    }
   /** Loose in an open basket; x and y in the basket's frame. */
   | {
       readonly at: 'basket';

@@ -88,7 +88,8 @@ export function useUndoLastAct(loadId: string) {
   const client = useQueryClient();
   return useMutation({
     ...inOrder(loadId),
-    mutationFn: () => api.post(`${paths.load(loadId)}/undo`, { requestId: newRequestId() }, loadChangeResponseSchema),
+    mutationFn: (undoing: string) =>
+      api.post(`${paths.load(loadId)}/undo`, { requestId: newRequestId(), undoing }, loadChangeResponseSchema),
     onSuccess: ({ change }) => takeIn(client, loadId, change),
   });
 }

@@ -59,7 +59,12 @@ const acts: readonly {
     body: () => ({ requestId: anId(), edits: [{ edit: 'take-off', packageId: anId() }] }),
     may: builders,
   },
-  { method: 'post', path: (id) => `/api/loads/${id}/undo`, body: () => ({ requestId: anId() }), may: builders },
+  {
+    method: 'post',
+    path: (id) => `/api/loads/${id}/undo`,
+    body: () => ({ requestId: anId(), undoing: 'x' }),
+    may: builders,
+  },
   {
     method: 'post',
     path: (id) => `/api/loads/${id}/counts`,

@@ -155,7 +155,8 @@ describe('changing a load', () => {
     expect(await packageRow(app, one.id)).toMatchObject({ state: 'packed' });
 
     for (let act = 0; act < 3; act += 1) {
-      await technician.post(`/api/loads/${loadId}/undo`).send({ requestId: anId() }).expect(200);
+      const { undoable } = await detailOf(technician, loadId);
+      await technician.post(`/api/loads/${loadId}/undo`).send({ requestId: anId(), undoing: undoable }).expect(200);
     }
     const back = await detailOf(technician, loadId);
     expect(back.view.packages).toEqual(scanned.view.packages);
@@ -174,12 +175,30 @@ describe('changing a load', () => {
     await edit(technician, first, [{ edit: 'take-off', packageId: one.id }]);
     expect(await scan(technician, second, one.code)).toMatchObject({ answer: 'taken' });
     const before = await loadSnapshot(app);
-    const reply = await technician.post(`/api/loads/${first}/undo`).send({ requestId: anId() });
+    const { undoable } = await detailOf(technician, first);
+    const reply = await technician.post(`/api/loads/${first}/undo`).send({ requestId: anId(), undoing: undoable });
     expect(reply.status).toBe(409);
     expect(problemOf(reply.body).code).toBe('load.changed-since');
     expect(await loadSnapshot(app)).toBe(before);
     await giveUp(first);
     await giveUp(second);
+  });
+
+  it('does not take back an act that the person has not seen', async () => {
+    const technician = await app.as('technician');
+    const lead = await app.as('lead');
+    const loadId = await openLoad(technician, bay);
+    const one = await packOne(app, bay.pouch.id);
+    const other = await packOne(app, bay.pouch.id);
+    await scan(technician, loadId, one.code);
+    const { undoable } = await detailOf(technician, loadId);
+    await scan(lead, loadId, other.code);
+    const before = await loadSnapshot(app);
+    const reply = await technician.post(`/api/loads/${loadId}/undo`).send({ requestId: anId(), undoing: undoable });
+    expect(reply.status).toBe(409);
+    expect(problemOf(reply.body).detail).toContain(other.code);
+    expect(await loadSnapshot(app)).toBe(before);
+    await giveUp(loadId);
   });
 
   it('does all of several edits or none', async () => {
@@ -306,7 +325,7 @@ describe('closing a load', () => {
     for (const [path, body] of [
       ['scans', { raw: packages[0]?.code, entry: 'wedge', place: null }],
       ['edits', { edits: [{ edit: 'take-off', packageId: packages[0]?.id }] }],
-      ['undo', {}],
+      ['undo', { undoing: 'Scan' }],
       ['counts', { shelfId: full, counted: 9 }],
       ['close', {}],
       ['abandon', { reason: 'Changed my mind' }],

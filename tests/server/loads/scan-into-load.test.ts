@@ -120,6 +120,17 @@ describe('the six answers to a package', () => {
     expect(await loadSnapshot(app)).toBe(before);
   });
 
+  it('never keeps or shows a badge that was scanned here', async () => {
+    const technician = await app.as('technician');
+    const { badge } = app.person('lead');
+    const reply = await scan(technician, loadId, badge);
+    expect(reply).toMatchObject({ answer: 'not-known', code: 'a badge' });
+    const history = await technician.get(`/api/loads/${loadId}/history`).expect(200);
+    expect(JSON.stringify([reply, history.body])).not.toContain(badge);
+    const kept = await app.db('audit_events').where({ load_id: loadId }).select<{ payload: unknown }[]>('payload');
+    expect(JSON.stringify(kept)).not.toContain(badge);
+  });
+
   it('keeps every refused scan in the history', async () => {
     const technician = await app.as('technician');
     await scan(technician, loadId, 'please load me');

@@ -25,7 +25,6 @@ export type ItemChanges = Partial<{
   clearance_mm: number | null;
   pose: string;
   preferred_holder: string | null;
-  cycle_needs: string;
 }>;
 
 let counted = 0;

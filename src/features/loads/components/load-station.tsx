@@ -51,7 +51,9 @@ export function LoadStation({ detail }: { detail: LoadDetail }) {
           undoable={mayBuild ? detail.undoable : null}
           onClearPlace={clearPlace}
           onKeyIn={keyIn}
-          onUndo={acts.undo}
+          onUndo={() => {
+            if (detail.undoable !== null) acts.undo(detail.undoable);
+          }}
         />
       ) : (
         <ClosedLoad detail={detail} />

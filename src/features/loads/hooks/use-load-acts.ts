@@ -92,19 +92,22 @@ export function useLoadActs(loadId: string) {
   );
 
   const { mutate: takeBack } = undoMutation;
-  const undo = useCallback(() => {
-    setProblem(null);
-    takeBack(undefined, {
-      onSuccess: () => {
-        announce('Taken back.');
-        setLast({ kind: 'none' });
-      },
-      onError: (error) => {
-        setProblem(sentenceOf(error));
-        announce(sentenceOf(error), 'assertive');
-      },
-    });
-  }, [announce, takeBack]);
+  const undo = useCallback(
+    (undoing: string) => {
+      setProblem(null);
+      takeBack(undoing, {
+        onSuccess: () => {
+          announce('Taken back.');
+          setLast({ kind: 'none' });
+        },
+        onError: (error) => {
+          setProblem(sentenceOf(error));
+          announce(sentenceOf(error), 'assertive');
+        },
+      });
+    },
+    [announce, takeBack],
+  );
 
   const forgetProblem = useCallback(() => {
     setProblem(null);
