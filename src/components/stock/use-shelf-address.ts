@@ -30,6 +30,10 @@ export function useShelfAddress() {
     setSearch: (text: string) => {
       set({ search: text, page: null });
     },
+    /** In one go: of two changes right after each other the router keeps the second only. */
+    showAll: () => {
+      set({ search: null, kind: null, page: null });
+    },
     setRetiredShown: (isShown: boolean) => {
       set({ retired: isShown ? 'shown' : null, page: null });
     },

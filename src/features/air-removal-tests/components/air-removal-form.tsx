@@ -58,8 +58,10 @@ export function AirRemovalForm({ sterilizers, sterilizerId, readers, lastPack, o
   const result = useWatch({ control, name: 'result' });
   const chosen = sterilizers.find((one) => one.id === sterilizerId);
   const send = handleSubmit(async (test) => {
+    // The box goes with a failed test only, and may have been ticked before the result was put right.
+    const isTakenOutOfService = test.result === 'failed' && test.isTakenOutOfService;
     try {
-      const reply = await write((requestId) => record.mutateAsync({ ...test, requestId }));
+      const reply = await write((requestId) => record.mutateAsync({ ...test, isTakenOutOfService, requestId }));
       const { code } = reply.test.sterilizer;
       announce(
         reply.serviceState === 'out-of-service' ? `${code} is out of service.` : `${code}: test ${reply.test.result}.`,

@@ -33,10 +33,11 @@ export function CartDrawing({ cart }: { cart: { readonly name: string; readonly 
   return (
     <MapDrawing width={width} height={foot + 24} label={`${cart.name} from the door end, drawn to scale`}>
       <path d={`M3 6V${foot + 8}M${3 + widest * scale} 6V${foot + 8}`} strokeWidth="2.4" className="stroke-ink-1" />
-      {decks.map(({ shelf, y }) => {
+      {decks.map(({ shelf, y }, at) => {
         const high = shelf.clearHeightMm * scale;
         return (
-          <g key={shelf.level}>
+          // While it is filled in, two shelves may be on one level.
+          <g key={at}>
             <path
               d={`M3 ${y}h${shelf.widthMm * scale}`}
               strokeWidth="3"

@@ -88,7 +88,7 @@ export function CartForm({ cart, onLeave }: { cart: CartOnFile | null; onLeave: 
   );
 }
 
-function ShelvesPart({ form: { control, register, formState }, kept }: { form: FormApi; kept: number }) {
+function ShelvesPart({ form: { control, register, formState, getValues }, kept }: { form: FormApi; kept: number }) {
   const { fields, append, remove } = useFieldArray({ control, name: 'shelves' });
   const errors = formState.errors.shelves;
   return (
@@ -145,7 +145,7 @@ function ShelvesPart({ form: { control, register, formState }, kept }: { form: F
           icon="plus"
           className="justify-self-start"
           onPress={() => {
-            const last = fields.at(-1);
+            const last = getValues('shelves').at(-1);
             append({
               ...lowerShelf,
               level: fields.length + 1,

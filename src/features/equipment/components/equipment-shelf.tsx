@@ -91,13 +91,7 @@ export function EquipmentShelf<Thing extends Row>({
                   ? {}
                   : {
                       act: (
-                        <Button
-                          kind="quiet"
-                          size="small"
-                          onPress={() => {
-                            address.setSearch('');
-                          }}
-                        >
+                        <Button kind="quiet" size="small" onPress={address.showAll}>
                           Show all {things}
                         </Button>
                       ),

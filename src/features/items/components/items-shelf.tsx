@@ -158,14 +158,7 @@ export function ItemsShelf() {
               <EmptyState
                 title="No item like that"
                 act={
-                  <Button
-                    kind="quiet"
-                    size="small"
-                    onPress={() => {
-                      address.setSearch('');
-                      address.setKind(null);
-                    }}
-                  >
+                  <Button kind="quiet" size="small" onPress={address.showAll}>
                     Show all items
                   </Button>
                 }
