@@ -1,5 +1,11 @@
 import { readFileSync } from 'node:fs';
-import type { StepResult } from './steps';
+
+export type StepResult = {
+  readonly exitCode: number;
+  readonly output: string;
+  /** Where Vitest wrote its report, if the step is one of its projects. */
+  readonly reportFile: string;
+};
 
 export type Count = {
   readonly passed: number;

@@ -1,6 +1,6 @@
 import path from 'node:path';
 import { top } from '../setup/checkout.mjs';
-import { countE2e, countExitCode, countVitest, type Count } from './count';
+import { countE2e, countExitCode, countVitest, type Count, type StepResult } from './count';
 
 export type Step = {
   readonly name: string;
@@ -8,8 +8,6 @@ export type Step = {
   readonly limitMinutes: number;
   readonly count: (result: StepResult) => Count;
 };
-
-export type StepResult = { readonly exitCode: number; readonly output: string; readonly reportFile: string };
 
 /** Where a step that writes a report writes it; its name stands for the file's. */
 export const reportFolder = path.join(top, '.tsc', 'reports');
