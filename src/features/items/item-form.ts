@@ -1,6 +1,7 @@
 import { itemFieldsSchema, type Item, type ItemFieldsInput } from '#contract/items';
 import { checkItem } from '#domain/catalogue/check-item';
 import type { ItemFields } from '#domain/catalogue/item-fields';
+import type { Control, UseFormReturn } from 'react-hook-form';
 import type { z } from 'zod';
 
 /** What the server will look at, looked at here first: each value alone, then how they hold together. */
@@ -11,6 +12,8 @@ export const itemFormSchema = itemFieldsSchema.superRefine((item, context) => {
 });
 
 export type ItemFormInput = z.input<typeof itemFormSchema>;
+export type ItemFormApi = UseFormReturn<ItemFormInput, unknown, ItemFields>;
+export type ItemFormControl = Control<ItemFormInput, unknown, ItemFields>;
 
 /** Where a new item begins: what most are. Figures begin empty, so that nobody keeps one by mistake. */
 export const emptyItem = {

@@ -4,7 +4,7 @@ import { QuantityField } from '../../../components/stock/quantity-field';
 import { Button } from '../../../components/ui/button';
 import { FieldError } from '../../../components/ui/field';
 import { SelectField } from '../../../components/ui/select-field';
-import type { ItemFormApi } from './item-form';
+import type { ItemFormApi } from '../item-form';
 
 const faceOptions = [
   { value: 'lid', label: 'Lid' },

@@ -3,7 +3,7 @@ import type { ItemFields } from '#domain/catalogue/item-fields';
 import { expiryRules, itemKinds, metals, packagings, poses } from '#domain/catalogue/item-fields';
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useQuery } from '@tanstack/react-query';
-import { useForm, useWatch, type Control, type UseFormReturn } from 'react-hook-form';
+import { useForm, useWatch } from 'react-hook-form';
 import { kindInWords } from '../../../components/item-kind';
 import { countProblems, FormPage, FormPart } from '../../../components/stock/form-page';
 import { CodesField, QuantityField } from '../../../components/stock/quantity-field';
@@ -13,16 +13,21 @@ import { CheckboxField } from '../../../components/ui/checkbox-field';
 import { FilmPanel } from '../../../components/ui/film-panel';
 import { SelectField } from '../../../components/ui/select-field';
 import { TextAreaField, TextField } from '../../../components/ui/text-field';
-import { changesOf, emptyItem, itemFormSchema, usualOfKind, type ItemFormInput } from '../item-form';
+import {
+  changesOf,
+  emptyItem,
+  itemFormSchema,
+  usualOfKind,
+  type ItemFormApi,
+  type ItemFormControl,
+  type ItemFormInput,
+} from '../item-form';
 import { capital, metalWords, packagingWords, poseWords } from '../item-words';
 import { useAddItem, useChangeItem } from '../mutations';
 import { itemQueries } from '../queries';
 import { CyclesPart } from './cycles-part';
 import { FiltersPart } from './filters-part';
 import { ItemDrawing } from './item-drawing';
-
-export type ItemFormApi = UseFormReturn<ItemFormInput, unknown, ItemFields>;
-export type ItemFormControl = Control<ItemFormInput, unknown, ItemFields>;
 
 type ItemFormProps = {
   /** null: a new one. */
