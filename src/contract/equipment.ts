@@ -192,3 +192,20 @@ export type HolderOnFile = z.output<typeof holderSchema>;
 export const holderParamsSchema = z.strictObject({ holderId: idSchema });
 export const holderListQuerySchema = z.strictObject({ ...listQuery, kind: codeSchema.optional() });
 export const holderListResponseSchema = z.object({ holders: z.array(holderSchema), ...pageOfList });
+
+// ---- place labels
+
+/** Labels of one cart's shelves, of all holders of a kind, or of one holder: a PDF. */
+export const placeLabelQuerySchema = z
+  .strictObject({
+    cartId: idSchema.optional(),
+    holderKindId: idSchema.optional(),
+    holderId: idSchema.optional(),
+    layout: z.enum(['single', 'sheet']).default('single'),
+  })
+  .refine(
+    ({ cartId, holderKindId, holderId }) =>
+      [cartId, holderKindId, holderId].filter((id) => id !== undefined).length === 1,
+    'Say of which cart, kind of holder or holder.',
+  );
+export type PlaceLabelQuery = z.output<typeof placeLabelQuerySchema>;

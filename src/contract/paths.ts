@@ -19,6 +19,7 @@ export const paths = {
   holderKinds: '/api/holder-kinds',
   holders: '/api/holders',
   airRemovalTests: '/api/air-removal-tests',
+  placeLabels: '/api/place-labels',
   packages: '/api/packages',
   packageLabels: '/api/packages/labels',
   packageLabelSheet: (batchId: string, layout: 'single' | 'sheet') =>

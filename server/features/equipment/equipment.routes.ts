@@ -3,6 +3,7 @@ import { airRemovalTestRoutes } from './air-removal-tests.routes';
 import { cartRoutes } from './carts.routes';
 import { holderKindRoutes } from './holder-kinds.routes';
 import { holderRoutes } from './holders.routes';
+import { placeLabelRoutes } from './place-labels.routes';
 import { programRoutes } from './programs.routes';
 import { sterilizerRoutes } from './sterilizers.routes';
 
@@ -13,4 +14,5 @@ export const equipmentRoutes: readonly Route[] = [
   ...holderKindRoutes,
   ...holderRoutes,
   ...airRemovalTestRoutes,
+  ...placeLabelRoutes,
 ];

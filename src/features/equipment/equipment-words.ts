@@ -1,7 +1,5 @@
 import type { HolderCondition, SizeClass } from '#domain/catalogue/equipment-fields';
 import type { HolderKind, ServiceState, Shelf } from '#domain/load/model';
-import type { UnitSystem } from '../../lib/facility';
-import { formatDuration, formatTemperature } from '../../lib/format';
 
 export const serviceStateWords: Readonly<Record<ServiceState, string>> = {
   'in-service': 'In service',
@@ -25,15 +23,6 @@ export const conditionWords: Readonly<Record<HolderCondition, string>> = {
   'in-repair': 'In repair',
   missing: 'Missing',
 };
-
-/** "132 °C, 4 min, dry 30 min" */
-export function programInWords(
-  program: { readonly temperatureC: number; readonly exposureS: number; readonly dryS: number },
-  unitSystem: UnitSystem,
-): string {
-  const dry = program.dryS === 0 ? 'no drying' : `dry ${formatDuration(program.dryS)}`;
-  return `${formatTemperature(program.temperatureC, unitSystem)}, ${formatDuration(program.exposureS)}, ${dry}`;
-}
 
 /** Choices of a list, in the words people see. */
 export function optionsOf<Value extends string>(

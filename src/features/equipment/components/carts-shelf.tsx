@@ -13,6 +13,7 @@ import { CartDrawing } from './cart-drawing';
 import { CartForm } from './cart-form';
 import { ChangeButton } from './change-button';
 import { EquipmentShelf } from './equipment-shelf';
+import { PlaceLabelsButton } from './place-labels-button';
 
 /** "2 shelves", "1 of 2 shelves", "Taken out" */
 function shelvesInWords(cart: CartOnFile): string {
@@ -129,7 +130,10 @@ function CartPanel({ cart, onChange }: { cart: CartOnFile; onChange: () => void 
           </Facts>
         </section>
       ))}
-      <ChangeButton onPress={onChange} />
+      <span className="flex flex-wrap gap-2">
+        <ChangeButton onPress={onChange} />
+        <PlaceLabelsButton of={{ cartId: cart.id }}>Print its place labels</PlaceLabelsButton>
+      </span>
     </div>
   );
 }

@@ -13,6 +13,7 @@ import { equipmentQueries } from '../queries';
 import { ChangeButton } from './change-button';
 import { EquipmentShelf } from './equipment-shelf';
 import { HolderKindForm } from './holder-kind-form';
+import { PlaceLabelsButton } from './place-labels-button';
 import { RackDrawing } from './rack-drawing';
 
 /** Kinds of holders: what each takes, and how many there are. */
@@ -117,7 +118,12 @@ export function HolderKindsShelf() {
           <Link to={`/stock/holders?search=${encodeURIComponent(kind.code)}`} className="text-row">
             Its holders, one by one
           </Link>
-          <ChangeButton onPress={onChange} />
+          <span className="flex flex-wrap gap-2">
+            <ChangeButton onPress={onChange} />
+            {kind.coded > 0 && (
+              <PlaceLabelsButton of={{ holderKindId: kind.id }}>Print their place labels</PlaceLabelsButton>
+            )}
+          </span>
         </div>
       )}
       formOf={(kind, onLeave) => <HolderKindForm key={kind?.id ?? 'new'} kind={kind} onLeave={onLeave} />}

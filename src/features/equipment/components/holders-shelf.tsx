@@ -16,6 +16,7 @@ import { useKeepHolder } from '../mutations';
 import { equipmentQueries } from '../queries';
 import { EquipmentShelf } from './equipment-shelf';
 import { HolderForm } from './holder-form';
+import { PlaceLabelsButton } from './place-labels-button';
 
 /** The holders one by one: each has a place code of its own and is in some condition. */
 export function HoldersShelf() {
@@ -107,6 +108,7 @@ function HolderPanel({ holder }: { holder: HolderOnFile }) {
         </Fact>
         {!mayEdit && <Fact name="Condition">{conditionWords[holder.condition]}</Fact>}
       </Facts>
+      <PlaceLabelsButton of={{ holderId: holder.id }}>Print its place label</PlaceLabelsButton>
       {mayEdit && (
         <RadioGroupField
           label="Condition"
