@@ -1,0 +1,174 @@
+import assert from 'node:assert/strict';
+import type { Page } from 'playwright-core';
+import { loadDetailSchema, loadOpeningOptionsSchema, openLoadResponseSchema } from '../../../src/contract/loads';
+import { paths } from '../../../src/contract/paths';
+import { z } from 'zod';
+import { phone, tablet } from '../../../scripts/running/browser';
+import type { Caller } from '../../../scripts/running/caller';
+import { fillCart } from '../../../scripts/running/full-cart';
+import { faultsOf } from '../support/accessibility';
+import type { Journey } from '../support/journey';
+import { see } from '../support/see';
+import { people, personWith, type Size, type Stage } from '../support/stage';
+
+/** A screen or what lies over one; `show` brings it about from the address. */
+type Sight = {
+  readonly name: string;
+  readonly address: string;
+  readonly show?: (page: Page) => Promise<void>;
+};
+
+const press = (name: string | RegExp) => async (page: Page) => {
+  await page.getByRole('button', { name }).filter({ visible: true }).first().click();
+  await see(page.getByRole('dialog').or(page.getByRole('alertdialog')));
+};
+
+async function openFirstRow(page: Page): Promise<void> {
+  await page.getByRole('table').getByRole('row').nth(1).getByRole('button').click();
+}
+
+const stock: readonly Sight[] = [
+  { name: 'Items', address: '/stock/items' },
+  { name: 'An item', address: '/stock/items', show: openFirstRow },
+  { name: 'Item form', address: '/stock/items?form=new' },
+  { name: 'Sterilizers', address: '/stock/sterilizers' },
+  { name: 'A sterilizer', address: '/stock/sterilizers', show: openFirstRow },
+  { name: 'Programs', address: '/stock/programs' },
+  { name: 'Carts', address: '/stock/carts' },
+  { name: 'Holders', address: '/stock/holders' },
+  { name: 'Kinds of holders', address: '/stock/holder-kinds' },
+  { name: 'Air-removal test', address: '/stock/air-removal' },
+];
+
+const packing: readonly Sight[] = [
+  { name: 'Packing station', address: '/pack/station' },
+  { name: 'Packing an item', address: '/pack/station', show: openFirstRow },
+  { name: 'Packages', address: '/pack/packages' },
+  {
+    name: 'A package',
+    address: '/pack/packages',
+    show: async (page) => {
+      await openFirstRow(page);
+      await see(page.getByRole('dialog'));
+    },
+  },
+  { name: 'Runs', address: '/pack/runs' },
+  { name: 'New run', address: '/pack/runs', show: press('New run') },
+];
+
+const others: readonly Sight[] = [
+  { name: 'Today', address: '/' },
+  { name: 'Loads', address: '/loads' },
+  { name: 'Opening a load', address: '/loads', show: press('Open a load') },
+  { name: 'New password', address: '/new-password' },
+  { name: 'Nothing here', address: '/no-such-place' },
+];
+
+function sightsOfLoads(full: string, empty: string): readonly Sight[] {
+  const address = `/loads/${full}`;
+  return [
+    { name: 'An empty load', address: `/loads/${empty}` },
+    { name: 'A load of 60', address },
+    { name: 'Keying in', address, show: press('Key in') },
+    { name: 'Counting', address, show: press(/^Count lower shelf$/) },
+    { name: 'Giving up', address, show: press('Give the load up') },
+    { name: 'Stickers', address, show: press('Load stickers') },
+    {
+      name: 'A package on the cart',
+      address,
+      show: async (page) => {
+        await page.locator('[data-walk="0"]').first().click();
+        await see(page.getByRole('dialog'));
+      },
+    },
+    {
+      name: 'A finding',
+      address,
+      show: async (page) => {
+        await page.locator('button[id^="finding-"]').first().click();
+        await see(page.locator('button[id^="finding-"][aria-expanded="true"]'));
+      },
+    },
+  ];
+}
+
+function sightsOfPeople(size: Size): readonly Sight[] {
+  const who = size.width < 700 ? 'More' : /is at this station/;
+  return [
+    { name: 'People', address: '/people' },
+    { name: 'Adding a person', address: '/people', show: press('Add a person') },
+    { name: 'Who is here', address: '/people', show: press(who) },
+    {
+      name: 'Changing the person',
+      address: '/people',
+      show: async (page) => {
+        await press(who)(page);
+        await page.getByRole('dialog').getByRole('button', { name: 'Change person' }).click();
+        await see(page.getByRole('heading', { name: 'Change person' }));
+      },
+    },
+  ];
+}
+
+/** A load of nothing, and one of sixty with findings. */
+async function prepareLoads(caller: Caller): Promise<{ full: string; empty: string }> {
+  const { loadId: full } = await fillCart(caller, { wait: 1 });
+  const { view } = await caller.get(paths.load(full), loadDetailSchema);
+  const edits = view.packages
+    .filter((one) => one.placement?.paper === 'left')
+    .slice(4, 6)
+    .map(({ packageId }) => ({ edit: 'turn-paper', packageId, paper: 'right' }));
+  await caller.post(`${paths.load(full)}/edits`, { edits }, z.unknown());
+  const { sterilizers } = await caller.get(`${paths.loads}/opening-options`, loadOpeningOptionsSchema);
+  const option = sterilizers.find(({ sterilizer }) => sterilizer.code === 'ST-2');
+  const { loadId: empty } = await caller.post(
+    paths.loads,
+    {
+      sterilizerId: option?.sterilizer.id,
+      programId: option?.programs[0]?.id,
+      cartId: option?.carts.find((cart) => cart.isFree)?.id,
+      runId: null,
+    },
+    openLoadResponseSchema,
+  );
+  return { full, empty };
+}
+
+async function lookAt(stage: Stage, size: Size): Promise<void> {
+  const technician = await stage.callAs(people.technician);
+  const { full, empty } = await prepareLoads(technician);
+  const administrator = await stage.callAs(personWith('T9003'));
+  const supervisor = await stage.callAs(people.supervisor);
+  const faults: string[] = [];
+  for (const [as, sights] of [
+    [null, [{ name: 'Sign-in', address: '/sign-in' }]],
+    [supervisor, [...others, ...packing, ...stock, ...sightsOfLoads(full, empty)]],
+    [administrator, sightsOfPeople(size)],
+  ] as const) {
+    const station = await stage.openStation({
+      size,
+      isStill: true,
+      ...(as ? { as } : {}),
+      expected: [{ method: 'GET', path: /no-such-place/, status: 404 }],
+    });
+    for (const { name, address, show } of sights as readonly Sight[]) {
+      await station.goto(address);
+      await see(station.getByRole('heading'));
+      await station.waitForLoadState('networkidle');
+      await show?.(station);
+      faults.push(...(await faultsOf(station)).map((fault) => `${name}: ${fault}`));
+    }
+    await station.context().close();
+  }
+  assert.deepEqual(faults, []);
+}
+
+export const accessibilityOnTablet: Journey = {
+  name: 'No screen and no sheet has a fault that axe can find, on the tablet',
+  run: (stage) => lookAt(stage, tablet),
+};
+
+export const accessibilityOnPhone: Journey = {
+  name: 'No screen and no sheet has a fault that axe can find, on the phone',
+  run: (stage) => lookAt(stage, phone),
+};
