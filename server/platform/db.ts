@@ -2,10 +2,8 @@ import knexModule, { type Knex } from 'knex';
 import pg from 'pg';
 
 // DATE as text: a local-midnight Date would shift expiry days by the zone. INT8 as a checked number.
-const DATE_OID = 1082;
-const INT8_OID = 20;
-pg.types.setTypeParser(DATE_OID, (text) => text);
-pg.types.setTypeParser(INT8_OID, (text) => {
+pg.types.setTypeParser(pg.types.builtins.DATE, (text) => text);
+pg.types.setTypeParser(pg.types.builtins.INT8, (text) => {
   const value = Number(text);
   if (!Number.isSafeInteger(value)) throw new RangeError(`${text} is too large to be counted exactly`);
   return value;

@@ -14,18 +14,15 @@ export const requestIdSchema = z.uuid();
 
 /** Text a person types: trimmed, without control characters. */
 export function textSchema(greatestLength: number) {
-  return (
-    z
-      .string()
-      .trim()
-      .min(1, 'Please fill this in.')
-      .max(greatestLength, `At most ${greatestLength} characters.`)
-      // eslint-disable-next-line no-control-regex -- control characters are what is refused here
-      .refine(
-        (text) => !/[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f]/.test(text),
-        'This has a character that cannot be kept.',
-      )
-  );
+  return z
+    .string()
+    .trim()
+    .min(1, 'Please fill this in.')
+    .max(greatestLength, `At most ${greatestLength} characters.`)
+    .refine(
+      (text) => !/[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f]/.test(text),
+      'This has a character that cannot be kept.',
+    );
 }
 
 export const reasonSchema = textSchema(500);

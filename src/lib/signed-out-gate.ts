@@ -10,8 +10,6 @@ type HeldCall = {
 /** again: send it once more. other-person: somebody else signed in, so this write is not theirs. gave-up: nobody did. */
 export type Verdict = 'again' | 'other-person' | 'gave-up';
 
-export type SignedOutGate = ReturnType<typeof createSignedOutGate>;
-
 /**
  * What happens when a sign-in ends in the middle of work: the screen stays, a sheet asks who is there, and the calls
  * that failed wait. They go on only in the name they were made in: each act carries its own name.

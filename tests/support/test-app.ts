@@ -70,16 +70,6 @@ export function anId(): string {
   return randomUUID();
 }
 
-/** `anIdOf` keeps its ids apart by name within one test: `const id = ids(); id('tray')` twice gives the same. */
-export function ids(): (name: string) => string {
-  const known = new Map<string, string>();
-  return (name) => {
-    const id = known.get(name) ?? randomUUID();
-    known.set(name, id);
-    return id;
-  };
-}
-
 /**
  * The real application over HTTP on a database of the calling file's own, with a held clock and two facilities.
  * Call it at the top of the file; what it gives is ready from the first beforeAll on.

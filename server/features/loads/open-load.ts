@@ -114,9 +114,9 @@ async function requireCart(
 async function greatestCount(trx: Transaction, sterilizerId: string, facility: FacilityDay): Promise<number> {
   const row = await trx('loads')
     .where({ sterilizer_id: sterilizerId, day: facility.day })
-    .max<{ max: number | null } | undefined>('count_of_day as max')
-    .first();
-  return row?.max ?? 0;
+    .orderBy('count_of_day', 'desc')
+    .first<{ count_of_day: number } | undefined>('count_of_day');
+  return row?.count_of_day ?? 0;
 }
 
 async function requireRun(trx: Transaction, facilityId: string, runId: string): Promise<RunFacts> {

@@ -24,10 +24,6 @@ export function celsius(value: number): Celsius {
   return value as Celsius;
 }
 
-export function kilopascal(value: number): Kilopascal {
-  return value as Kilopascal;
-}
-
 export function seconds(value: number): Second {
   return value as Second;
 }

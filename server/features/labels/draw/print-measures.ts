@@ -12,12 +12,6 @@ export const dotMm = 0.125;
 /** Width of the narrowest bar, in mm: 3 dots, so that ink or heat that creeps by half a dot does not close a gap. */
 export const barModuleMm = 3 * dotMm;
 
-/** Blank on either side of a Code 128 symbol, in modules (ISO/IEC 15417: 10; from memory, and in a printer's manual). */
-export const barQuietModules = 10;
-
-/** Blank around a Data Matrix symbol, in modules (ISO/IEC 16022: 1; from memory). */
-export const matrixQuietModules = 1;
-
 /** The widest module on the dot grid with which so many modules fit into a length, in mm. */
 export function moduleFitting(modules: number, lengthMm: number): number {
   return Math.floor(lengthMm / modules / dotMm + 1e-9) * dotMm;
