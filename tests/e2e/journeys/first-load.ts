@@ -192,7 +192,8 @@ export const firstLoad: Journey = {
       const camera = loadPage(tablet);
       await camera.isOpen();
       const answer = await camera.scanWithCamera();
-      assert.equal(answer.answer, 'taken', answer.words);
+      // The film goes on: a slow machine may have read the label again, and been told that it is on the cart by now.
+      assert.ok(['taken', 'already-here'].includes(answer.answer), answer.words);
       assert.ok(answer.words.includes(code), `${name}: ${answer.words}`);
       await tablet.context().close();
     }
