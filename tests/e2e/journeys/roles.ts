@@ -49,7 +49,10 @@ export const roles: Journey = {
   async run(stage) {
     for (const person of demonstrationSignIns) {
       const sees = expected[person.role];
-      const station = await stage.openStation();
+      const station = await stage.openStation({
+        // What a screen shows is asked for while it is found out whether the person may see it.
+        expected: [{ method: 'GET', path: /^\/api\/people$/, status: 403 }],
+      });
       await signInPage(station).signIn(person);
       const rail = station.getByRole('navigation', { name: 'Main' }).filter({ visible: true });
       assert.deepEqual(await rail.getByRole('link').allInnerTexts(), sees.rail, person.role);

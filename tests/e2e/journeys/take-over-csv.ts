@@ -39,7 +39,7 @@ export const takeOverCsv: Journey = {
       ],
     });
     await station.goto('/stock/items');
-    await station.getByRole('button', { name: 'Take over a CSV' }).click();
+    await station.getByRole('button', { name: 'Import a CSV' }).click();
     const sheet = station.getByRole('dialog');
 
     // A file that is no list of items is told so, in words.
