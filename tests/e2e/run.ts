@@ -7,11 +7,12 @@ import type { Journey } from './support/journey';
 import { createStage, picturesFolder } from './support/stage';
 import { accessibilityOnPhone, accessibilityOnTablet } from './journeys/accessibility';
 import { firstLoad } from './journeys/first-load';
+import { importCsv } from './journeys/import-csv';
 import { keyboardOnly } from './journeys/keyboard-only';
 import { roles } from './journeys/roles';
 import { scanAnswers } from './journeys/scan-answers';
 import { sessionEnd } from './journeys/session-end';
-import { takeOverCsv } from './journeys/take-over-csv';
+
 import { twoStations } from './journeys/two-stations';
 
 /*
@@ -26,7 +27,7 @@ const journeys: Readonly<Record<string, Journey>> = {
   'two-stations': twoStations,
   roles,
   'keyboard-only': keyboardOnly,
-  'take-over-csv': takeOverCsv,
+  'import-csv': importCsv,
   'accessibility-tablet': accessibilityOnTablet,
   'accessibility-phone': accessibilityOnPhone,
 };

@@ -57,7 +57,10 @@ export const keyboardOnly: Journey = {
     await station.keyboard.press('ArrowDown');
     assert.match(await load.sheet.getByLabel('Packages').locator('option:checked').innerText(), new RegExp(`^${run}`));
     await tabTo(station, /^Cart/);
-    assert.match(await load.sheet.getByLabel('Sterilizer').inputValue(), /./, 'the run brought its sterilizer');
+    // The run has brought its sterilizer, its program and a free cart.
+    for (const choice of ['Sterilizer', 'Program', 'Cart']) {
+      assert.notEqual(await load.sheet.getByLabel(choice).inputValue(), '', choice);
+    }
     await tabTo(station, /^Open the load$/);
     await station.keyboard.press('Enter');
     await load.isOpen();

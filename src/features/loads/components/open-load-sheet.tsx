@@ -53,6 +53,8 @@ function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: 
     defaultValues: { ...startOf(options, runId), runId },
   });
   const { errors } = form.formState;
+  // The lists of programs and carts change with the sterilizer, so their choice is told them anew each time: a list that is
+  // left to itself drops a choice made before its entry was there.
   const values = useWatch({ control: form.control });
   const chosen = options.sterilizers.find((entry) => entry.sterilizer.id === values.sterilizerId);
 
@@ -88,6 +90,7 @@ function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: 
             label: `${run.name}, ${countOf(run.packages, 'package')}${run.implants > 0 ? `, ${countOf(run.implants, 'implant')}` : ''}`,
           })),
         ]}
+        value={values.runId ?? ''}
         {...form.register('runId', {
           onChange: (event: { target: { value: string } }) => {
             const run = options.runs.find((entry) => entry.id === event.target.value);
@@ -104,6 +107,7 @@ function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: 
           label: sterilizer.serviceState === 'in-service' ? sterilizer.name : `${sterilizer.name}, out of use`,
           isDisabled: sterilizer.serviceState !== 'in-service',
         }))}
+        value={values.sterilizerId ?? ''}
         {...form.register('sterilizerId', {
           onChange: (event: { target: { value: string } }) => {
             chooseSterilizer(event.target.value);
@@ -121,6 +125,7 @@ function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: 
           value: program.id,
           label: `${program.code}: ${formatTemperature(program.temperatureC, unitSystem)}, ${formatDuration(program.exposureS)}, dry ${formatDuration(program.dryS)}`,
         }))}
+        value={values.programId ?? ''}
         {...form.register('programId')}
       />
       <SelectField
@@ -132,6 +137,7 @@ function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: 
           label: cart.isFree ? cart.name : `${cart.name}, ${cart.usedBy ?? 'out of use'}`,
           isDisabled: !cart.isFree,
         }))}
+        value={values.cartId ?? ''}
         {...form.register('cartId')}
       />
       <div className="self-end pb-3 text-row" role="status">
