@@ -5,14 +5,13 @@ import { makeDemonstrations } from '../../scripts/running/demonstration-server';
 import { listenForStop } from '../../scripts/setup/stop-request';
 import type { Journey } from './support/journey';
 import { createStage, picturesFolder } from './support/stage';
-import { accessibilityOnPhone, accessibilityOnTablet } from './journeys/accessibility';
+import { accessibility } from './journeys/accessibility';
 import { firstLoad } from './journeys/first-load';
 import { importCsv } from './journeys/import-csv';
 import { keyboardOnly } from './journeys/keyboard-only';
 import { roles } from './journeys/roles';
 import { scanAnswers } from './journeys/scan-answers';
 import { sessionEnd } from './journeys/session-end';
-
 import { twoStations } from './journeys/two-stations';
 
 /*
@@ -28,8 +27,7 @@ const journeys: Readonly<Record<string, Journey>> = {
   roles,
   'keyboard-only': keyboardOnly,
   'import-csv': importCsv,
-  'accessibility-tablet': accessibilityOnTablet,
-  'accessibility-phone': accessibilityOnPhone,
+  accessibility,
 };
 
 const journeyLimitMs = 240_000;
