@@ -6,7 +6,6 @@ export type Quantity<Unit extends string> = number & { readonly [unit]: Unit };
 export type Millimetre = Quantity<'mm'>;
 export type Kilogram = Quantity<'kg'>;
 export type Celsius = Quantity<'degC'>;
-type Kilopascal = Quantity<'kPa absolute'>;
 export type Second = Quantity<'s'>;
 export type Degree = Quantity<'deg'>;
 export type Percent = Quantity<'%'>;
