@@ -1,28 +1,16 @@
-import type { Celsius } from '../units/quantity';
+import { celsius, type Celsius } from '../units/quantity';
+import { saturationPressureMPa, steamEnthalpy, waterEnthalpy } from './if97';
+
+/** Beyond these no sterilizer works; a temperature outside of them counts as the nearer end. Ours, no source. */
+const coolest = celsius(50);
+const hottest = celsius(200);
 
 /**
- * Latent heat of saturated steam in kJ/kg at temperatures in degrees C.
- * Source: IAPWS-IF97 regions 1 and 2 on the saturation line, computed with the open-source iapws package.
- * Between two rows a straight line is within 0.5 kJ/kg, which is far finer than the mass of any set is known.
+ * Latent heat of saturated steam in kJ/kg at a temperature in degrees C: what it takes to make steam of water, and what
+ * the steam leaves where it turns to water again. Source: IAPWS-IF97, regions 1 and 2 on the line of saturation.
  */
-const table = [
-  [100, 2256.47],
-  [121, 2199.35],
-  [132, 2167.89],
-  [134, 2162.04],
-  [135, 2159.1],
-  [137, 2153.19],
-] as const;
-
-/** kJ/kg, from 100 to 137 degrees C; outside of that the value of the nearer end. */
 export function latentHeat(temperatureC: Celsius): number {
-  let [lowerT, lowerL]: readonly [number, number] = table[0];
-  if (temperatureC <= lowerT) return lowerL;
-  for (const [upperT, upperL] of table) {
-    if (temperatureC <= upperT) {
-      return lowerL + ((upperL - lowerL) * (temperatureC - lowerT)) / (upperT - lowerT);
-    }
-    [lowerT, lowerL] = [upperT, upperL];
-  }
-  return lowerL;
+  const temperatureK = Math.min(Math.max(temperatureC, coolest), hottest) + 273.15;
+  const pressureMPa = saturationPressureMPa(temperatureK);
+  return steamEnthalpy(temperatureK, pressureMPa) - waterEnthalpy(temperatureK, pressureMPa);
 }
