@@ -263,3 +263,13 @@ export async function loadSnapshot(app: TestApp): Promise<string> {
   ]);
   return JSON.stringify(rows);
 }
+
+/** Loads are given up at the end of each test, so that the three carts are enough. */
+export async function giveUp(app: TestApp, loadId: string): Promise<void> {
+  const technician = await app.as('technician');
+  await technician.post(`/api/loads/${loadId}/abandon`).send({ requestId: anId(), reason: 'End of the test' });
+}
+
+export function problemOf(body: unknown): { code: string; detail: string; fields?: { detail: string }[] } {
+  return body as { code: string; detail: string; fields?: { detail: string }[] };
+}
