@@ -3,13 +3,12 @@
  * Source: condensate m c dT / L from data-handbook heats and IAPWS-IF97 latent heat; how much a minute of drying removes has no
  * published figure and is the facility's to learn from its own wet loads.
  */
-import { condensateOf } from '../../steam/condensate';
-import type { Program } from '../model';
 import { limitOf } from '../policy';
-import { isSensibleMass, massOrNothing } from '../sensible';
+import { massOrNothing } from '../sensible';
 import { onLoad, onShelf } from './places';
 import type { Draft, Rule } from './rule';
-import type { Listed, Scene } from './scene';
+import type { Scene } from './scene';
+import { waterOnMetal } from './water-on-metal';
 
 export const water: Rule = {
   id: 'water',
@@ -26,20 +25,15 @@ export const water: Rule = {
 
 function find(scene: Scene): readonly Draft[] {
   const { program, loadId } = scene.view;
+  const { kgOn, working } = waterOnMetal(scene);
   const perMinute = limitOf(null, scene.policy, 'waterPerDryMinute');
   const limit = (perMinute.limit * program.dryS) / 60;
-  const measured = waterOf(scene, scene.listed, program);
+  const items = scene.listed.map(({ item }) => item);
+  const measured = kgOn(items);
   if (!(measured > limit)) return [];
-  const metal = scene.listed.reduce((sum, { item }) => sum + massOrNothing(item?.metalMassKg ?? 0), 0);
+  const metal = items.reduce((sum, item) => sum + massOrNothing(item?.metalMassKg ?? 0), 0);
   const wettest = scene.layout.shelves
-    .map(({ shelf }) => ({
-      shelf,
-      kg: waterOf(
-        scene,
-        scene.listed.filter(({ body }) => body?.shelf === shelf),
-        program,
-      ),
-    }))
+    .map(({ shelf, bodies }) => ({ shelf, kg: kgOn(bodies.map((body) => body.item)) }))
     .sort((a, b) => b.kg - a.kg)[0];
   const figure = { measured, limit, unit: 'kg', want: 'at-most', limitFrom: perMinute.limitFrom } as const;
   const minutes = Math.round(program.dryS / 60);
@@ -48,7 +42,7 @@ function find(scene: Scene): readonly Draft[] {
       subjects: [loadId],
       title: `${metal.toFixed(1)} kg of metal will leave about ${measured.toFixed(2)} kg of water, ${minutes} min of drying is reckoned to remove ${limit.toFixed(2)} kg`,
       remedy: 'Take a program that dries longer, or spread the metal over more loads.',
-      reason: `Steam turns to water on cold metal${wettest && wettest.kg > 0 ? `, most of it here on ${wettest.shelf.name} (${wettest.kg.toFixed(2)} kg)` : ''}, and what does not dry in time makes a wet load.`,
+      reason: `Steam turns to water on cold metal${wettest && wettest.kg > 0 ? `, most of it here on ${wettest.shelf.name} (${wettest.kg.toFixed(2)} kg)` : ''}, and what does not dry in time makes a wet load. ${working(items)}; ${minutes} min × ${tidyPerMinute(perMinute.limit)} kg of water a minute = ${limit.toFixed(2)} kg.`,
       places: [...onLoad, ...(wettest && wettest.kg > 0 ? onShelf(wettest.shelf) : [])],
       figure,
       *fixes() {
@@ -65,11 +59,6 @@ function find(scene: Scene): readonly Draft[] {
   ];
 }
 
-function waterOf(scene: Scene, listed: readonly Listed[], program: Program): number {
-  const range = { startC: scene.policy.startTemperatureC, cycleC: program.temperatureC };
-  return listed.reduce(
-    (sum, { item }) =>
-      item && isSensibleMass(item.metalMassKg) ? sum + condensateOf(item.metal, item.metalMassKg, range) : sum,
-    0,
-  );
+function tidyPerMinute(kgPerMinute: number): string {
+  return String(Number(kgPerMinute.toFixed(4)));
 }

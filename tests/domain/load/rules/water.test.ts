@@ -28,6 +28,17 @@ describe('the load can dry', () => {
     });
     expect(finding?.figure?.measured).toBeCloseTo(0.38747, 4);
     expect(finding?.reason).toContain('Lower shelf (0.26 kg)');
+    expect(finding?.reason).toContain('15.0 kg steel × 0.50 kJ/kgK × 112 K ÷ 2168 kJ/kg = 0.39 kg');
+    expect(finding?.reason).toContain('30 min × 0.01 kg of water a minute = 0.30 kg');
+  });
+
+  it('adds up different metals, the heaviest first', () => {
+    // 5 × 0.897 × 112 / 2167.89 = 0.2317 and 10 kg of steel 0.2583.
+    const mixed = load.withItemChanged('W-03', { metal: 'aluminium' });
+    const [finding] = findingsOf('water', mixed, drying(0.01));
+    expect(finding?.reason).toContain(
+      '(10.0 kg steel × 0.50 kJ/kgK + 5.0 kg aluminium × 0.897 kJ/kgK) × 112 K ÷ 2168 kJ/kg = 0.49 kg',
+    );
   });
 
   it('takes a longer drying program where one is enough', () => {
