@@ -1,5 +1,7 @@
 import type { OpenLoadRequest } from '#contract/loads';
+import { serviceStateWords } from '#domain/catalogue/service-state-words';
 import { formatLoadNumber } from '#domain/label/load-number';
+import type { Sterilizer } from '#domain/load/model';
 import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
@@ -25,6 +27,7 @@ export async function openLoad(
     await trx('sterilizers').where({ id: request.sterilizerId, facility_id: actor.facilityId }).forUpdate().first('id');
     const sterilizer = await sterilizerById(trx, actor.facilityId, request.sterilizerId);
     if (!sterilizer) throw new NotFound('sterilizer.none', 'There is no such sterilizer here.');
+    requireInService(sterilizer);
     await requireProgram(trx, actor.facilityId, sterilizer, request.programId);
     await requireCart(trx, actor.facilityId, request.cartId, sterilizer);
 
@@ -72,6 +75,12 @@ export async function openLoad(
     });
     return { loadId, number };
   });
+}
+
+function requireInService({ name, serviceState }: Sterilizer): void {
+  if (serviceState === 'in-service') return;
+  const state = serviceStateWords[serviceState].toLowerCase();
+  throw new RuleRefused('load.sterilizer-not-in-service', `${name} is ${state}. Choose another sterilizer.`);
 }
 
 async function requireProgram(

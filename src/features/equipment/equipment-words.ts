@@ -1,11 +1,5 @@
 import type { HolderCondition, SizeClass } from '#domain/catalogue/equipment-fields';
-import type { HolderKind, ServiceState, Shelf } from '#domain/load/model';
-
-export const serviceStateWords: Readonly<Record<ServiceState, string>> = {
-  'in-service': 'In service',
-  'out-of-service': 'Out of service',
-  'awaiting-requalification': 'Awaiting requalification',
-};
+import type { HolderKind, Shelf } from '#domain/load/model';
 
 export const sizeClassWords: Readonly<Record<SizeClass, string>> = { large: 'Large', small: 'Small' };
 

@@ -1,4 +1,5 @@
 import type { TodayLoad, TodaySterilizer } from '#contract/today';
+import { serviceStateWords } from '#domain/catalogue/service-state-words';
 import { formatTime } from '../../lib/format';
 
 /** What a load on a lane is doing, in a few words. */
@@ -61,12 +62,7 @@ function nowOf(sterilizer: TodaySterilizer): string {
 export function standingOf(sterilizer: TodaySterilizer, timeZone: string): Standing {
   const last = sterilizer.tests.at(-1);
   const isOut = sterilizer.serviceState !== 'in-service';
-  const now =
-    sterilizer.serviceState === 'in-service'
-      ? nowOf(sterilizer)
-      : sterilizer.serviceState === 'out-of-service'
-        ? 'Out of use'
-        : 'Waits for requalification';
+  const now = isOut ? serviceStateWords[sterilizer.serviceState] : nowOf(sterilizer);
   if (!sterilizer.needsAirRemovalTest) return { now, isOut, test: 'No air removal test asked', testState: 'not-asked' };
   if (last === undefined) return { now, isOut, test: 'Air removal not yet tested', testState: 'missing' };
   const at = formatTime(last.testedAt, timeZone);

@@ -76,9 +76,9 @@ describe('Today', () => {
     expect(rows[3]).toHaveTextContent('No air removal test asked');
   });
 
-  it('says that a sterilizer is out of use', async () => {
+  it('says that a sterilizer is out of service', async () => {
     open(aDay({ sterilizers: [aSterilizer({ serviceState: 'out-of-service' })] }));
-    expect(within(await lanes()).getAllByText('Out of use')[0]).toBeVisible();
+    expect(within(await lanes()).getAllByText('Out of service')[0]).toBeVisible();
   });
 
   const waits: readonly Wait[] = [

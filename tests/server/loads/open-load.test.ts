@@ -46,6 +46,31 @@ describe('opening a load', () => {
     expect(await loadSnapshot(app)).toBe(before);
   });
 
+  it.each([
+    ['out-of-service', 'Sterilizer 1 is out of service. Choose another sterilizer.'],
+    ['awaiting-requalification', 'Sterilizer 1 is awaiting requalification. Choose another sterilizer.'],
+  ])('is refused on a sterilizer that is %s', async (state, sentence) => {
+    const technician = await app.as('technician');
+    await app.db('sterilizers').where({ id: bay.sterilizerId }).update({ service_state: state });
+    const before = await loadSnapshot(app);
+    const ask = {
+      requestId: anId(),
+      sterilizerId: bay.sterilizerId,
+      programId: bay.programId,
+      cartId: bay.cartIds[0],
+      runId: null,
+    };
+    const refused = await technician.post('/api/loads').send(ask);
+    expect(refused.status).toBe(422);
+    expect(problemOf(refused.body)).toMatchObject({ code: 'load.sterilizer-not-in-service', detail: sentence });
+    expect(await loadSnapshot(app)).toBe(before);
+
+    // A refusal keeps nothing: once the sterilizer is in service again, the very same request is taken.
+    await app.db('sterilizers').where({ id: bay.sterilizerId }).update({ service_state: 'in-service' });
+    const taken = await technician.post('/api/loads').send(ask).expect(201);
+    await giveUp(app, (taken.body as { loadId: string }).loadId);
+  });
+
   it('is refused on a cart that carries another load, also when two ask at once', async () => {
     const technician = await app.as('technician');
     const lead = await app.as('lead');

@@ -1,3 +1,4 @@
+import { serviceStateWords } from '#domain/catalogue/service-state-words';
 import { sterilizerFieldsSchema, type SterilizerOnFile } from '#contract/equipment';
 import { checkSterilizer } from '#domain/catalogue/check-equipment';
 import { serviceStates, sizeClasses, type SterilizerFields } from '#domain/catalogue/equipment-fields';
@@ -12,7 +13,7 @@ import { CheckboxField } from '../../../components/ui/checkbox-field';
 import { FilmPanel } from '../../../components/ui/film-panel';
 import { SelectField } from '../../../components/ui/select-field';
 import { TextField } from '../../../components/ui/text-field';
-import { changesBetween, optionsOf, serviceStateWords, sizeClassWords } from '../equipment-words';
+import { changesBetween, optionsOf, sizeClassWords } from '../equipment-words';
 import { useKeepSterilizer } from '../mutations';
 import { ChamberDrawing } from './chamber-drawing';
 

@@ -1,3 +1,4 @@
+import { serviceStateWords } from '#domain/catalogue/service-state-words';
 import type { SterilizerOnFile } from '#contract/equipment';
 import type { ServiceState } from '#domain/load/model';
 import { Fact, Facts } from '../../../components/stock/facts';
@@ -7,7 +8,7 @@ import { Time } from '../../../components/ui/time';
 import { useFacility } from '../../../lib/facility';
 import { formatMass, formatSize } from '../../../lib/format';
 import { useMay } from '../../../lib/session';
-import { serviceStateWords, sizeClassWords } from '../equipment-words';
+import { sizeClassWords } from '../equipment-words';
 import { ChamberDrawing } from './chamber-drawing';
 import { ChangeButton } from './change-button';
 

@@ -1,4 +1,5 @@
 import type { LoadOpeningOptions } from '#contract/loads';
+import { serviceStateWords } from '#domain/catalogue/service-state-words';
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useQuery } from '@tanstack/react-query';
 import { useForm, useWatch } from 'react-hook-form';
@@ -48,22 +49,24 @@ function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: 
   const navigate = useNavigate();
   const { timeZone, unitSystem } = useFacility();
   const openLoad = useOpenLoad();
+  const start = options.runs.find((entry) => entry.id === runId);
   const form = useForm<Form>({
     resolver: zodResolver(formSchema),
-    defaultValues: { ...startOf(options, runId), runId },
+    defaultValues: { ...startWith(options, start?.sterilizerId ?? null, start?.programId ?? null), runId },
   });
   const { errors } = form.formState;
   // The lists of programs and carts change with the sterilizer, so their choice is told them anew each time: a list that is
   // left to itself drops a choice made before its entry was there.
   const values = useWatch({ control: form.control });
   const chosen = options.sterilizers.find((entry) => entry.sterilizer.id === values.sterilizerId);
+  const run = options.runs.find((entry) => entry.id === values.runId);
+  const wanted = options.sterilizers.find((entry) => entry.sterilizer.id === run?.sterilizerId)?.sterilizer;
 
   /** Another sterilizer has other programs and carts: what was chosen before may not be there. */
-  function chooseSterilizer(sterilizerId: string, programId = '') {
-    const entry = options.sterilizers.find((one) => one.sterilizer.id === sterilizerId);
-    form.setValue('sterilizerId', sterilizerId, { shouldValidate: true });
-    form.setValue('programId', entry?.programs.some((program) => program.id === programId) ? programId : '');
-    form.setValue('cartId', entry?.carts.find((cart) => cart.isFree)?.id ?? '');
+  function choose(start: Omit<Form, 'runId'>) {
+    form.setValue('sterilizerId', start.sterilizerId, { shouldValidate: start.sterilizerId !== '' });
+    form.setValue('programId', start.programId);
+    form.setValue('cartId', start.cartId);
   }
 
   async function send(form: Form) {
@@ -93,8 +96,8 @@ function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: 
         value={values.runId ?? ''}
         {...form.register('runId', {
           onChange: (event: { target: { value: string } }) => {
-            const run = options.runs.find((entry) => entry.id === event.target.value);
-            if (run?.sterilizerId) chooseSterilizer(run.sterilizerId, run.programId ?? '');
+            const next = options.runs.find((entry) => entry.id === event.target.value);
+            if (next?.sterilizerId) choose(startWith(options, next.sterilizerId, next.programId));
           },
         })}
       />
@@ -102,15 +105,18 @@ function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: 
         label="Sterilizer"
         placeholder="Choose a sterilizer"
         error={errors.sterilizerId?.message}
+        {...(wanted !== undefined && !isInService(wanted)
+          ? { hint: `This run is meant for ${wanted.name}, which is ${stateOf(wanted)}. Choose another sterilizer.` }
+          : {})}
         options={options.sterilizers.map(({ sterilizer }) => ({
           value: sterilizer.id,
-          label: sterilizer.serviceState === 'in-service' ? sterilizer.name : `${sterilizer.name}, out of use`,
-          isDisabled: sterilizer.serviceState !== 'in-service',
+          label: isInService(sterilizer) ? sterilizer.name : `${sterilizer.name}, ${stateOf(sterilizer)}`,
+          isDisabled: !isInService(sterilizer),
         }))}
         value={values.sterilizerId ?? ''}
         {...form.register('sterilizerId', {
           onChange: (event: { target: { value: string } }) => {
-            chooseSterilizer(event.target.value);
+            choose(startWith(options, event.target.value, run?.programId ?? null));
           },
         })}
       />
@@ -173,12 +179,26 @@ function OpenLoadForm({ options, runId }: { options: LoadOpeningOptions; runId: 
   );
 }
 
-function startOf(options: LoadOpeningOptions, runId: string): Omit<Form, 'runId'> {
-  const run = options.runs.find((entry) => entry.id === runId);
-  const entry = options.sterilizers.find((one) => one.sterilizer.id === run?.sterilizerId);
+type SterilizerOption = LoadOpeningOptions['sterilizers'][number]['sterilizer'];
+
+function isInService({ serviceState }: Pick<SterilizerOption, 'serviceState'>): boolean {
+  return serviceState === 'in-service';
+}
+
+function stateOf({ serviceState }: Pick<SterilizerOption, 'serviceState'>): string {
+  return serviceStateWords[serviceState].toLowerCase();
+}
+
+/** What follows from a sterilizer, and from the program a run names for it; nothing where it is not in service. */
+function startWith(
+  options: LoadOpeningOptions,
+  sterilizerId: string | null,
+  programId: string | null,
+): Omit<Form, 'runId'> {
+  const entry = options.sterilizers.find(({ sterilizer }) => sterilizer.id === sterilizerId && isInService(sterilizer));
   return {
     sterilizerId: entry?.sterilizer.id ?? '',
-    programId: entry?.programs.find((program) => program.id === run?.programId)?.id ?? '',
+    programId: entry?.programs.find((program) => program.id === programId)?.id ?? '',
     cartId: entry?.carts.find((cart) => cart.isFree)?.id ?? '',
   };
 }

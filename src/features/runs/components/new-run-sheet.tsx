@@ -1,3 +1,4 @@
+import { serviceStateWords } from '#domain/catalogue/service-state-words';
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
@@ -106,7 +107,10 @@ function NewRunForm({ equipment, onAdded }: { equipment: Equipment; onAdded: (ru
         placeholder="Any"
         options={equipment.sterilizers.map((one) => ({
           value: one.id,
-          label: one.serviceState === 'in-service' ? one.name : `${one.name}, out of use`,
+          label:
+            one.serviceState === 'in-service'
+              ? one.name
+              : `${one.name}, ${serviceStateWords[one.serviceState].toLowerCase()}`,
           isDisabled: one.serviceState !== 'in-service',
         }))}
         {...form.register('sterilizerId', {
