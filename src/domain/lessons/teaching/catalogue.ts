@@ -1,4 +1,13 @@
-import type { CatalogueItem, Cart, CycleNeed, HolderKind, ItemKind, Program, Shelf, Sterilizer } from '../../load/model';
+import type {
+  CatalogueItem,
+  Cart,
+  CycleNeed,
+  HolderKind,
+  ItemKind,
+  Program,
+  Shelf,
+  Sterilizer,
+} from '../../load/model';
 import { celsius, kg, mm, seconds } from '../../units/quantity';
 
 /*

@@ -25,7 +25,8 @@ export type Put = {
 type Spot = { readonly turn?: Turn; readonly pose?: Pose; readonly paper?: PaperSide };
 
 function spotOf(item: CatalogueItem, xMm: number, yMm: number, { turn = 0, pose = item.pose, paper }: Spot) {
-  return { xMm: mm(xMm), yMm: mm(yMm), turn, pose, paper: paper ?? null };
+  const isUprightPouch = item.kind === 'pouch' && pose === 'on-edge';
+  return { xMm: mm(xMm), yMm: mm(yMm), turn, pose, paper: paper ?? (isUprightPouch ? ('left' as const) : null) };
 }
 
 /** Its nearest left corner at x and y of a shelf, in mm. */
@@ -53,7 +54,13 @@ export function but(put: Put, changes: Partial<LoadPackage>): Put {
   return { ...put, changes: { ...put.changes, ...changes } };
 }
 
-export function aRack(holderId: string, shelfId: string, xMm: number, yMm: number, kind: HolderKind = rack): LoadHolder {
+export function aRack(
+  holderId: string,
+  shelfId: string,
+  xMm: number,
+  yMm: number,
+  kind: HolderKind = rack,
+): LoadHolder {
   const at = { shelfId, xMm: mm(xMm), yMm: mm(yMm), turn: 0 as const };
   return { holderId, name: holderId, placeCode: holderId, kindId: kind.id, ...at };
 }
