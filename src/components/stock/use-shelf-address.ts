@@ -1,21 +1,8 @@
-import { useSearchParams } from 'react-router-dom';
+import { useAddress } from '../../lib/use-address';
 
 /** What is searched, shown and open on a list of the stock lives in the address: it can be sent, and "back" goes back. */
 export function useShelfAddress() {
-  const [params, setParams] = useSearchParams();
-  function set(changes: Readonly<Record<string, string | null>>, isNewStep = false) {
-    setParams(
-      (before) => {
-        const next = new URLSearchParams(before);
-        for (const [name, value] of Object.entries(changes)) {
-          if (value === null || value === '') next.delete(name);
-          else next.set(name, value);
-        }
-        return next;
-      },
-      { replace: !isNewStep },
-    );
-  }
+  const { params, write: set } = useAddress();
   const form = params.get('form');
   const page = Number(params.get('page') ?? '1');
   return {
@@ -30,7 +17,6 @@ export function useShelfAddress() {
     setSearch: (text: string) => {
       set({ search: text, page: null });
     },
-    /** In one go: of two changes right after each other the router keeps the second only. */
     showAll: () => {
       set({ search: null, kind: null, page: null });
     },

@@ -121,10 +121,24 @@ describe('the list', () => {
   });
 
   it('says when nobody is meant, and shows everybody again', async () => {
-    const { user } = open('/people?search=nobody');
+    const { user, router } = open('/people?search=nobody&role=lead');
     await user.click(await screen.findByRole('button', { name: 'Show everybody' }));
     expect(within(await table()).getAllByRole('row')).toHaveLength(5);
     expect(screen.getByRole('searchbox')).toHaveValue('');
+    expect(screen.getByLabelText('Role')).toHaveValue('');
+    await waitFor(() => {
+      expect(router.state.location.search).toBe('');
+    });
+  });
+
+  it('goes by the address again when a link leads here without a search', async () => {
+    const { user } = open('/people?search=nobody');
+    expect(await screen.findByRole('searchbox')).toHaveValue('nobody');
+    await user.click(screen.getAllByRole('link', { name: 'People' })[0] ?? document.body);
+    await waitFor(() => {
+      expect(screen.getByRole('searchbox')).toHaveValue('');
+    });
+    expect(within(await table()).getAllByRole('row')).toHaveLength(5);
   });
 
   it('says what went wrong and tries again', async () => {

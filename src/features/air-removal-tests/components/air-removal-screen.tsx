@@ -1,16 +1,16 @@
 import { useQuery } from '@tanstack/react-query';
-import { useSearchParams } from 'react-router-dom';
 import { PageHead, PanelHead } from '../../../components/ui/heading';
 import { LinkButton } from '../../../components/ui/link-button';
 import { EmptyState, WaitingState, WrongState } from '../../../components/ui/states';
 import { useMay } from '../../../lib/session';
+import { useAddress } from '../../../lib/use-address';
 import { airRemovalTestQueries } from '../queries';
 import { AirRemovalForm } from './air-removal-form';
 import { TestList } from './test-list';
 
 /** The day's air-removal test of a sterilizer: written down at the left, the latest ones at the right. */
 export function AirRemovalScreen() {
-  const [params, setParams] = useSearchParams();
+  const { params, write } = useAddress();
   const sterilizerId = params.get('sterilizer');
   const mayRecord = useMay('air-removal-test.record');
   const sterilizers = useQuery(airRemovalTestQueries.sterilizers());
@@ -55,7 +55,7 @@ export function AirRemovalScreen() {
             readers={latest.data.readers}
             lastPack={latest.data.tests[0] ?? null}
             onSterilizer={(id) => {
-              setParams({ sterilizer: id }, { replace: true });
+              write({ sterilizer: id });
             }}
           />
         ) : (

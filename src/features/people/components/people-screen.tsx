@@ -2,7 +2,6 @@ import type { Person } from '#contract/people';
 import { roles, type Role } from '#domain/access/permissions';
 import { useQuery } from '@tanstack/react-query';
 import { useEffect, useRef, useState } from 'react';
-import { useSearchParams } from 'react-router-dom';
 import { Button } from '../../../components/ui/button';
 import { PageHead } from '../../../components/ui/heading';
 import { SearchField } from '../../../components/ui/search-field';
@@ -11,6 +10,7 @@ import { EmptyState, WaitingState, WrongState } from '../../../components/ui/sta
 import { countOf } from '../../../lib/format';
 import { roleWords } from '#domain/access/role-words';
 import { useMay } from '../../../lib/session';
+import { useAddress } from '../../../lib/use-address';
 import { useNow } from '../../../lib/use-now';
 import { isMeant, isOpen } from '../person-words';
 import { everyone, peopleQueries } from '../queries';
@@ -156,28 +156,12 @@ export function PeopleScreen() {
 
 /** The address keeps all three, so that a page loaded again shows the same. */
 function usePeopleAddress() {
-  const [params, setParams] = useSearchParams();
-  // The router takes its time; a field that waited for it would lose letters.
-  const [search, setSearch] = useState(params.get('search') ?? '');
-  function write(changes: Readonly<Record<string, string | null>>) {
-    setParams(
-      (before) => {
-        const next = new URLSearchParams(before);
-        for (const [name, value] of Object.entries(changes)) {
-          if (value === null || value === '') next.delete(name);
-          else next.set(name, value);
-        }
-        return next;
-      },
-      { replace: true },
-    );
-  }
+  const { params, write } = useAddress();
   return {
-    search,
+    search: params.get('search') ?? '',
     role: roleOf(params.get('role')),
     personId: params.get('person'),
     setSearch: (text: string) => {
-      setSearch(text);
       write({ search: text });
     },
     setRole: (role: Role | null) => {
@@ -187,7 +171,6 @@ function usePeopleAddress() {
       write({ person: id });
     },
     showEverybody: () => {
-      setSearch('');
       write({ search: null, role: null });
     },
   };
