@@ -13,7 +13,24 @@ import { verifiedFixOf } from './rules/verify-fix';
  * most findings are only listed.
  */
 export function evaluateLoad(view: LoadView, policy: LoadPolicy): readonly Finding[] {
-  const scene = sceneOf(view, policy);
+  return findingsOf(sceneOf(view, policy));
+}
+
+export type Evaluator = (view: LoadView, policy: LoadPolicy) => readonly Finding[];
+
+/**
+ * Judges one load again and again while it is being built, each time exactly as `evaluateLoad` does. It remembers the last
+ * time and looks only at what has changed since: packages, holders and shelves that are the same objects have not.
+ */
+export function createEvaluator(): Evaluator {
+  let last: Scene | undefined;
+  return (view, policy) => {
+    last = sceneOf(view, policy, last);
+    return findingsOf(last);
+  };
+}
+
+function findingsOf(scene: Scene): readonly Finding[] {
   const judged = judge(scene);
   return judged.map((one) => (one.draft.fixes ? withFixOnDemand(scene, judged, one) : { ...one.finding, fix: null }));
 }

@@ -70,6 +70,8 @@ export type ShelfLayout = {
 };
 
 export type Layout = {
+  /** Every package of the list once, sorted by id, placed or not. */
+  readonly packages: readonly LoadPackage[];
   /** Sorted by package id, so that nothing depends on the order of scanning. */
   readonly bodies: readonly Body[];
   readonly holders: readonly HolderBody[];
@@ -89,8 +91,11 @@ const drawnHolderHeightMm = 60;
  *
  * A pouch in a rack is centred on its slot and along the holder; a thing on another one starts at its top. What cannot be
  * placed (no such shelf, a stack that runs in a circle, a size that is no number) is listed instead of drawn.
+ *
+ * @param before where things stood a moment ago: what has not changed since is the very same object again, down to the
+ *   shelf with all that is on it, so that whoever looked at it before need not look again.
  */
-export function layOut(view: LoadView): Layout {
+export function layOut(view: LoadView, before?: Layout): Layout {
   const shelfOf = firstById(view.cart.shelves, (shelf) => shelf.id);
   const kindOf = firstById(view.holderKinds, (kind) => kind.id);
   const itemOf = firstById(view.items, (item) => item.id);
@@ -101,7 +106,9 @@ export function layOut(view: LoadView): Layout {
     const kind = kindOf.get(holder.kindId);
     const shelf = shelfOf.get(holder.shelfId);
     if (kind && shelf && !holderOf.has(holder.holderId) && isDrawable(holder, kind)) {
-      holderOf.set(holder.holderId, { holder, kind, shelf, box: holderBox(holder, kind) });
+      const old = before?.holderOf.get(holder.holderId);
+      const isSame = old?.holder === holder && old.kind === kind && old.shelf === shelf;
+      holderOf.set(holder.holderId, isSame ? old : { holder, kind, shelf, box: holderBox(holder, kind) });
     }
   }
 
@@ -118,6 +125,8 @@ export function layOut(view: LoadView): Layout {
     const item = itemOf.get(one.itemId);
     if (placement === null) return 'not-placed';
     if (!item) return 'item-not-known';
+    const old = before?.bodyOf.get(one.packageId);
+    if (old?.package === one && old.item === item && standsAsBefore(old)) return old;
     if (![item.lengthMm, item.widthMm, item.heightMm].every(isSensibleLength)) return 'size-makes-no-sense';
     if (placement.at === 'slot') {
       const holder = holderOf.get(placement.holderId);
@@ -144,9 +153,15 @@ export function layOut(view: LoadView): Layout {
     return bodyIn({ one, item, placement, shelf: below.shelf, box, quarters, below });
   };
 
+  function standsAsBefore({ placement, shelf, holder, below }: Body): boolean {
+    if (placement.at === 'shelf') return shelfOf.get(placement.shelfId) === shelf;
+    if (placement.at === 'package') return below !== null && bodyOf.get(placement.belowPackageId) === below;
+    return holder !== null && holderOf.get(placement.holderId) === holder;
+  }
+
   const isSettled = (packageId: string) => bodyOf.has(packageId) || nowhere.has(packageId);
-  const sorted = sortedById(packageOf.values(), (one) => one.packageId);
-  for (const one of sorted) {
+  const packages = inOrder(packageOf, before?.packages ?? []);
+  for (const one of packages) {
     // Down the stack and then up again, without recursion: a stack may be as high as the data say.
     const stack = new Map<string, LoadPackage>();
     let lower: LoadPackage | undefined = one;
@@ -162,16 +177,47 @@ export function layOut(view: LoadView): Layout {
     for (const member of members.reverse()) settle(member);
   }
 
-  const bodies = sorted.flatMap((one) => bodyOf.get(one.packageId) ?? []);
+  const bodies: Body[] = [];
+  const bodiesOn = new Map<Shelf, Body[]>();
+  for (const one of packages) {
+    const body = bodyOf.get(one.packageId);
+    if (!body) continue;
+    bodies.push(body);
+    const others = bodiesOn.get(body.shelf);
+    if (others) others.push(body);
+    else bodiesOn.set(body.shelf, [body]);
+  }
   const holders = [...holderOf.values()];
   const shelves = sortedById(shelfOf.values(), (shelf) => shelf.id)
     .sort((a, b) => a.level - b.level)
-    .map((shelf) => ({
-      shelf,
-      bodies: bodies.filter((body) => body.shelf === shelf),
-      holders: holders.filter((holder) => holder.shelf === shelf),
-    }));
-  return { bodies, holders, shelves, bodyOf, holderOf, nowhere };
+    .map((shelf): ShelfLayout => {
+      const now = {
+        shelf,
+        bodies: bodiesOn.get(shelf) ?? [],
+        holders: holders.filter((holder) => holder.shelf === shelf),
+      };
+      const old = before?.shelves.find((one) => one.shelf === shelf);
+      return old && isSameList(old.bodies, now.bodies) && isSameList(old.holders, now.holders) ? old : now;
+    });
+  return { packages, bodies, holders, shelves, bodyOf, holderOf, nowhere };
+}
+
+/** Sorted by id. A list that was in order a moment ago is nearly so still, and nearly sorted is quick to sort. */
+function inOrder(packageOf: ReadonlyMap<string, LoadPackage>, before: readonly LoadPackage[]): readonly LoadPackage[] {
+  const left = new Map(packageOf);
+  const packages: LoadPackage[] = [];
+  for (const { packageId } of before) {
+    const one = left.get(packageId);
+    if (!one) continue;
+    packages.push(one);
+    left.delete(packageId);
+  }
+  packages.push(...left.values());
+  return packages.sort((a, b) => (a.packageId < b.packageId ? -1 : 1));
+}
+
+function isSameList<Value>(a: readonly Value[], b: readonly Value[]): boolean {
+  return a.length === b.length && a.every((value, index) => value === b[index]);
 }
 
 /** The direction the film side of a pouch looks: away from its paper side. */

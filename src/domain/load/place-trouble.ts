@@ -3,6 +3,7 @@ import type { LoadView } from './model';
 import type { LoadPolicy } from './policy';
 import { rules } from './rules/all-rules';
 import { keyOf } from './rules/finding-key';
+import { draftsOf } from './rules/rule';
 import { sceneOf } from './rules/scene';
 
 /**
@@ -48,7 +49,7 @@ export function troubleOf(view: LoadView, policy: LoadPolicy): Trouble {
   const trouble = new Map<string, Exclude<Severity, 'advice'>>();
   for (const rule of rules) {
     if (!rulesOfPlace.has(rule.id)) continue;
-    for (const draft of rule.find(scene)) {
+    for (const draft of draftsOf(rule, scene)) {
       const severity = draft.severity ?? rule.severity;
       if (severity !== 'advice') trouble.set(keyOf(rule.id, draft.subjects, draft.figure ?? null), severity);
     }

@@ -9,6 +9,7 @@ import { njMonitoring } from './sources';
 
 export const airRemovalTest: Rule = {
   id: 'air-removal-test',
+  about: 'load',
   name: 'The air-removal test of the day has passed',
   reason: 'Air left in the chamber keeps steam from the load, and only this test shows that the sterilizer removes it.',
   source: njMonitoring,

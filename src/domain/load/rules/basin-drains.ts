@@ -5,11 +5,12 @@
  */
 import { hasToDrain, wrongPose } from './poses';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { cdcLoading } from './sources';
 
 export const basinDrains: Rule = {
   id: 'basin-drains',
+  about: 'shelf',
   name: 'Basins drain',
   reason: 'Water collects in a basin that stands level, and air below it cannot get out.',
   source: cdcLoading,
@@ -18,8 +19,8 @@ export const basinDrains: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return wrongPose(scene, (body) => hasToDrain(body) && body.placement.pose === 'flat', {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
+  return wrongPose(scene, bodies, (body) => hasToDrain(body) && body.placement.pose === 'flat', {
     says: () => 'stands level, want it tilted to drain',
     remedy: 'Tilt it on a wedge, or stand it on edge.',
     want: 'tilted',

@@ -20,6 +20,7 @@ import { countWords, figureWords, sourceOf } from './words';
 
 export const challengeDevicePlaced: Rule = {
   id: 'challenge-device-placed',
+  about: 'load',
   name: 'The challenge device is at the coldest place',
   reason: 'Only an indicator at the place that is hardest to sterilize says something about the whole load.',
   source: cdcMonitoring,
@@ -54,7 +55,7 @@ function find(scene: Scene): readonly Draft[] {
         remedy: 'Put a challenge device with a biological indicator on the lowest shelf, over the drain.',
         places: waiting ? onPackage(waiting.one) : onLoad,
         severity: challengeDeviceMissing,
-        fixes: () => (waiting ? overDrain(scene, waiting, lowest) : []),
+        fixes: (scene) => (waiting ? overDrain(scene, waiting, lowest) : []),
       },
     ];
   }
@@ -82,7 +83,7 @@ function find(scene: Scene): readonly Draft[] {
       ...(figure ? { figure } : {}),
       severity: 'accept',
       source: sourceOf(limit.limitFrom, device.item, commonPractice),
-      fixes: () => overDrain(scene, device, lowest),
+      fixes: (scene) => overDrain(scene, device, lowest),
     },
   ];
 }

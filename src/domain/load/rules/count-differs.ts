@@ -10,6 +10,7 @@ import { accountability } from './sources';
 
 export const countDiffers: Rule = {
   id: 'count-differs',
+  about: 'load',
   name: 'Counted as many as scanned',
   reason: 'Where the numbers differ, something was never scanned or is not where the map says.',
   source: accountability,

@@ -10,6 +10,7 @@ import { accountability } from './sources';
 
 export const countMissing: Rule = {
   id: 'count-missing',
+  about: 'load',
   name: 'Every shelf is counted',
   reason: 'Only a count shows that nothing lies on the cart that was never scanned.',
   source: accountability,

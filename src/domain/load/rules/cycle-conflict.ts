@@ -12,6 +12,7 @@ import { countWords, listWords } from './words';
 
 export const cycleConflict: Rule = {
   id: 'cycle-conflict',
+  about: 'load',
   name: 'One program fits every package',
   reason:
     'Each item was validated with the cycles its instructions name; in any other it may stay unsterile or wet, or be damaged.',

@@ -4,11 +4,12 @@
  */
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { Listed, Scene } from './scene';
 import { cdcMonitoring } from './sources';
 
 export const externalIndicator: Rule = {
   id: 'external-indicator',
+  about: 'package',
   name: 'External CI on each package',
   reason: 'Without it nobody can tell by sight a package that has been through the sterilizer from one that has not.',
   source: cdcMonitoring,
@@ -17,15 +18,13 @@ export const externalIndicator: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.listed.flatMap(({ one, item }) => {
-    if (one.hasExternalIndicator || item?.kind === 'challenge-device') return [];
-    if (item?.kind === 'pouch' && one.hasInternalIndicator) return [];
-    return {
-      subjects: [one.packageId],
-      title: `${scene.nameOf(one)} has no external CI`,
-      remedy: 'Put an external CI on it and say so at packing.',
-      places: onPackage(one),
-    };
-  });
+function find(scene: Scene, { one, item }: Listed): Draft | null {
+  if (one.hasExternalIndicator || item?.kind === 'challenge-device') return null;
+  if (item?.kind === 'pouch' && one.hasInternalIndicator) return null;
+  return {
+    subjects: [one.packageId],
+    title: `${scene.nameOf(one)} has no external CI`,
+    remedy: 'Put an external CI on it and say so at packing.',
+    places: onPackage(one),
+  };
 }

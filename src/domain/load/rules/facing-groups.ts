@@ -1,11 +1,10 @@
 import type { Body, Side } from '../layout';
 import type { PaperSide } from '../model';
-import type { Scene } from './scene';
 
 /** Pouches on edge whose paper sides have to agree: on one shelf, faces across the same axis. Sorted by package id. */
-export function facingGroups(scene: Scene): readonly (readonly Body[])[] {
+export function facingGroups(bodies: readonly Body[]): readonly (readonly Body[])[] {
   const groups = new Map<string, Body[]>();
-  for (const body of scene.layout.bodies) {
+  for (const body of bodies) {
     if (body.thinAxis === null || body.paperLooks === null) continue;
     const key = `${body.shelf.id} ${body.thinAxis}`;
     const group = groups.get(key);

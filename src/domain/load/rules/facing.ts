@@ -8,10 +8,11 @@ import { facingGroups, majoritySide, otherPaper } from './facing-groups';
 import { turnPaper } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 
 export const facing: Rule = {
   id: 'facing',
+  about: 'shelf',
   name: 'Paper sides face as the house rule says',
   reason:
     'Steam passes only through paper: a pouch turned the wrong way can shut its own paper or its neighbour’s off.',
@@ -24,17 +25,17 @@ export const facing: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
   switch (scene.policy.facing) {
     case 'not-set':
       return [];
     case 'one-way':
-      return facingGroups(scene).flatMap((group) => {
+      return facingGroups(bodies).flatMap((group) => {
         const side = majoritySide(group);
         return group.filter((body) => body.paperLooks !== side).map((body) => draftOf(scene, body));
       });
     case 'alternating':
-      return runsInRacks(scene).flatMap((run) => misfaced(run).map((body) => draftOf(scene, body)));
+      return runsInRacks(bodies).flatMap((run) => misfaced(run).map((body) => draftOf(scene, body)));
   }
 }
 
@@ -55,19 +56,19 @@ function draftOf(scene: Scene, body: Body): Draft {
 /**
  * Pouches in neighbouring slots. Across an empty slot nothing is asked: what is taken out never makes the others wrong.
  */
-function runsInRacks(scene: Scene): readonly (readonly Body[])[] {
+function runsInRacks(bodies: readonly Body[]): readonly (readonly Body[])[] {
   const inRack = new Map<string, Body[]>();
-  for (const body of scene.layout.bodies) {
+  for (const body of bodies) {
     if (!body.holder || body.slot === null || body.paperLooks === null) continue;
     const { holderId } = body.holder.holder;
-    const bodies = inRack.get(holderId);
-    if (bodies) bodies.push(body);
+    const others = inRack.get(holderId);
+    if (others) others.push(body);
     else inRack.set(holderId, [body]);
   }
   const runs: Body[][] = [];
-  for (const bodies of inRack.values()) {
+  for (const members of inRack.values()) {
     let run: Body[] = [];
-    for (const body of bodies.sort((a, b) => (a.slot ?? 0) - (b.slot ?? 0))) {
+    for (const body of members.sort((a, b) => (a.slot ?? 0) - (b.slot ?? 0))) {
       const last = run.at(-1);
       // Two in one slot are a finding of their own.
       if (last?.slot === body.slot) continue;

@@ -8,12 +8,13 @@ import { clearanceBetween, clearanceMmOf, reachIntoEachOther } from './near-pair
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { generalPractice } from './sources';
 import { figureWords, sourceOf } from './words';
 
 export const gap: Rule = {
   id: 'gap',
+  about: 'shelf',
   name: 'Pouches stand apart',
   reason: 'Where pouches touch, steam does not reach the paper between them and it does not dry.',
   source: generalPractice,
@@ -22,8 +23,8 @@ export const gap: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return [...inRacks(scene), ...loose(scene)].flatMap(({ a, b, measured }) => {
+function find(scene: Scene, on: OnShelf): readonly Draft[] {
+  return [...inRacks(on), ...loose(on)].flatMap(({ a, b, measured }) => {
     const wanted = Math.max(clearanceMmOf(a, scene.policy), clearanceMmOf(b, scene.policy));
     if (measured >= wanted - slackMm) return [];
     const { askedBy, ...limit } = clearanceBetween(a, b, scene.policy);
@@ -40,7 +41,7 @@ function find(scene: Scene): readonly Draft[] {
       places: onPackage(a, b),
       figure,
       source: sourceOf(limit.limitFrom, askedBy.item, generalPractice),
-      *fixes() {
+      *fixes(scene) {
         yield* moveNamed(scene, b);
         yield* moveNamed(scene, a);
       },
@@ -50,9 +51,9 @@ function find(scene: Scene): readonly Draft[] {
 
 type Pair = { readonly a: Body; readonly b: Body; readonly measured: number };
 
-function inRacks(scene: Scene): readonly Pair[] {
+function inRacks({ bodies }: OnShelf): readonly Pair[] {
   const byRack = new Map<string, Map<number, Body[]>>();
-  for (const body of scene.layout.bodies) {
+  for (const body of bodies) {
     if (!body.holder || body.slot === null || body.thinAxis === null) continue;
     const { holderId } = body.holder.holder;
     const slots = byRack.get(holderId) ?? new Map<number, Body[]>();
@@ -78,8 +79,8 @@ function inRacks(scene: Scene): readonly Pair[] {
 }
 
 /** Face to face without a slot each; a pair with a third pouch between is no pair. */
-function loose(scene: Scene): readonly Pair[] {
-  const facing = scene.nearPairs.filter(
+function loose({ nearPairs }: OnShelf): readonly Pair[] {
+  const facing = nearPairs.filter(
     (pair) =>
       pair.a.thinAxis !== null &&
       pair.a.thinAxis === pair.b.thinAxis &&

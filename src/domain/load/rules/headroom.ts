@@ -7,12 +7,13 @@ import { elsewhere } from './moves';
 import { onHolder, onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { equipment } from './sources';
 import { figureWords } from './words';
 
 export const headroom: Rule = {
   id: 'headroom',
+  about: 'shelf',
   name: 'Everything fits under the shelf above',
   reason: 'What is too high is crushed when the cart goes in, or shuts off the steam below the next shelf.',
   source: equipment,
@@ -21,11 +22,11 @@ export const headroom: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
   const limitOf = ({ shelf }: Body) => shelf.clearHeightMm - scene.policy.headroomMm;
   const isTooHigh = (body: Body) => body.box.top > limitOf(body) + slackMm;
   const highest = new Map<string, Body>();
-  for (const body of scene.layout.bodies) {
+  for (const body of bodies) {
     // In a stack the first that is too high; in a holder the highest.
     if (!isTooHigh(body) || (body.below && isTooHigh(body.below))) continue;
     const unit = body.holder?.holder.holderId ?? body.packageId;
@@ -44,7 +45,7 @@ function find(scene: Scene): readonly Draft[] {
       remedy: body.below ? 'Take it off the stack.' : 'Put it on a shelf with more height.',
       places: holder ? [onHolder(holder.holder, body.slot)] : onPackage(body),
       figure,
-      fixes: () => (holder ? [] : elsewhere(scene, { one: body.package, item: body.item, body })),
+      fixes: (scene) => (holder ? [] : elsewhere(scene, { one: body.package, item: body.item, body })),
     };
   });
 }

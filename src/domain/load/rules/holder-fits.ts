@@ -9,12 +9,13 @@ import { clearanceOf } from './near-pairs';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { equipment } from './sources';
 import { figureWords } from './words';
 
 export const holderFits: Rule = {
   id: 'holder-fits',
+  about: 'shelf',
   name: 'The holder fits the pouch',
   reason: 'In a holder that is too small a pouch is squeezed, bent or not held at all.',
   source: equipment,
@@ -23,8 +24,8 @@ export const holderFits: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.layout.bodies.flatMap((body) => {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
+  return bodies.flatMap((body) => {
     if (!body.holder) return [];
     const draft = body.slot === null ? inBasket(body, body.holder) : inSlot(scene, body, body.holder);
     return draft ? [withSubject(scene, body, draft)] : [];
@@ -40,7 +41,7 @@ function withSubject(scene: Scene, body: Body, { says, ...rest }: Case): Draft {
     title: `${scene.thing(body)} ${says}`,
     places: onPackage(body),
     ...rest,
-    fixes: () => elsewhere(scene, known),
+    fixes: (scene) => elsewhere(scene, known),
   };
 }
 

@@ -12,6 +12,7 @@ import { drawing } from './sources';
 
 export const holderUsable: Rule = {
   id: 'holder-usable',
+  about: 'load',
   name: 'Holders are known',
   reason: 'What is in a holder of unknown size cannot be judged.',
   source: drawing,

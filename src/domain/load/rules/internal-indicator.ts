@@ -5,11 +5,12 @@
 import { takeOff } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { Listed, Scene } from './scene';
 import { njMonitoring } from './sources';
 
 export const internalIndicator: Rule = {
   id: 'internal-indicator',
+  about: 'package',
   name: 'Internal CI in each package',
   reason: 'Only an indicator inside shows that steam came into the package.',
   source: njMonitoring,
@@ -18,15 +19,13 @@ export const internalIndicator: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.listed.flatMap(({ one, item }) => {
-    if (one.hasInternalIndicator || item?.kind === 'challenge-device') return [];
-    return {
-      subjects: [one.packageId],
-      title: `${scene.nameOf(one)} was packed without an internal CI`,
-      remedy: 'Take it off the load and have it packed again.',
-      places: onPackage(one),
-      fixes: () => [takeOff(one)],
-    };
-  });
+function find(scene: Scene, { one, item }: Listed): Draft | null {
+  if (one.hasInternalIndicator || item?.kind === 'challenge-device') return null;
+  return {
+    subjects: [one.packageId],
+    title: `${scene.nameOf(one)} was packed without an internal CI`,
+    remedy: 'Take it off the load and have it packed again.',
+    places: onPackage(one),
+    fixes: () => [takeOff(one)],
+  };
 }

@@ -10,7 +10,7 @@ import { elsewhere } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { commonPractice } from './sources';
 import { figureWords } from './words';
 
@@ -19,6 +19,7 @@ const hiddenShare = 0.5;
 
 export const labelHidden: Rule = {
   id: 'label-hidden',
+  about: 'shelf',
   name: 'Labels can be read',
   reason: 'A pouch whose label cannot be seen cannot be proved to be in the load.',
   source: commonPractice,
@@ -27,11 +28,11 @@ export const labelHidden: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
   const limit = limitOf(null, scene.policy, 'labelReadingGapMm');
-  return scene.layout.bodies.flatMap((body) => {
+  return bodies.flatMap((body) => {
     if (body.thinAxis === null || body.holder) return [];
-    const nearest = nearestInFront(scene, body);
+    const nearest = nearestInFront(bodies, body);
     if (!nearest || nearest.gapMm >= limit.limit - slackMm) return [];
     const figure = { measured: nearest.gapMm, unit: 'mm', want: 'at-least', ...limit } as const;
     return {
@@ -40,15 +41,15 @@ function find(scene: Scene): readonly Draft[] {
       remedy: 'Put it into a holder, or leave room in front of its film side.',
       places: onPackage(body, nearest.other),
       figure,
-      fixes: () => elsewhere(scene, { one: body.package, item: body.item, body }),
+      fixes: (scene) => elsewhere(scene, { one: body.package, item: body.item, body }),
     };
   });
 }
 
-function nearestInFront(scene: Scene, body: Body): { readonly other: Body; readonly gapMm: number } | null {
+function nearestInFront(bodies: readonly Body[], body: Body): { readonly other: Body; readonly gapMm: number } | null {
   let nearest: { other: Body; gapMm: number } | null = null;
-  for (const other of scene.layout.bodies) {
-    if (other === body || other.shelf !== body.shelf) continue;
+  for (const other of bodies) {
+    if (other === body) continue;
     const gapMm = gapInFront(body, other.box);
     if (gapMm === null || shareHidden(body, other.box) < hiddenShare) continue;
     if (!nearest || gapMm < nearest.gapMm) nearest = { other, gapMm };

@@ -5,11 +5,12 @@
 import { takeOff } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { Listed, Scene } from './scene';
 import { accountability } from './sources';
 
 export const labelKnown: Rule = {
   id: 'label-known',
+  about: 'package',
   name: 'Labels are known',
   reason: 'A package that nobody can name cannot be checked against its instructions, nor be found again.',
   source: accountability,
@@ -18,17 +19,15 @@ export const labelKnown: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.listed.flatMap(({ one, item }) => {
-    if (item && one.code.trim() !== '') return [];
-    return {
-      subjects: [one.packageId],
-      title: item
-        ? `${scene.nameOf(one)} has no label code`
-        : `${one.code || 'A package'} is of an item that is not in the catalogue`,
-      remedy: item ? 'Take it off the load and print it a label.' : 'Take it off the load and have its item entered.',
-      places: onPackage(one),
-      fixes: () => [takeOff(one)],
-    };
-  });
+function find(scene: Scene, { one, item }: Listed): Draft | null {
+  if (item && one.code.trim() !== '') return null;
+  return {
+    subjects: [one.packageId],
+    title: item
+      ? `${scene.nameOf(one)} has no label code`
+      : `${one.code || 'A package'} is of an item that is not in the catalogue`,
+    remedy: item ? 'Take it off the load and print it a label.' : 'Take it off the load and have its item entered.',
+    places: onPackage(one),
+    fixes: () => [takeOff(one)],
+  };
 }

@@ -12,6 +12,7 @@ import { countWords } from './words';
 
 export const labelOnce: Rule = {
   id: 'label-once',
+  about: 'load',
   name: 'Each label once',
   reason: 'A label that stands for two packages proves neither of them.',
   source: accountability,
@@ -21,8 +22,12 @@ export const labelOnce: Rule = {
 };
 
 function find(scene: Scene): readonly Draft[] {
+  const { packages } = scene.view;
+  const isEachOnce =
+    scene.listed.length === packages.length && new Set(packages.map((one) => one.code.trim())).size === packages.length;
+  if (isEachOnce) return [];
   const byCode = new Map<string, LoadPackage[]>();
-  for (const one of scene.view.packages) {
+  for (const one of packages) {
     const code = one.code.trim();
     if (code === '') continue;
     const same = byCode.get(code);
@@ -30,7 +35,7 @@ function find(scene: Scene): readonly Draft[] {
     else byCode.set(code, [one]);
   }
   const ofCodes = [...byCode].filter(([, same]) => same.length > 1);
-  const ids = countOf(scene.view.packages.map((one) => one.packageId));
+  const ids = countOf(packages.map((one) => one.packageId));
   const codesTold = new Set(ofCodes.map(([code]) => code));
   // One package twice under different codes: the list itself is broken.
   const ofIds = scene.listed.filter(({ one }) => (ids.get(one.packageId) ?? 0) > 1 && !codesTold.has(one.code.trim()));

@@ -8,12 +8,13 @@ import { moveAll } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { commonPractice } from './sources';
 import { figureWords, listWords, sourceOf } from './words';
 
 export const lidFilterCovered: Rule = {
   id: 'lid-filter-covered',
+  about: 'shelf',
   name: 'Lid filters stay open',
   reason:
     'Steam enters and air and water leave a rigid container through its filters; covered, it is not sterile or stays wet.',
@@ -23,19 +24,18 @@ export const lidFilterCovered: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.layout.shelves.flatMap(({ bodies }) =>
-    bodies.flatMap((container) => {
-      const filters = filterRects(container, 'lid');
-      const whole = coveredArea(filters);
-      if (whole <= 0) return [];
-      const above = bodies.filter((body) => body !== container && body.box.bottom >= container.box.top - slackMm);
-      const covering = above.filter((body) => sharedWith(body, filters).some((rect) => areaOf(rect) > 1));
-      if (covering.length === 0) return [];
-      const share = coveredArea(covering.flatMap((body) => sharedWith(body, filters))) / whole;
-      return [draftOf(scene, container, covering, share)];
-    }),
-  );
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
+  return bodies.flatMap((container) => {
+    if (container.item.filterZones.length === 0) return [];
+    const filters = filterRects(container, 'lid');
+    const whole = coveredArea(filters);
+    if (whole <= 0) return [];
+    const above = bodies.filter((body) => body !== container && body.box.bottom >= container.box.top - slackMm);
+    const covering = above.filter((body) => sharedWith(body, filters).some((rect) => areaOf(rect) > 1));
+    if (covering.length === 0) return [];
+    const share = coveredArea(covering.flatMap((body) => sharedWith(body, filters))) / whole;
+    return [draftOf(scene, container, covering, share)];
+  });
 }
 
 function sharedWith(body: Body, filters: ReturnType<typeof filterRects>) {
@@ -59,6 +59,6 @@ function draftOf(scene: Scene, container: Body, covering: readonly Body[], share
     places: onPackage(container, ...covering),
     figure,
     ...(container.item.ifuReference === null ? {} : { source: sourceOf('ifu', container.item, commonPractice) }),
-    fixes: () => moveAll(scene, covering),
+    fixes: (scene) => moveAll(scene, covering),
   };
 }

@@ -11,6 +11,7 @@ import { racgpLoading } from './sources';
 
 export const loadMass: Rule = {
   id: 'load-mass',
+  about: 'load',
   name: 'The load is not too heavy',
   reason: 'A load heavier than the one that was validated heats and dries in a way nobody has shown.',
   source: racgpLoading,

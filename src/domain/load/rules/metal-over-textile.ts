@@ -13,6 +13,7 @@ import { listWords } from './words';
 
 export const metalOverTextile: Rule = {
   id: 'metal-over-textile',
+  about: 'load',
   name: 'Metal stays below textiles',
   reason: 'Water that condenses on metal drips down, and a wet textile pack is not sterile.',
   source: generalPractice,
@@ -37,7 +38,7 @@ function find(scene: Scene): readonly Draft[] {
       remedy: 'Put the textile pack above the metal, or the metal where nothing textile is under it.',
       reason: `Water that condenses on metal drips down, about ${kgOn(items).toFixed(2)} kg here (${working(items)}), and a wet textile pack is not sterile.`,
       places: onPackage(textile, ...metal),
-      *fixes() {
+      *fixes(scene) {
         yield* moveNamed(scene, textile);
         yield* moveAll(scene, metal);
       },

@@ -1,5 +1,5 @@
 import { gapAcross, gapAlong, gapUpward } from '../../geometry/box';
-import type { Body, Layout } from '../layout';
+import type { Body } from '../layout';
 import { limitOf, type Limit, type LoadPolicy } from '../policy';
 import { slackMm } from './slack';
 
@@ -33,23 +33,21 @@ export function clearanceBetween(a: Body, b: Body, policy: LoadPolicy): Limit & 
   return ofA.limit >= ofB.limit ? { ...ofA, askedBy: a } : { ...ofB, askedBy: b };
 }
 
-/** Pairs within the greatest clearance anything asks for. Pouches in one rack are not here: their slots part them. */
-export function findNearPairs(layout: Layout, policy: LoadPolicy): readonly NearPair[] {
+/** Pairs on one shelf within the greatest clearance anything asks for. Pouches in one rack are not here: their slots part them. */
+export function findNearPairs(bodies: readonly Body[], policy: LoadPolicy): readonly NearPair[] {
   const pairs: NearPair[] = [];
-  for (const { bodies } of layout.shelves) {
-    const reach = bodies.reduce((greatest, body) => Math.max(greatest, clearanceMmOf(body, policy)), 0);
-    const sorted = [...bodies].sort((a, b) => a.box.left - b.box.left);
-    for (let first = 0; first < sorted.length; first += 1) {
-      const one = sorted[first];
-      for (let second = first + 1; one && second < sorted.length; second += 1) {
-        const other = sorted[second];
-        if (!other || other.box.left > one.box.right + reach) break;
-        const alongMm = gapAlong(one.box, other.box);
-        if (alongMm > reach || gapUpward(one.box, other.box) > -slackMm || areInOneRack(one, other)) continue;
-        const [a, b] = one.packageId < other.packageId ? [one, other] : [other, one];
-        pairs.push({ a, b, acrossMm: gapAcross(one.box, other.box), alongMm });
-        if (pairs.length === greatestPairs) return pairs;
-      }
+  const reach = bodies.reduce((greatest, body) => Math.max(greatest, clearanceMmOf(body, policy)), 0);
+  const sorted = [...bodies].sort((a, b) => a.box.left - b.box.left);
+  for (let first = 0; first < sorted.length; first += 1) {
+    const one = sorted[first];
+    for (let second = first + 1; one && second < sorted.length; second += 1) {
+      const other = sorted[second];
+      if (!other || other.box.left > one.box.right + reach) break;
+      const alongMm = gapAlong(one.box, other.box);
+      if (alongMm > reach || gapUpward(one.box, other.box) > -slackMm || areInOneRack(one, other)) continue;
+      const [a, b] = one.packageId < other.packageId ? [one, other] : [other, one];
+      pairs.push({ a, b, acrossMm: gapAcross(one.box, other.box), alongMm });
+      if (pairs.length === greatestPairs) return pairs;
     }
   }
   return pairs;

@@ -9,12 +9,13 @@ import { reachIntoEachOther } from './near-pairs';
 import { onHolder, onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { drawing } from './sources';
 import { figureWords } from './words';
 
 export const overlap: Rule = {
   id: 'overlap',
+  about: 'shelf',
   name: 'One thing in one place',
   reason: 'What is drawn into the same place is squeezed together on the cart, or is not where the map says.',
   source: drawing,
@@ -23,62 +24,56 @@ export const overlap: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return [...ofPackages(scene), ...withHolders(scene), ...ofHolders(scene)];
+function find(scene: Scene, on: OnShelf): readonly Draft[] {
+  return [...ofPackages(scene, on), ...withHolders(scene, on), ...ofHolders(scene, on)];
 }
 
-function ofPackages(scene: Scene): readonly Draft[] {
-  return scene.nearPairs.filter(reachIntoEachOther).map(({ a, b }) => ({
+function ofPackages(scene: Scene, { nearPairs }: OnShelf): readonly Draft[] {
+  return nearPairs.filter(reachIntoEachOther).map(({ a, b }) => ({
     subjects: [a.packageId, b.packageId],
     ...told(`${scene.thing(b)} reaches ${depthWords(a.box, b.box)} into ${scene.thing(a)}`, a.box, b.box),
     places: onPackage(b, a),
-    *fixes() {
+    *fixes(scene) {
       yield* moveNamed(scene, b);
       yield* moveNamed(scene, a);
     },
   }));
 }
 
-function withHolders(scene: Scene): readonly Draft[] {
-  const outside = scene.layout.bodies.filter(
-    (body) => body.placement.at === 'shelf' || body.placement.at === 'package',
-  );
-  return scene.layout.shelves.flatMap(({ shelf, holders }) =>
-    holders.filter(hasFrame).flatMap(({ holder, box }) =>
-      outside
-        .filter((body) => body.shelf === shelf && depthOf(body.box, box) > slackMm)
-        .map((body) => ({
-          subjects: [body.packageId, holder.holderId],
-          ...told(
-            `${scene.thing(body)} reaches ${depthWords(body.box, box)} into ${scene.holderName(holder)}`,
-            body.box,
-            box,
-          ),
-          places: [...onPackage(body), onHolder(holder)],
-          fixes: () => moveNamed(scene, body),
-        })),
-    ),
+function withHolders(scene: Scene, { bodies, holders }: OnShelf): readonly Draft[] {
+  const outside = bodies.filter((body) => body.holder === null);
+  return holders.filter(hasFrame).flatMap(({ holder, box }) =>
+    outside
+      .filter((body) => depthOf(body.box, box) > slackMm)
+      .map((body) => ({
+        subjects: [body.packageId, holder.holderId],
+        ...told(
+          `${scene.thing(body)} reaches ${depthWords(body.box, box)} into ${scene.holderName(holder)}`,
+          body.box,
+          box,
+        ),
+        places: [...onPackage(body), onHolder(holder)],
+        fixes: (now: Scene) => moveNamed(now, body),
+      })),
   );
 }
 
-function ofHolders(scene: Scene): readonly Draft[] {
-  return scene.layout.shelves.flatMap(({ holders }) => {
-    const framed = holders.filter(hasFrame);
-    return framed.flatMap((a, index) =>
-      framed
-        .slice(index + 1)
-        .filter((b) => depthOf(a.box, b.box) > slackMm)
-        .map((b) => ({
-          subjects: [a.holder.holderId, b.holder.holderId],
-          ...told(
-            `${scene.holderName(b.holder)} reaches ${depthWords(a.box, b.box)} into ${scene.holderName(a.holder)}`,
-            a.box,
-            b.box,
-          ),
-          places: [onHolder(b.holder), onHolder(a.holder)],
-        })),
-    );
-  });
+function ofHolders(scene: Scene, { holders }: OnShelf): readonly Draft[] {
+  const framed = holders.filter(hasFrame);
+  return framed.flatMap((a, index) =>
+    framed
+      .slice(index + 1)
+      .filter((b) => depthOf(a.box, b.box) > slackMm)
+      .map((b) => ({
+        subjects: [a.holder.holderId, b.holder.holderId],
+        ...told(
+          `${scene.holderName(b.holder)} reaches ${depthWords(a.box, b.box)} into ${scene.holderName(a.holder)}`,
+          a.box,
+          b.box,
+        ),
+        places: [onHolder(b.holder), onHolder(a.holder)],
+      })),
+  );
 }
 
 /** A wedge or a spacer is meant to be under something. */

@@ -5,11 +5,12 @@
 import { takeOff } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { Listed, Scene } from './scene';
 import { njMonitoring } from './sources';
 
 export const packageCalledBack: Rule = {
   id: 'package-called-back',
+  about: 'package',
   name: 'Nothing called back',
   reason: 'A package that was called back is accounted for first; in another load it would be lost from the recall.',
   source: njMonitoring,
@@ -18,16 +19,13 @@ export const packageCalledBack: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.listed.flatMap(({ one }) =>
-    one.state === 'recalled'
-      ? {
-          subjects: [one.packageId],
-          title: `${scene.nameOf(one)} has been called back`,
-          remedy: 'Take it off the load and bring it to the lead.',
-          places: onPackage(one),
-          fixes: () => [takeOff(one)],
-        }
-      : [],
-  );
+function find(scene: Scene, { one }: Listed): Draft | null {
+  if (one.state !== 'recalled') return null;
+  return {
+    subjects: [one.packageId],
+    title: `${scene.nameOf(one)} has been called back`,
+    remedy: 'Take it off the load and bring it to the lead.',
+    places: onPackage(one),
+    fixes: () => [takeOff(one)],
+  };
 }

@@ -10,12 +10,13 @@ import { clearanceBetween, clearanceMmOf, reachIntoEachOther } from './near-pair
 import { onHolder } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { generalPractice } from './sources';
 import { figureWords, sourceOf } from './words';
 
 export const packageClearance: Rule = {
   id: 'package-clearance',
+  about: 'shelf',
   name: 'Packages stand clear of each other',
   reason: 'Steam comes and water leaves between packages; where they stand close, both stop.',
   source: generalPractice,
@@ -31,10 +32,10 @@ type Close = {
   readonly limit: ReturnType<typeof clearanceBetween>;
 };
 
-function find(scene: Scene): readonly Draft[] {
+function find(scene: Scene, { nearPairs }: OnShelf): readonly Draft[] {
   // A rack too near is one finding and not one for each of its pouches.
   const worst = new Map<string, Close>();
-  for (const pair of scene.nearPairs) {
+  for (const pair of nearPairs) {
     const { a, b } = pair;
     if (a.item.kind === 'pouch' && b.item.kind === 'pouch') continue;
     if (reachIntoEachOther(pair)) continue;
@@ -73,7 +74,7 @@ function draftOf(scene: Scene, { a, b, measured, limit: { askedBy, ...limit } }:
     places: [placeOf(a), placeOf(b)],
     figure,
     source: sourceOf(limit.limitFrom, askedBy.item, generalPractice),
-    *fixes() {
+    *fixes(scene) {
       for (const body of [b, a]) {
         if (!body.holder) yield* moveNamed(scene, body);
       }

@@ -6,11 +6,12 @@ import type { PackageState } from '../model';
 import { takeOff } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { Listed, Scene } from './scene';
 import { drawing } from './sources';
 
 export const packageState: Rule = {
   id: 'package-state',
+  about: 'package',
   name: 'Packages are ready for the sterilizer',
   reason: 'A package that was processed, used or set aside has to be cleaned and packed again first.',
   source: drawing,
@@ -36,18 +37,16 @@ const stateWords: Readonly<Record<PackageState, string>> = {
   discarded: 'was thrown away',
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.listed.flatMap(({ one }) => {
-    const { heldReason } = one;
-    // Called back is told by its own rule.
-    if (one.state === 'recalled' || (isReady.has(one.state) && heldReason === null)) return [];
-    const name = scene.nameOf(one);
-    return {
-      subjects: [one.packageId],
-      title: heldReason === null ? `${name} ${stateWords[one.state]}` : `${name} is held: ${heldReason}`,
-      remedy: 'Take it off the load.',
-      places: onPackage(one),
-      fixes: () => [takeOff(one)],
-    };
-  });
+function find(scene: Scene, { one }: Listed): Draft | null {
+  const { heldReason } = one;
+  // Called back is told by its own rule.
+  if (one.state === 'recalled' || (isReady.has(one.state) && heldReason === null)) return null;
+  const name = scene.nameOf(one);
+  return {
+    subjects: [one.packageId],
+    title: heldReason === null ? `${name} ${stateWords[one.state]}` : `${name} is held: ${heldReason}`,
+    remedy: 'Take it off the load.',
+    places: onPackage(one),
+    fixes: () => [takeOff(one)],
+  };
 }

@@ -7,11 +7,12 @@ import type { CatalogueItem, Program } from '../model';
 import { takeOff } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { Listed, Scene } from './scene';
 import { racgpLoading } from './sources';
 
 export const packagingSuitsSteam: Rule = {
   id: 'packaging-suits-steam',
+  about: 'package',
   name: 'Packaging suits the cycle',
   reason: 'Unwrapped things lose their sterility as soon as the door opens, and drip on wrapped ones.',
   source: racgpLoading,
@@ -20,18 +21,16 @@ export const packagingSuitsSteam: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.listed.flatMap(({ one, item }) => {
-    const says = item && unsuited(item, scene.view.program);
-    if (!says) return [];
-    return {
-      subjects: [one.packageId],
-      title: `${scene.nameOf(one)} ${says}`,
-      remedy: 'Take it off the load and have it packed again.',
-      places: onPackage(one),
-      fixes: () => [takeOff(one)],
-    };
-  });
+function find(scene: Scene, { one, item }: Listed): Draft | null {
+  const says = item && unsuited(item, scene.view.program);
+  if (!says) return null;
+  return {
+    subjects: [one.packageId],
+    title: `${scene.nameOf(one)} ${says}`,
+    remedy: 'Take it off the load and have it packed again.',
+    places: onPackage(one),
+    fixes: () => [takeOff(one)],
+  };
 }
 
 function unsuited({ kind, packaging }: CatalogueItem, program: Program): string | null {

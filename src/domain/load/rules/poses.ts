@@ -14,15 +14,16 @@ type WrongPose = {
 
 export function wrongPose(
   scene: Scene,
+  bodies: readonly Body[],
   isWrong: (body: Body) => boolean,
   { says, remedy, want }: WrongPose,
 ): readonly Draft[] {
-  return scene.layout.bodies.filter(isWrong).map((body) => ({
+  return bodies.filter(isWrong).map((body) => ({
     subjects: [body.packageId],
     title: `${scene.thing(body)} ${says(body)}`,
     remedy,
     places: onPackage(body),
-    fixes: () => setPose(scene, { one: body.package, item: body.item, body }, want),
+    fixes: (scene) => setPose(scene, { one: body.package, item: body.item, body }, want),
   }));
 }
 

@@ -11,12 +11,13 @@ import { elsewhere } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { cdcLoading } from './sources';
 import { figureWords } from './words';
 
 export const pouchInHolder: Rule = {
   id: 'pouch-in-holder',
+  about: 'shelf',
   name: 'Pouches on edge are held',
   reason: 'A pouch that nothing holds falls over during the cycle and lies flat or against its neighbour.',
   source: cdcLoading,
@@ -25,11 +26,11 @@ export const pouchInHolder: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
+function find(scene: Scene, on: OnShelf): readonly Draft[] {
   const limit = limitOf(null, scene.policy, 'greatestLeanDeg');
-  return scene.layout.bodies.flatMap((body) => {
+  return on.bodies.flatMap((body) => {
     if (body.thinAxis === null) return [];
-    const measured = leanAngle(scene, body);
+    const measured = leanAngle(on, body);
     const leansTooFar = measured > limit.limit;
     if (body.holder && !leansTooFar) return [];
     const figure = { measured, unit: 'deg', want: 'at-most', ...limit } as const;
@@ -46,26 +47,26 @@ function find(scene: Scene): readonly Draft[] {
       ...(leansTooFar ? { figure } : {}),
       // In a slot wider than it needs a pouch leans but stays: worth a note, no more.
       ...(body.slot !== null ? { severity: 'advice' as const } : {}),
-      fixes: () => elsewhere(scene, { one: body.package, item: body.item, body }),
+      fixes: (scene) => elsewhere(scene, { one: body.package, item: body.item, body }),
     };
   });
 }
 
-function leanAngle(scene: Scene, body: Body): number {
+function leanAngle(on: OnShelf, body: Body): number {
   const { widthMm: heightMm, heightMm: thicknessMm } = body.item;
   if (body.slot !== null) {
     const gapMm = (body.holder?.kind.pitchMm ?? 0) - thicknessMm;
     return leanOf({ heightMm, thicknessMm, gapMm, supportHeightMm: Infinity });
   }
-  const supports = body.holder ? supportsInBasket(scene, body, body.holder) : supportsOnShelf(scene, body);
+  const supports = body.holder ? supportsInBasket(on, body, body.holder) : supportsOnShelf(on, body);
   return Math.max(...supports.map((support) => leanOf({ heightMm, thicknessMm, ...support })));
 }
 
 type Support = { readonly gapMm: number; readonly supportHeightMm: number };
 
 /** In a basket the neighbour or the basket's side catches it, whichever comes first. */
-function supportsInBasket(scene: Scene, body: Body, basket: HolderBody): readonly Support[] {
-  const others = scene.layout.bodies.filter((other) => other.holder === basket && other !== body);
+function supportsInBasket(on: OnShelf, body: Body, basket: HolderBody): readonly Support[] {
+  const others = on.bodies.filter((other) => other.holder === basket && other !== body);
   const sideHeightMm = basket.kind.greatestHeightMm ?? Infinity;
   return ends.map((end) => {
     let nearest: Support = { gapMm: Math.max(roomTo(basket.box, body, end), 0), supportHeightMm: sideHeightMm };
@@ -79,16 +80,12 @@ function supportsInBasket(scene: Scene, body: Body, basket: HolderBody): readonl
 }
 
 /** On a shelf other loose pouches are no support, they fall with it: only what is between them and something firm counts. */
-function supportsOnShelf(scene: Scene, body: Body): readonly Support[] {
-  const { layout } = scene;
+function supportsOnShelf({ bodies, holders }: OnShelf, body: Body): readonly Support[] {
   const isLoosePouch = (other: Body) => other.item.kind === 'pouch' && other.holder === null;
-  const level = layout.bodies.filter(
-    (other) => other.shelf === body.shelf && other !== body && gapUpward(other.box, body.box) < -slackMm,
-  );
-  const frames = layout.holders.filter((holder) => holder.shelf === body.shelf);
+  const level = bodies.filter((other) => other !== body && gapUpward(other.box, body.box) < -slackMm);
   return ends.map((end) => {
     let firm: Support = { gapMm: Infinity, supportHeightMm: 0 };
-    for (const box of [...level.filter((other) => !isLoosePouch(other)), ...frames].map((other) => other.box)) {
+    for (const box of [...level.filter((other) => !isLoosePouch(other)), ...holders].map((other) => other.box)) {
       const gapMm = gapTowards(box, body, end);
       if (gapMm !== null && gapMm < firm.gapMm) firm = { gapMm, supportHeightMm: box.top - body.box.bottom };
     }

@@ -7,11 +7,12 @@ import { takeOff } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackKg } from './slack';
-import type { Scene } from './scene';
+import type { Listed, Scene } from './scene';
 import { figureWords, sourceOf } from './words';
 
 export const pouchMass: Rule = {
   id: 'pouch-mass',
+  about: 'package',
   name: 'Pouches are not too heavy',
   reason: 'What is heavy works through the paper or the seal, and makes more water than a pouch lets go.',
   source: {
@@ -23,21 +24,19 @@ export const pouchMass: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.listed.flatMap(({ one, item }) => {
-    if (item?.kind !== 'pouch') return [];
-    const limit = limitOf(item.massLimitKg, scene.policy, 'greatestPouchMassKg');
-    if (!(item.massKg > limit.limit + slackKg)) return [];
-    const figure = { measured: item.massKg, unit: 'kg', want: 'at-most', ...limit } as const;
-    const words = figureWords(figure);
-    return {
-      subjects: [one.packageId],
-      title: `${scene.nameOf(one)} weighs ${words.measured}, a pouch takes ${words.limit}`,
-      remedy: 'Take it off the load and have it packed another way.',
-      places: onPackage(one),
-      figure,
-      source: sourceOf(limit.limitFrom, item, pouchMass.source),
-      fixes: () => [takeOff(one)],
-    };
-  });
+function find(scene: Scene, { one, item }: Listed): Draft | null {
+  if (item?.kind !== 'pouch') return null;
+  const limit = limitOf(item.massLimitKg, scene.policy, 'greatestPouchMassKg');
+  if (!(item.massKg > limit.limit + slackKg)) return null;
+  const figure = { measured: item.massKg, unit: 'kg', want: 'at-most', ...limit } as const;
+  const words = figureWords(figure);
+  return {
+    subjects: [one.packageId],
+    title: `${scene.nameOf(one)} weighs ${words.measured}, a pouch takes ${words.limit}`,
+    remedy: 'Take it off the load and have it packed another way.',
+    places: onPackage(one),
+    figure,
+    source: sourceOf(limit.limitFrom, item, pouchMass.source),
+    fixes: () => [takeOff(one)],
+  };
 }

@@ -6,11 +6,12 @@
 import { elsewhere, setPose } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { cdcLoading } from './sources';
 
 export const pouchOnEdge: Rule = {
   id: 'pouch-on-edge',
+  about: 'shelf',
   name: 'Pouches stand on edge',
   reason: 'Steam passes only through the paper side, and lying flat water stays in the pouch.',
   source: cdcLoading,
@@ -19,8 +20,8 @@ export const pouchOnEdge: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.layout.bodies.flatMap((body) => {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
+  return bodies.flatMap((body) => {
     const { item, placement, package: one } = body;
     if (item.kind !== 'pouch' || placement.pose === 'on-edge') return [];
     const how = placement.pose === 'flat' ? 'lies flat' : 'is tilted';
@@ -29,7 +30,7 @@ function find(scene: Scene): readonly Draft[] {
       title: `${scene.thing(body)} ${how}, want it on edge`,
       remedy: 'Stand it on its long edge in a holder that takes it.',
       places: onPackage(body),
-      *fixes() {
+      *fixes(scene) {
         const known = { one, item, body };
         if (body.holder) yield* setPose(scene, known, 'on-edge');
         yield* elsewhere(scene, known);

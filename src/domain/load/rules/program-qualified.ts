@@ -9,6 +9,7 @@ import type { Scene } from './scene';
 
 export const programQualified: Rule = {
   id: 'program-qualified',
+  about: 'load',
   name: 'The sterilizer is qualified for the program',
   reason: 'A program that was never shown to work in this sterilizer proves nothing, whatever its panel offers.',
   source: {

@@ -1,6 +1,6 @@
 import type { Figure, FindingPlace, Fix, RuleId, Severity, Source } from '../finding';
 import type { LoadPolicy } from '../policy';
-import type { Scene } from './scene';
+import type { Listed, OnShelf, Scene } from './scene';
 
 /** What a rule says about one place of a load, before it is given its key, its letter and a verified fix. */
 export type Draft = {
@@ -15,11 +15,14 @@ export type Draft = {
   readonly severity?: Severity;
   readonly reason?: string;
   readonly source?: Source;
-  /** Fixes worth trying, the best first. Each is verified before anyone sees it. */
-  readonly fixes?: () => Iterable<Fix>;
+  /**
+   * Fixes worth trying, the best first. Each is verified before anyone sees it. They are told the load as it is then: a
+   * draft outlives changes elsewhere on the cart.
+   */
+  readonly fixes?: (scene: Scene) => Iterable<Fix>;
 };
 
-export type Rule = {
+type Head = {
   readonly id: RuleId;
   /** What has to hold, in a few words. */
   readonly name: string;
@@ -29,5 +32,36 @@ export type Rule = {
   readonly severity: Severity;
   /** What a facility can set about it. */
   readonly parameters: readonly (keyof LoadPolicy)[];
+};
+
+/** Looks at one package on the list and at nothing else of the load but what all of it has in common. */
+type PackageRule = Head & {
+  readonly about: 'package';
+  readonly find: (scene: Scene, listed: Listed) => Draft | null;
+};
+
+/** Looks at what stands on one shelf. */
+type ShelfRule = Head & {
+  readonly about: 'shelf';
+  readonly find: (scene: Scene, on: OnShelf) => readonly Draft[];
+};
+
+type LoadRule = Head & {
+  readonly about: 'load';
   readonly find: (scene: Scene) => readonly Draft[];
 };
+
+/** What a rule is about says what it may look at: as long as that stays the same, so do its findings. */
+export type Rule = PackageRule | ShelfRule | LoadRule;
+
+/** All that one rule has to say of a load. */
+export function draftsOf(rule: Rule, scene: Scene): readonly Draft[] {
+  switch (rule.about) {
+    case 'package':
+      return scene.listed.flatMap((listed) => rule.find(scene, listed) ?? []);
+    case 'shelf':
+      return scene.shelves.flatMap((on) => rule.find(scene, on));
+    case 'load':
+      return rule.find(scene);
+  }
+}

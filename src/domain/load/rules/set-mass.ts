@@ -8,11 +8,12 @@ import { takeOff } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackKg } from './slack';
-import type { Scene } from './scene';
+import type { Listed, Scene } from './scene';
 import { figureWords, sourceOf } from './words';
 
 export const setMass: Rule = {
   id: 'set-mass',
+  about: 'package',
   name: 'Sets are not too heavy',
   reason: 'Much metal makes much water, which stays in the set, and a heavy set hurts the people who lift it.',
   source: {
@@ -24,22 +25,20 @@ export const setMass: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.listed.flatMap(({ one, item }) => {
-    if (!item || item.kind === 'pouch' || item.kind === 'challenge-device') return [];
-    const id = item.kind === 'textile-pack' ? 'greatestTextilePackMassKg' : 'greatestSetMassKg';
-    const limit = limitOf(item.massLimitKg, scene.policy, id);
-    if (!(item.massKg > limit.limit + slackKg)) return [];
-    const figure = { measured: item.massKg, unit: 'kg', want: 'at-most', ...limit } as const;
-    const words = figureWords(figure);
-    return {
-      subjects: [one.packageId],
-      title: `${scene.nameOf(one)} weighs ${words.measured}, want at most ${words.limit}`,
-      remedy: 'Take it off the load and have it split into two.',
-      places: onPackage(one),
-      figure,
-      source: sourceOf(limit.limitFrom, item, setMass.source),
-      fixes: () => [takeOff(one)],
-    };
-  });
+function find(scene: Scene, { one, item }: Listed): Draft | null {
+  if (!item || item.kind === 'pouch' || item.kind === 'challenge-device') return null;
+  const id = item.kind === 'textile-pack' ? 'greatestTextilePackMassKg' : 'greatestSetMassKg';
+  const limit = limitOf(item.massLimitKg, scene.policy, id);
+  if (!(item.massKg > limit.limit + slackKg)) return null;
+  const figure = { measured: item.massKg, unit: 'kg', want: 'at-most', ...limit } as const;
+  const words = figureWords(figure);
+  return {
+    subjects: [one.packageId],
+    title: `${scene.nameOf(one)} weighs ${words.measured}, want at most ${words.limit}`,
+    remedy: 'Take it off the load and have it split into two.',
+    places: onPackage(one),
+    figure,
+    source: sourceOf(limit.limitFrom, item, setMass.source),
+    fixes: () => [takeOff(one)],
+  };
 }

@@ -9,12 +9,13 @@ import { elsewhere, moveHolder } from './moves';
 import { onHolder, onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { generalPractice } from './sources';
 import { figureWords } from './words';
 
 export const shelfEdge: Rule = {
   id: 'shelf-edge',
+  about: 'shelf',
   name: 'Everything is on its shelf',
   reason: 'What hangs over the edge of a shelf scrapes the chamber or falls when the cart is moved.',
   source: generalPractice,
@@ -28,8 +29,7 @@ function overhangOf(box: ShelfBox, shelf: Shelf): number {
   return Math.max(0 - box.left, box.right - shelf.widthMm, 0 - box.front, box.back - shelf.depthMm, 0);
 }
 
-function find(scene: Scene): readonly Draft[] {
-  const { bodies, holders } = scene.layout;
+function find(scene: Scene, { bodies, holders }: OnShelf): readonly Draft[] {
   const ofHolders = holders.flatMap(({ holder, box, shelf }): Draft[] => {
     const measured = overhangOf(box, shelf);
     if (measured <= slackMm) return [];
@@ -54,7 +54,7 @@ function find(scene: Scene): readonly Draft[] {
         ...told(scene.thing(body), body.shelf, measured),
         remedy: 'Move it onto the shelf, or to a shelf that is large enough.',
         places: onPackage(body),
-        *fixes() {
+        *fixes(scene) {
           if (placement.at === 'shelf') {
             const moved = { ...placement, ...clamped(body.box, body.shelf) };
             yield {

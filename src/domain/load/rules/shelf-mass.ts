@@ -6,11 +6,12 @@ import { isSensibleMass, massOrNothing } from '../sensible';
 import { overMassLimit } from './mass-limit';
 import { onShelf } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { equipment } from './sources';
 
 export const shelfMass: Rule = {
   id: 'shelf-mass',
+  about: 'shelf',
   name: 'Shelves carry what they are made for',
   reason: 'An overloaded shelf bends or tips, and much metal on one shelf makes much water on it.',
   source: equipment,
@@ -19,19 +20,17 @@ export const shelfMass: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.layout.shelves.flatMap(({ shelf, bodies, holders }) => {
-    if (!isSensibleMass(shelf.greatestMassKg)) return [];
-    const over = overMassLimit({
-      what: `what is on ${shelf.name}`,
-      measured:
-        bodies.reduce((sum, body) => sum + massOrNothing(body.item.massKg), 0) +
-        holders.reduce((sum, holder) => sum + massOrNothing(holder.kind.massKg), 0),
-      limit: shelf.greatestMassKg,
-      marginPercent: scene.policy.massMarginPercent,
-    });
-    return over
-      ? [{ subjects: [shelf.id], remedy: 'Move something to another shelf.', places: onShelf(shelf), ...over }]
-      : [];
+function find(scene: Scene, { shelf, bodies, holders }: OnShelf): readonly Draft[] {
+  if (!isSensibleMass(shelf.greatestMassKg)) return [];
+  const over = overMassLimit({
+    what: `what is on ${shelf.name}`,
+    measured:
+      bodies.reduce((sum, body) => sum + massOrNothing(body.item.massKg), 0) +
+      holders.reduce((sum, holder) => sum + massOrNothing(holder.kind.massKg), 0),
+    limit: shelf.greatestMassKg,
+    marginPercent: scene.policy.massMarginPercent,
   });
+  return over
+    ? [{ subjects: [shelf.id], remedy: 'Move something to another shelf.', places: onShelf(shelf), ...over }]
+    : [];
 }

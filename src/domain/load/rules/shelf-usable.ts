@@ -10,6 +10,7 @@ import { countWords } from './words';
 
 export const shelfUsable: Rule = {
   id: 'shelf-usable',
+  about: 'load',
   name: 'Shelves are fit for use',
   reason: 'A bent or loose shelf tips its load, or lets it slide against the chamber wall.',
   source: equipment,

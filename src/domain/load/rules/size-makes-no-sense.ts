@@ -12,6 +12,7 @@ import { drawing } from './sources';
 
 export const sizeMakesNoSense: Rule = {
   id: 'size-makes-no-sense',
+  about: 'load',
   name: 'Sizes make sense',
   reason: 'With a size that cannot be true every answer about room, weight and water is wrong.',
   source: drawing,
@@ -30,17 +31,17 @@ function find(scene: Scene): readonly Draft[] {
 }
 
 function ofPackages(scene: Scene): readonly Draft[] {
-  const wrongOf = new Map<CatalogueItem, string | null>();
-  return scene.listed.flatMap(({ one, item }) => {
-    let wrong: string | null | undefined = item && wrongOf.get(item);
-    if (item && wrong === undefined) {
-      wrong = wrongOfItem(item);
-      wrongOf.set(item, wrong);
-    }
-    if (scene.layout.nowhere.get(one.packageId) === 'position-makes-no-sense') {
-      wrong ??= 'a place that is nowhere near the cart';
-    }
-    return wrong === null || wrong === undefined ? [] : told(one.packageId, scene.nameOf(one), wrong, onPackage(one));
+  const wrongOf = new Map<string, string>();
+  for (const item of scene.view.items) {
+    const wrong = wrongOfItem(item);
+    if (wrong !== null) wrongOf.set(item.id, wrong);
+  }
+  const { nowhere } = scene.layout;
+  if (wrongOf.size === 0 && nowhere.size === 0) return [];
+  return scene.listed.flatMap(({ one, name }) => {
+    const isFarOff = nowhere.get(one.packageId) === 'position-makes-no-sense';
+    const wrong = wrongOf.get(one.itemId) ?? (isFarOff ? 'a place that is nowhere near the cart' : null);
+    return told(one.packageId, name, wrong, onPackage(one));
   });
 }
 

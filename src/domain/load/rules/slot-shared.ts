@@ -6,12 +6,13 @@ import type { Body } from '../layout';
 import { moveNamed } from './moves';
 import { onHolder, onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { generalPractice } from './sources';
 import { countWords, listWords } from './words';
 
 export const slotShared: Rule = {
   id: 'slot-shared',
+  about: 'shelf',
   name: 'One pouch to a slot',
   reason: 'Two pouches in one slot press on each other, so that steam does not reach between them and they stay wet.',
   source: generalPractice,
@@ -20,9 +21,9 @@ export const slotShared: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
   const bySlot = new Map<string, Body[]>();
-  for (const body of scene.layout.bodies) {
+  for (const body of bodies) {
     if (!body.holder || body.slot === null) continue;
     const key = `${body.slot} ${body.holder.holder.holderId}`;
     const inSlot = bySlot.get(key);
@@ -41,7 +42,7 @@ function find(scene: Scene): readonly Draft[] {
       remedy: 'Leave one and give the others a slot each.',
       places: [onHolder(holder, first.slot), ...onPackage(...inSlot)],
       figure: { measured: inSlot.length, limit: 1, unit: 'count', want: 'at-most', limitFrom: 'equipment' },
-      *fixes() {
+      *fixes(scene) {
         if (inSlot.length > 2) return;
         for (const body of [...inSlot].reverse()) {
           yield* moveNamed(scene, body);

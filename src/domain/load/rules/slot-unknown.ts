@@ -10,6 +10,7 @@ import { equipment } from './sources';
 
 export const slotUnknown: Rule = {
   id: 'slot-unknown',
+  about: 'load',
   name: 'The slot exists',
   reason: 'A slot that the holder does not have says nothing about where the pouch really is.',
   source: equipment,
@@ -19,6 +20,7 @@ export const slotUnknown: Rule = {
 };
 
 function find(scene: Scene): readonly Draft[] {
+  if (scene.layout.nowhere.size === 0) return [];
   return scene.listed.flatMap(({ one, item, body }) => {
     const why = scene.layout.nowhere.get(one.packageId);
     if ((why !== 'no-such-slot' && why !== 'holder-without-slots') || one.placement?.at !== 'slot') return [];
@@ -35,7 +37,7 @@ function find(scene: Scene): readonly Draft[] {
       ...(slots !== null && Number.isFinite(slot)
         ? { figure: { measured: slot, limit: slots, unit: 'count', want: 'at-most', limitFrom: 'equipment' } as const }
         : {}),
-      fixes: () => (item ? elsewhere(scene, { one, item, body }) : []),
+      fixes: (scene) => (item ? elsewhere(scene, { one, item, body }) : []),
     };
   });
 }

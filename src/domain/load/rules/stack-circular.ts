@@ -10,6 +10,7 @@ import { listWords } from './words';
 
 export const stackCircular: Rule = {
   id: 'stack-circular',
+  about: 'load',
   name: 'Stacks start on a shelf',
   reason: 'Things that stand on each other in a circle have no place on the cart, so nothing can be said about them.',
   source: drawing,

@@ -8,11 +8,12 @@ import { elsewhere } from './moves';
 import { isMetalOver } from './metal';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { instructions } from './sources';
 
 export const stackNotPermitted: Rule = {
   id: 'stack-not-permitted',
+  about: 'shelf',
   name: 'Stacks only where instructions permit them',
   reason: 'A thing on top keeps steam from what is below it and drips on it while it dries.',
   source: instructions,
@@ -21,8 +22,8 @@ export const stackNotPermitted: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  return scene.layout.bodies.flatMap((body) => {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
+  return bodies.flatMap((body) => {
     const { below, item } = body;
     // A pouch on something is out of its holder or lies flat; metal on a textile is told as that.
     if (!below || item.kind === 'pouch' || isMetalOver(body, below, scene.policy)) return [];
@@ -36,7 +37,7 @@ function find(scene: Scene): readonly Draft[] {
         : `${upper} stands on ${lower}, which its instructions do not permit`,
       remedy: isListed ? 'Put it square on top, or on a shelf.' : 'Put it on a shelf.',
       places: onPackage(body, below),
-      fixes: () => elsewhere(scene, { one: body.package, item, body }),
+      fixes: (scene) => elsewhere(scene, { one: body.package, item, body }),
     };
   });
 }

@@ -7,12 +7,13 @@ import { elsewhere } from './moves';
 import { onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { instructions } from './sources';
 import { figureWords, sourceOf } from './words';
 
 export const stackTooHigh: Rule = {
   id: 'stack-too-high',
+  about: 'shelf',
   name: 'Stacks are not too high',
   reason: 'The instructions permit stacks up to a height that was tested; above it steam and drying were never shown.',
   source: instructions,
@@ -21,9 +22,9 @@ export const stackTooHigh: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
-  const isUnder = new Set(scene.layout.bodies.map((body) => body.below));
-  return scene.layout.bodies.flatMap((top) => {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
+  const isUnder = new Set(bodies.map((body) => body.below));
+  return bodies.flatMap((top) => {
     if (!top.below || isUnder.has(top)) return [];
     const strictest = strictestOf(top);
     if (!strictest || top.box.top <= strictest.limit + slackMm) return [];
@@ -42,7 +43,7 @@ function find(scene: Scene): readonly Draft[] {
       places: onPackage(top),
       figure,
       source: sourceOf('ifu', strictest.body.item, instructions),
-      fixes: () => elsewhere(scene, { one: top.package, item: top.item, body: top }),
+      fixes: (scene) => elsewhere(scene, { one: top.package, item: top.item, body: top }),
     };
   });
 }

@@ -8,6 +8,7 @@ import type { Scene } from './scene';
 
 export const sterilizerInService: Rule = {
   id: 'sterilizer-in-service',
+  about: 'load',
   name: 'The sterilizer is in service',
   reason: 'A sterilizer that failed or was repaired has to show that it works before anything from it may be used.',
   source: {

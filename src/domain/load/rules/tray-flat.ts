@@ -4,11 +4,12 @@
  */
 import { hasToDrain, wrongPose } from './poses';
 import type { Draft, Rule } from './rule';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { cdcLoading } from './sources';
 
 export const trayFlat: Rule = {
   id: 'tray-flat',
+  about: 'shelf',
   name: 'Trays and containers lie flat',
   reason:
     'On its side a set slides together into one heap that steam does not get through, and a container’s filters look the wrong way.',
@@ -18,9 +19,10 @@ export const trayFlat: Rule = {
   find,
 };
 
-function find(scene: Scene): readonly Draft[] {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
   return wrongPose(
     scene,
+    bodies,
     (body) => {
       const { kind, pose } = body.item;
       const isTray = kind === 'rigid-container' || kind === 'wrapped-tray';

@@ -13,6 +13,7 @@ import { countWords, listWords } from './words';
 
 export const unplaced: Rule = {
   id: 'unplaced',
+  about: 'load',
   name: 'Everything scanned has a place',
   reason: 'Nothing can be said about how a package stands as long as nobody has said where.',
   source: drawing,
@@ -48,7 +49,7 @@ function find(scene: Scene): readonly Draft[] {
       remedy: 'Scan the holder or shelf they are in, then the packages.',
       places: onPackage(...without.map(({ one }) => one)),
       figure: { measured: without.length, limit: 0, unit: 'count', want: 'exactly', limitFrom: 'default' },
-      fixes: () => placeIt(scene, without),
+      fixes: (scene) => placeIt(scene, without),
     },
   ];
 }

@@ -10,6 +10,7 @@ import { countWords, listWords } from './words';
 
 export const unscanned: Rule = {
   id: 'unscanned',
+  about: 'load',
   name: 'Nothing unscanned',
   reason: 'A package that was not scanned cannot be proved to be in the load, nor be found when the load fails.',
   source: accountability,

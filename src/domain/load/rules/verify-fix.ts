@@ -11,9 +11,11 @@ const aboutCounting: ReadonlySet<RuleId> = new Set<RuleId>(['count-missing', 'co
  * gone, and nothing of the same or greater weight is new or worse. Null where none does.
  */
 export function verifiedFixOf(scene: Scene, before: readonly Judged[], { finding, draft }: Judged): Fix | null {
-  for (const fix of draft.fixes?.() ?? []) {
+  for (const fix of draft.fixes?.(scene) ?? []) {
     const changed = applyEdits(scene.view, fix.edits);
-    if (changed.ok && mends(finding, draft.subjects, before, judge(sceneOf(changed.value, scene.policy)))) return fix;
+    if (!changed.ok) continue;
+    const after = judge(sceneOf(changed.value, scene.policy, scene));
+    if (mends(finding, draft.subjects, before, after)) return fix;
   }
   return null;
 }

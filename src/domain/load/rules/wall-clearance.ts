@@ -9,12 +9,13 @@ import { elsewhere, moveHolder } from './moves';
 import { onHolder, onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
-import type { Scene } from './scene';
+import type { OnShelf, Scene } from './scene';
 import { generalPractice } from './sources';
 import { figureWords } from './words';
 
 export const wallClearance: Rule = {
   id: 'wall-clearance',
+  about: 'shelf',
   name: 'Clear of the chamber walls',
   reason: 'Water runs down the chamber walls, and what touches them stays wet or scorches.',
   source: generalPractice,
@@ -25,10 +26,10 @@ export const wallClearance: Rule = {
 
 type Wall = { readonly measured: number; readonly words: string; readonly axis: 'x' | 'y'; readonly sign: 1 | -1 };
 
-function find(scene: Scene): readonly Draft[] {
+function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
   const limit = limitOf(null, scene.policy, 'wallClearanceMm');
   const nearest = new Map<string, { body: Body; wall: Wall }>();
-  for (const body of scene.layout.bodies) {
+  for (const body of bodies) {
     const wall = nearestWall(scene, body);
     if (wall.measured >= limit.limit - slackMm) continue;
     const unit = body.holder?.holder.holderId ?? body.packageId;
@@ -46,7 +47,7 @@ function find(scene: Scene): readonly Draft[] {
       remedy: `Move ${holder ? 'the holder' : 'it'} away from the ${wall.words}.`,
       places: holder ? [onHolder(holder.holder, body.slot)] : onPackage(body),
       figure,
-      fixes: () => fixesFor(scene, body, wall, limit.limit - wall.measured),
+      fixes: (scene) => fixesFor(scene, body, wall, limit.limit - wall.measured),
     };
   });
 }

@@ -37,7 +37,10 @@ export function waterOnMetal(scene: Scene): WaterOnMetal {
     const heats = [...massOf]
       .filter(([, mass]) => mass > 0)
       .sort(([, a], [, b]) => b - a)
-      .map(([metal, mass]) => `${mass.toFixed(1)} kg ${metalWords[metal]} × ${specificHeat[metal].toFixed(3).replace(/0$/, '')} kJ/kgK`);
+      .map(
+        ([metal, mass]) =>
+          `${mass.toFixed(1)} kg ${metalWords[metal]} × ${specificHeat[metal].toFixed(3).replace(/0$/, '')} kJ/kgK`,
+      );
     const heat = heats.length > 1 ? `(${heats.join(' + ')})` : (heats[0] ?? '0 kg');
     const rise = Math.max(heating.cycleC - heating.startC, 0).toFixed(0);
     const latent = latentHeat(heating.cycleC).toFixed(0);

@@ -12,6 +12,7 @@ import { waterOnMetal } from './water-on-metal';
 
 export const water: Rule = {
   id: 'water',
+  about: 'load',
   name: 'The load can dry',
   reason: 'Steam turns to water on cold metal, and what does not dry in time makes a wet load.',
   source: {
@@ -45,7 +46,7 @@ function find(scene: Scene): readonly Draft[] {
       reason: `Steam turns to water on cold metal${wettest && wettest.kg > 0 ? `, most of it here on ${wettest.shelf.name} (${wettest.kg.toFixed(2)} kg)` : ''}, and what does not dry in time makes a wet load. ${working(items)}; ${minutes} min × ${tidyPerMinute(perMinute.limit)} kg of water a minute = ${limit.toFixed(2)} kg.`,
       places: [...onLoad, ...(wettest && wettest.kg > 0 ? onShelf(wettest.shelf) : [])],
       figure,
-      *fixes() {
+      *fixes(scene) {
         const longer = scene.view.qualifiedPrograms
           .filter(
             (one) => one.type === program.type && one.temperatureC === program.temperatureC && one.dryS > program.dryS,

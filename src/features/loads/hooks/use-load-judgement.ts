@@ -1,9 +1,9 @@
 import type { LoadDetail } from '#contract/loads';
 import { decideClose } from '#domain/load/decide-close';
-import { evaluateLoad, letterFindings } from '#domain/load/evaluate-load';
+import { createEvaluator, letterFindings } from '#domain/load/evaluate-load';
 import { layOut } from '#domain/load/layout';
 import { reckon } from '#domain/load/reckoning';
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
 import { useExpectedShelves } from './use-expected-shelves';
 
 /** What the gate counts by itself is not listed again as a finding. */
@@ -12,7 +12,8 @@ const atTheGate: ReadonlySet<string> = new Set(['unscanned', 'count-missing', 'c
 /** The same judgement the server makes when the load is closed, made here after each change so that it can be seen. */
 export function useLoadJudgement({ view, policy }: Pick<LoadDetail, 'view' | 'policy'>) {
   const layout = useMemo(() => layOut(view), [view]);
-  const findings = useMemo(() => evaluateLoad(view, policy), [view, policy]);
+  const [evaluate] = useState(createEvaluator);
+  const findings = useMemo(() => evaluate(view, policy), [evaluate, view, policy]);
   const decision = useMemo(() => decideClose(view, policy, findings), [view, policy, findings]);
   const accepted = useMemo(() => new Set(view.acceptances.map((entry) => entry.findingKey)), [view.acceptances]);
   const expectedShelf = useExpectedShelves(view, policy);
