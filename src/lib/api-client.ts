@@ -16,6 +16,8 @@ export type CallOptions = {
   readonly patienceMs?: number;
 };
 
+export type DownloadedFile = { readonly content: Blob; readonly name: string };
+
 /** For replies without a body. */
 export const noContentSchema = z.undefined();
 
@@ -144,10 +146,11 @@ export const api = {
   /** A file with its form fields. */
   upload: <Reply>(path: string, form: FormData, schema: z.ZodType<Reply>, options: CallOptions = {}) =>
     sendAndParse({ method: 'POST', path, body: form, options: { patienceMs: 120_000, ...options } }, schema),
-  /** A file, such as a sheet of labels. */
-  async download(path: string, options: CallOptions = {}): Promise<Blob> {
+  /** A file, such as a sheet of labels, with the name the server gives it. */
+  async download(path: string, options: CallOptions = {}): Promise<DownloadedFile> {
     const response = await send({ method: 'GET', path, options: { patienceMs: 60_000, ...options } });
-    return response.blob();
+    const named = /filename="([^"]+)"/.exec(response.headers.get('Content-Disposition') ?? '')?.[1];
+    return { content: await response.blob(), name: named ?? 'file' };
   },
 } as const;
 

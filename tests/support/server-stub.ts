@@ -19,7 +19,12 @@ export type Answer =
       readonly fields?: readonly { pointer: string; detail: string }[];
     }
   | { readonly silence: true }
-  | { readonly text: string; readonly status: number; readonly contentType: string };
+  | {
+      readonly text: string;
+      readonly status: number;
+      readonly contentType: string;
+      readonly headers?: Readonly<Record<string, string>>;
+    };
 
 type Handler = (call: Call) => Answer | Promise<Answer>;
 
@@ -27,7 +32,8 @@ function responseOf(answer: Answer, call: Call): Response {
   if ('silence' in answer) throw new TypeError('Failed to fetch');
   if ('nothing' in answer) return new Response(null, { status: 204 });
   if ('text' in answer) {
-    return new Response(answer.text, { status: answer.status, headers: { 'Content-Type': answer.contentType } });
+    const headers = { 'Content-Type': answer.contentType, ...answer.headers };
+    return new Response(answer.text, { status: answer.status, headers });
   }
   if ('problem' in answer) {
     const body = {

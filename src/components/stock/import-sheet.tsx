@@ -7,6 +7,7 @@ import { countOf } from '../../lib/format';
 import { useAnnounce } from '../ui/announcer';
 import { Button } from '../ui/button';
 import { Dialog } from '../ui/dialog';
+import { FileLink } from '../ui/file-link';
 import { FileField } from '../ui/file-field';
 import { ImportPreviewView } from './import-preview-view';
 import { useWrite } from './use-write';
@@ -99,16 +100,17 @@ export function ImportSheet({ path, things, queryKey, onClose }: ImportSheetProp
     >
       <div className="grid gap-5 pt-1">
         <p className="text-row">
-          One line for each, with the columns named on the first.{' '}
-          <a href={`${path}/import/template`} download>
-            The template
-          </a>{' '}
-          explains them;{' '}
-          <a href={`${path}/export`} download>
-            what is here now
-          </a>{' '}
-          reads back to the same.
+          One line for each, with the columns named on the first. The template explains them; what is here now reads
+          back to the same.
         </p>
+        <div className="-my-3 -ml-3 flex flex-wrap items-start gap-x-2">
+          <FileLink to={`${path}/import/template`} how="save" kind="plain" size="small">
+            Save the template
+          </FileLink>
+          <FileLink to={`${path}/export`} how="save" kind="plain" size="small">
+            Save what is here now
+          </FileLink>
+        </div>
         <FileField
           label="CSV file"
           accept=".csv,.txt,.tsv,text/csv"

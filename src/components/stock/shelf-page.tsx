@@ -1,7 +1,7 @@
 import { useEffect, useRef, type ReactNode } from 'react';
-import { buttonLook } from '../ui/button-look';
 import { Button } from '../ui/button';
 import { CheckboxField } from '../ui/checkbox-field';
+import { FileLink } from '../ui/file-link';
 import { FilmPanel } from '../ui/film-panel';
 import { SearchField } from '../ui/search-field';
 import { WaitingState, WrongState } from '../ui/states';
@@ -99,9 +99,9 @@ function ShelfBar({ address, searchWords, total, retiredWords, filter, add, expo
         />
       )}
       <span className="ml-auto flex flex-wrap items-center gap-1">
-        <a href={exportPath} download className={`${buttonLook('plain', 'normal')} max-tablet:hidden`}>
+        <FileLink to={exportPath} how="save" kind="plain" className="max-tablet:hidden">
           Save as CSV
-        </a>
+        </FileLink>
         {mayEdit && (
           <Button
             kind="plain"

@@ -10,8 +10,6 @@ type LinkButtonProps = {
   size?: ButtonSize;
   icon?: IconName;
   iconAfter?: IconName;
-  /** A file of the server, such as a sheet of labels: opened by the browser in a tab of its own. */
-  isFile?: boolean;
   className?: string;
 };
 
@@ -23,24 +21,13 @@ export function LinkButton({
   size = 'normal',
   icon,
   iconAfter,
-  isFile = false,
   className = '',
 }: LinkButtonProps) {
-  const look = `${buttonLook(kind, size)} ${className}`;
-  const inside = (
-    <>
+  return (
+    <Link to={to} className={`${buttonLook(kind, size)} ${className}`}>
       {icon && <Icon name={icon} size={size === 'small' ? 18 : 20} />}
       {children}
       {iconAfter && <Icon name={iconAfter} size={18} />}
-    </>
-  );
-  return isFile ? (
-    <a href={to} target="_blank" rel="noopener" className={look}>
-      {inside}
-    </a>
-  ) : (
-    <Link to={to} className={look}>
-      {inside}
     </Link>
   );
 }

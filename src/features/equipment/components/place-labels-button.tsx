@@ -1,20 +1,20 @@
 import { paths } from '#contract/paths';
 import type { PlaceLabelQuery } from '#contract/equipment';
-import { LinkButton } from '../../../components/ui/link-button';
+import { FileLink } from '../../../components/ui/file-link';
 import { withQuery } from '../../../lib/api-client';
 
 /** Opens the labels of places as a PDF: of a cart's shelves, of the holders of a kind, or of one holder. */
 export function PlaceLabelsButton({ of, children }: { of: Partial<PlaceLabelQuery>; children: string }) {
   return (
-    <LinkButton
+    <FileLink
       to={withQuery(paths.placeLabels, of)}
-      isFile
+      how="open"
       kind="quiet"
       size="small"
       icon="print"
       className="justify-self-start"
     >
       {children}
-    </LinkButton>
+    </FileLink>
   );
 }

@@ -2,6 +2,7 @@ import type { LoadDetail } from '#contract/loads';
 import { useState } from 'react';
 import { Button } from '../../../components/ui/button';
 import { Dialog } from '../../../components/ui/dialog';
+import { FileLink } from '../../../components/ui/file-link';
 import { TextAreaField } from '../../../components/ui/text-field';
 import { countOf } from '../../../lib/format';
 import { sentenceOf } from '../../../lib/errors';
@@ -41,14 +42,9 @@ export function StickerSheet({ detail, packageId, onClose }: StickerSheetProps) 
       actions={
         print.data ? (
           <>
-            <a
-              href={print.data.pdf}
-              target="_blank"
-              rel="noreferrer"
-              className="inline-flex min-h-12 items-center bg-film-4 px-5 font-semibold text-paper-0 shadow-[inset_0_-3px_0_var(--color-film-5)]"
-            >
+            <FileLink to={print.data.pdf} how="open" icon="print">
               Open the sheet to print
-            </a>
+            </FileLink>
             <Button kind="plain" onPress={onClose}>
               Done
             </Button>

@@ -7,7 +7,7 @@ import { Code } from '../../../components/ui/code';
 import { ConfirmDialog } from '../../../components/ui/confirm-dialog';
 import { Dialog } from '../../../components/ui/dialog';
 import { PanelHead } from '../../../components/ui/heading';
-import { LinkButton } from '../../../components/ui/link-button';
+import { FileLink } from '../../../components/ui/file-link';
 import { WaitingState, WrongState } from '../../../components/ui/states';
 import { DateText, Day } from '../../../components/ui/time';
 import { newRequestId } from '../../../lib/request-id';
@@ -148,9 +148,9 @@ function LabelAgain({ detail }: { detail: PackageDetail }) {
         {isFirst ? 'Print its label' : 'Print its label again'}
       </Button>
       {print.data !== undefined && (
-        <LinkButton to={print.data.pdf} isFile kind="plain">
+        <FileLink to={print.data.pdf} how="open" kind="plain">
           Open the label
-        </LinkButton>
+        </FileLink>
       )}
       <ConfirmDialog
         isOpen={isAsking}

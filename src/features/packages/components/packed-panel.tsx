@@ -5,7 +5,7 @@ import { Icon } from '../../../components/icon';
 import { Button } from '../../../components/ui/button';
 import { Code } from '../../../components/ui/code';
 import { ProofStripe } from '../../../components/proof-stripe';
-import { LinkButton } from '../../../components/ui/link-button';
+import { FileLink } from '../../../components/ui/file-link';
 import { sentenceOf } from '../../../lib/errors';
 import { countOf } from '../../../lib/format';
 import { packingStripe, type Said } from '../packing-stripe';
@@ -80,9 +80,9 @@ export function PackedPanel({ batch, printError, isPrinting, onPrintAgain, onPac
               Print the labels
             </Button>
           ) : (
-            <LinkButton to={pdf} isFile icon="print">
+            <FileLink to={pdf} how="open" icon="print">
               Open the labels
-            </LinkButton>
+            </FileLink>
           )}
           <Button kind="quiet" icon="plus" onPress={onPackMore}>
             Pack more of it

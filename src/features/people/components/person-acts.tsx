@@ -4,7 +4,7 @@ import { useState } from 'react';
 import { useAnnounce } from '../../../components/ui/announcer';
 import { Button } from '../../../components/ui/button';
 import { ConfirmDialog, type ConfirmDialogProps } from '../../../components/ui/confirm-dialog';
-import { LinkButton } from '../../../components/ui/link-button';
+import { FileLink } from '../../../components/ui/file-link';
 import { useChangePerson, useGiveOneTimePassword, useGivePin } from '../mutations';
 import { useRequestId } from '../use-request-id';
 import { ChangePersonDialog } from './change-person-dialog';
@@ -123,9 +123,15 @@ export function PersonActs({ person, isSelf, onShown }: PersonActsProps) {
       </Button>
       {person.hasBadge && (
         <>
-          <LinkButton kind="quiet" icon="print" isFile to={paths.personBadge(person.id)}>
+          <FileLink
+            kind="quiet"
+            icon="print"
+            how="open"
+            to={paths.personBadge(person.id)}
+            className="justify-items-stretch"
+          >
             Print the badge
-          </LinkButton>
+          </FileLink>
           <Button kind="quiet" onPress={ask('pin')}>
             {person.hasPin ? 'Give a new PIN' : 'Give a PIN'}
           </Button>
