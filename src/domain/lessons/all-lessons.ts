@@ -3,6 +3,7 @@ import { rules } from '../load/rules/all-rules';
 import type { Rule } from '../load/rules/rule';
 import type { Lesson } from './lesson';
 import { airRemovalTestLesson } from './rules/air-removal-test';
+import { baseFilterShutLesson } from './rules/base-filter-shut';
 import { basinDrainsLesson } from './rules/basin-drains';
 import { challengeDevicePlacedLesson } from './rules/challenge-device-placed';
 import { countDiffersLesson } from './rules/count-differs';
@@ -62,6 +63,7 @@ const lessons: Readonly<Record<RuleId, Lesson>> = {
   gap: gapLesson,
   'label-hidden': labelHiddenLesson,
   'lid-filter-covered': lidFilterCoveredLesson,
+  'base-filter-shut': baseFilterShutLesson,
   'stack-not-permitted': stackNotPermittedLesson,
   'stack-too-high': stackTooHighLesson,
   'stack-circular': stackCircularLesson,

@@ -77,6 +77,7 @@ export const ruleIds = [
   'gap',
   'label-hidden',
   'lid-filter-covered',
+  'base-filter-shut',
   'stack-not-permitted',
   'stack-too-high',
   'stack-circular',

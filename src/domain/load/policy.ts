@@ -15,7 +15,7 @@ import {
 import type { Figure, Severity, Source } from './finding';
 
 /** Changes whenever a rule, a default or a severity changes: a closed load keeps the version it was judged by. */
-export const ruleSetVersion = '2026-12-01.1';
+export const ruleSetVersion = '2026-12-01.2';
 
 /** One way: all paper sides look the same way. Alternating: paper faces paper and film faces film. */
 export type FacingRule = 'one-way' | 'alternating' | 'not-set';

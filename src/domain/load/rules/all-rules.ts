@@ -1,4 +1,5 @@
 import { airRemovalTest } from './air-removal-test';
+import { baseFilterShut } from './base-filter-shut';
 import { basinDrains } from './basin-drains';
 import { challengeDevicePlaced } from './challenge-device-placed';
 import { countDiffers } from './count-differs';
@@ -59,6 +60,7 @@ export const rules: readonly Rule[] = [
   gap,
   labelHidden,
   lidFilterCovered,
+  baseFilterShut,
   stackNotPermitted,
   stackTooHigh,
   stackCircular,
