@@ -1,0 +1,85 @@
+import { challengePack, demonstrationItems, singleUseChallengeDevice } from '../../../seeds/demonstration-catalogue';
+import type { ItemFields } from '../../../src/domain/catalogue/item-fields';
+import type { CatalogueItem, CycleNeed, Program } from '../../../src/domain/load/model';
+import { kg, mm } from '../../../src/domain/units/quantity';
+import type { Random } from './random';
+
+/* The demonstration's catalogue, and how the instructions for use in it may differ from one hospital to the next. */
+
+function catalogueItem(fields: ItemFields): CatalogueItem {
+  const {
+    coolS: _coolS,
+    expiryRule: _expiryRule,
+    expiryDays: _expiryDays,
+    deviceIdentifier: _deviceIdentifier,
+    ifuRevision: _ifuRevision,
+    service: _service,
+    note: _note,
+    ...item
+  } = fields;
+  return { id: `item ${item.code}`, ...item };
+}
+
+const catalogue: readonly CatalogueItem[] = [...demonstrationItems, challengePack, singleUseChallengeDevice].map(
+  catalogueItem,
+);
+
+/** The need that a program answers exactly. */
+function needFor(program: Program): CycleNeed {
+  return {
+    type: program.type,
+    temperatureC: program.temperatureC,
+    leastExposureS: program.exposureS,
+    greatestExposureS: null,
+    leastDryS: program.dryS,
+  };
+}
+
+export function permits(item: CatalogueItem, program: Program): boolean {
+  return item.cycleNeeds.some(
+    (need) =>
+      need.type === program.type &&
+      need.temperatureC === program.temperatureC &&
+      need.leastExposureS <= program.exposureS &&
+      (need.greatestExposureS === null || program.exposureS <= need.greatestExposureS) &&
+      need.leastDryS <= program.dryS,
+  );
+}
+
+/**
+ * The catalogue of one hospital: where instructions for use speak and where they are silent, which trays have a solid floor,
+ * what may stand on what, and which cycles are permitted besides those of the demonstration.
+ */
+export function variedCatalogue(random: Random, program: Program): readonly CatalogueItem[] {
+  if (random.chance(0.2)) return catalogue;
+  const widening = random.pick([0, 0.3, 0.7]);
+  return catalogue.map((item) => {
+    let varied = item;
+    if (random.chance(widening) && !permits(item, program) && program.type !== 'immediate-use') {
+      varied = { ...varied, cycleNeeds: [...item.cycleNeeds, needFor(program)] };
+    }
+    if (random.chance(0.25)) varied = { ...varied, clearanceMm: clearanceFor(item, random) };
+    if (random.chance(0.15))
+      varied = { ...varied, massLimitKg: kg(Math.ceil((item.massKg + random.next()) * 10) / 10) };
+    if (item.kind === 'pouch' && random.chance(0.15)) varied = { ...varied, packaging: 'double-pouch' };
+    if (item.kind === 'wrapped-tray') varied = asTray(varied, random);
+    if (item.standsOn.length > 0 && random.chance(0.3)) {
+      varied = { ...varied, greatestStackHeightMm: random.pick([null, mm(450)]) };
+    }
+    return varied;
+  });
+}
+
+function clearanceFor(item: CatalogueItem, random: Random): CatalogueItem['clearanceMm'] {
+  if (random.chance(0.5)) return null;
+  if (item.kind !== 'pouch') return mm(random.whole(10, 40));
+  return mm(random.whole(5, 12));
+}
+
+function asTray(item: CatalogueItem, random: Random): CatalogueItem {
+  if (random.chance(0.06)) return { ...item, isPerforated: false, pose: 'tilted' };
+  if (item.code === 'W-08' && random.chance(0.4)) {
+    return { ...item, standsOn: ['W-03', 'W-06', 'W-09'], greatestStackHeightMm: mm(170) };
+  }
+  return item;
+}

@@ -1,0 +1,264 @@
+import type { CatalogueItem, LoadHolder, LoadPackage, LoadView, Program, Shelf } from '../../../src/domain/load/model';
+import type { LoadPolicy } from '../../../src/domain/load/policy';
+import { kg } from '../../../src/domain/units/quantity';
+import { massLimitOf, singleBlock, type Block, type PutHolder, type PutPackage, type Site } from './block';
+import { permits, variedCatalogue } from './catalogue';
+import { Deck, massOf } from './deck';
+import { holderKinds, programs, roomFor } from './equipment';
+import { gapOf, sizeOf, type Rect } from './geometry';
+import { houseRules } from './house-rules';
+import { basketOfOne, basketOfPouches, rackBlock } from './pouch-blocks';
+import { randomFrom, type Random } from './random';
+import { oneOf, spacedTrays, stackBlock } from './set-blocks';
+
+/** A cart with nothing to find fault with, by the trade's papers, and the house rules it is loaded under. */
+export type LegalCart = { readonly number: number; readonly view: LoadView; readonly policy: LoadPolicy };
+
+const today = '2026-03-10';
+
+/** Cart `number` of a seed; always the same one. `wanted` asks for so many packages, as near as the cart holds them. */
+export function legalCart(seed: number, number: number, wanted?: number): LegalCart {
+  for (let attempt = 0; ; attempt += 1) {
+    const cart = tryCart(randomFrom(seed, number, attempt), number, wanted);
+    if (cart) return cart;
+  }
+}
+
+type Maker = (site: Site) => Block | null;
+
+const small: Maker = (site) =>
+  basketOfOne(
+    site,
+    site.items.filter((item) => item.code === 'C-14'),
+  );
+const tray: Maker = (site) => oneOf(site, ['wrapped-tray']);
+const container: Maker = (site) => oneOf(site, ['rigid-container']);
+const basin: Maker = (site) => oneOf(site, ['basin']);
+const textile: Maker = (site) => oneOf(site, ['textile-pack']);
+
+/** What a cart mostly holds: each maker as often as it is named. */
+const mixes: readonly (readonly Maker[])[] = [
+  [rackBlock, rackBlock, rackBlock, basketOfPouches, tray],
+  [tray, tray, container, stackBlock, spacedTrays, rackBlock],
+  [container, stackBlock, tray],
+  [tray, container, basin, textile, rackBlock, rackBlock, basketOfPouches, small, spacedTrays, stackBlock],
+  [textile, textile, tray, basin, rackBlock],
+  [basin, basin, tray, rackBlock, textile],
+  [rackBlock],
+  [basketOfPouches, basketOfPouches, rackBlock, small],
+];
+const manyPouches: readonly Maker[] = [rackBlock, rackBlock, rackBlock, rackBlock, basketOfPouches, tray, textile];
+
+function tryCart(random: Random, number: number, asked: number | undefined): LegalCart | null {
+  const wanted = asked ?? Math.round(2 * 100 ** random.next());
+  const policy = houseRules(random);
+  const { sterilizer, cart } = roomFor(random, wanted);
+  const program = programFor(random);
+  const catalogue = variedCatalogue(random, program);
+  const device = challengeDeviceFor(catalogue, program, random);
+  const items = catalogue.filter(
+    (item) => mayGoIn(item, program, policy) && (!item.isImplant || mayHoldImplants(device, policy)),
+  );
+  const needsDevice = policy.challengeDevice === 'every-load' || random.chance(0.3);
+  const hasDevice = needsDevice && policy.challengeDevice !== 'not-asked';
+  if (hasDevice && !device) return null;
+  const withoutImplants = hasDevice || policy.challengeDevice === 'not-asked';
+  const usable = withoutImplants ? items : items.filter((item) => !item.isImplant);
+
+  const filling = new Filling({ random, policy, program, sterilizer, cart, items: usable, wanted });
+  if (hasDevice && device && !filling.putOverDrain(device)) return null;
+  filling.fill(wanted > 45 ? manyPouches : random.pick(mixes));
+  if (filling.packages.length < (asked ?? 2)) return null;
+
+  const view: LoadView = {
+    loadId: `load ${number}`,
+    sterilizer,
+    program,
+    qualifiedPrograms: random.shuffled([
+      program,
+      ...programs.filter((one) => one.id !== program.id && random.chance(0.5)),
+    ]),
+    cart,
+    holders: filling.holders,
+    holderKinds,
+    items: catalogue,
+    packages: random.shuffled(filling.packages),
+    counts: [],
+    acceptances: [],
+    airRemoval:
+      sterilizer.needsAirRemovalTest || random.chance(0.5)
+        ? { result: 'passed', testedAt: `${today}T12:10:00Z` }
+        : null,
+    today,
+  };
+  const counts = cart.shelves.map((shelf) => ({ shelfId: shelf.id, counted: filling.countOn(shelf) }));
+  return { number, view: { ...view, counts }, policy };
+}
+
+function programFor(random: Random): Program {
+  const code = random.pick([
+    'W4-30',
+    'W4-30',
+    'W4-20',
+    'W4-40',
+    'W4-40',
+    'W4-50',
+    'W4-50',
+    'T4-20',
+    'P18-30',
+    'W3-16',
+    'G121-30',
+  ]);
+  const program = programs.find((one) => one.code === code);
+  if (!program) throw new Error(`the demonstration has no program ${code}`);
+  return random.chance(0.6) ? program : { ...program, greatestLoadMassKg: kg(random.pick([40, 60, 90])) };
+}
+
+function challengeDeviceFor(items: readonly CatalogueItem[], program: Program, random: Random): CatalogueItem | null {
+  const devices = items.filter((item) => item.kind === 'challenge-device' && permits(item, program));
+  return devices.length > 0 ? random.pick(devices) : null;
+}
+
+function mayHoldImplants(device: CatalogueItem | null, policy: LoadPolicy): boolean {
+  return device !== null || policy.challengeDevice === 'not-asked';
+}
+
+function mayGoIn(item: CatalogueItem, program: Program, policy: LoadPolicy): boolean {
+  return item.kind !== 'challenge-device' && permits(item, program) && item.massKg <= massLimitOf(item, policy);
+}
+
+type Plan = Pick<Site, 'random' | 'policy' | 'program' | 'items' | 'wanted'> & Pick<LoadView, 'sterilizer' | 'cart'>;
+
+/** One cart being filled, shelf by shelf and block by block. */
+class Filling {
+  readonly holders: LoadHolder[] = [];
+  readonly packages: LoadPackage[] = [];
+  readonly #plan: Plan;
+  readonly #decks: readonly Deck[];
+  readonly #sides: ReadonlyMap<string, Site['paperTowards']>;
+  readonly #counts = new Map<string, number>();
+  readonly #greatestMassKg: number;
+  #massKg = 0;
+  #ids = 0;
+
+  constructor(plan: Plan) {
+    this.#plan = plan;
+    const { random, policy, program, sterilizer, cart } = plan;
+    this.#decks = cart.shelves.map((shelf) => new Deck(shelf, sterilizer, policy));
+    const side = () => random.pick(['left', 'right'] as const);
+    this.#sides = new Map(cart.shelves.map((shelf) => [shelf.id, { x: side(), y: side() }]));
+    const limit = Math.min(sterilizer.greatestLoadMassKg, program.greatestLoadMassKg ?? Infinity);
+    this.#greatestMassKg = limit * (1 - policy.massMarginPercent / 100);
+  }
+
+  countOn(shelf: Shelf): number {
+    return this.#counts.get(shelf.id) ?? 0;
+  }
+
+  fill(makers: readonly Maker[]): void {
+    const { random, wanted } = this.#plan;
+    for (let failures = 0; failures < 40 + wanted / 2 && this.packages.length < wanted;) {
+      const deck = random.pick(this.#decks);
+      const block = random.pick(makers)(this.#siteOn(deck.shelf));
+      if (!block || block.items.length > wanted - this.packages.length || !this.#place(deck, block)) failures += 1;
+    }
+  }
+
+  /** The challenge device goes over the drain, on the lowest shelf, before everything else. */
+  putOverDrain(device: CatalogueItem): boolean {
+    const { random, sterilizer, policy } = this.#plan;
+    const deck = this.#decks.find((one) => one.shelf.level === 1);
+    if (!deck) return false;
+    const turn = random.pick([0, 90] as const);
+    const block = singleBlock(this.#siteOn(deck.shelf), device, turn);
+    const size = sizeOf(device, device.pose, turn);
+    for (let inset = 0; inset <= 60; inset += 1) {
+      const x = within(Math.round(sterilizer.drainXMm - size.dx / 2), inset, deck.shelf.widthMm - size.dx - inset);
+      const y = within(Math.round(sterilizer.drainYMm - size.dy / 2), inset, deck.shelf.depthMm - size.dy - inset);
+      const away = Math.hypot(x + size.dx / 2 - sterilizer.drainXMm, y + size.dy / 2 - sterilizer.drainYMm);
+      if (away > policy.challengeDeviceReachMm - 5) return false;
+      if (deck.hasRoomFor(block) && deck.isFree(block, x, y)) {
+        this.#add(deck, block, x, y);
+        return true;
+      }
+    }
+    return false;
+  }
+
+  #siteOn(shelf: Shelf): Site {
+    const { random, policy, program, items, wanted } = this.#plan;
+    return {
+      random,
+      policy,
+      program,
+      items,
+      holderKinds,
+      shelf,
+      wanted: wanted - this.packages.length,
+      nextId: (word) => `${word} ${(this.#ids += 1)}`,
+      paperTowards: this.#sides.get(shelf.id) ?? { x: 'left', y: 'left' },
+    };
+  }
+
+  #place(deck: Deck, block: Block): boolean {
+    if (!deck.hasRoomFor(block) || this.#massKg + massOf(block) > this.#greatestMassKg) return false;
+    const spot = deck.findSpot(block, this.#plan.random, (rect) => this.#keepsTextilesDry(deck.shelf, block, rect));
+    if (!spot) return false;
+    this.#add(deck, block, spot.x, spot.y);
+    return true;
+  }
+
+  /** No metal on a higher shelf above a textile pack; a rack counts as metal, and shelves of unequal width as wholly above. */
+  #keepsTextilesDry(shelf: Shelf, block: Block, rect: Rect): boolean {
+    return this.#decks.every((deck) => {
+      if (deck.shelf.id === shelf.id) return true;
+      return deck.standing.every((one) => {
+        const [upper, lower] = deck.shelf.level > shelf.level ? [one.block, block] : [block, one.block];
+        if (!isTextile(lower) || !this.#isMetal(upper)) return true;
+        return deck.shelf.widthMm === shelf.widthMm && gapOf(one.rect, rect) > 0;
+      });
+    });
+  }
+
+  #isMetal(block: Block): boolean {
+    const least = this.#plan.policy.metalOverTextileKg;
+    return block.holderKinds.length > 0 || block.items.some((item) => item.metalMassKg >= least);
+  }
+
+  #add(deck: Deck, block: Block, x: number, y: number): void {
+    const { random } = this.#plan;
+    const put = block.put(deck.shelf.id, x, y);
+    deck.add(block, x, y);
+    this.#massKg += massOf(block);
+    this.#counts.set(deck.shelf.id, this.countOn(deck.shelf) + put.packages.length);
+    this.holders.push(...put.holders.map((one) => loadHolder(one, deck.shelf.id)));
+    this.packages.push(...put.packages.map((one) => loadPackage(one, random)));
+  }
+}
+
+function isTextile(block: Block): boolean {
+  return block.items.some((item) => item.kind === 'textile-pack');
+}
+
+function within(value: number, least: number, greatest: number): number {
+  return Math.max(least, Math.min(value, Math.floor(greatest)));
+}
+
+function loadHolder(one: PutHolder, shelfId: string): LoadHolder {
+  return { ...one, name: one.holderId, placeCode: `code ${one.holderId}`, shelfId };
+}
+
+export function loadPackage({ packageId, item, placement }: PutPackage, random: Random): LoadPackage {
+  return {
+    packageId,
+    code: `label ${packageId}`,
+    itemId: item.id,
+    isScanned: true,
+    placement,
+    state: 'in-load',
+    heldReason: null,
+    expiresOn: random.pick([null, null, '2026-03-11', '2026-09-01', '2027-01-31']),
+    hasExternalIndicator: true,
+    hasInternalIndicator: true,
+  };
+}
