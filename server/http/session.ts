@@ -232,12 +232,14 @@ function responseOf(request: Request) {
   return request.res;
 }
 
-/**
- * Some acts ask for more than a badge and six digits: OWASP ASVS 5.0, 7.5.3.
- * @throws NotAllowed when the person came in by badge
- */
+/** Some acts ask for more than a badge and six digits: OWASP ASVS 5.0, 7.5.3. */
+export function isPasswordSignIn(request: Request): boolean {
+  return signInOf(request)?.by === 'password';
+}
+
+/** @throws NotAllowed when the person came in by badge */
 export function requirePasswordSignIn(request: Request): void {
-  if (signInOf(request)?.by === 'password') return;
+  if (isPasswordSignIn(request)) return;
   throw new NotAllowed(
     'session.password-needed',
     'This needs a sign-in with your password. Sign in with it and come back.',

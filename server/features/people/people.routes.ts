@@ -1,4 +1,5 @@
 import { idSchema } from '#contract/common';
+import { isPermitted } from '#domain/access/role-matrix';
 import { paths } from '#contract/paths';
 import {
   addPersonRequestSchema,
@@ -14,7 +15,7 @@ import {
 } from '#contract/people';
 import { z } from 'zod';
 import { defineRoute, type Route } from '../../http/define-route';
-import { requirePasswordSignIn } from '../../http/session';
+import { isPasswordSignIn, requirePasswordSignIn } from '../../http/session';
 import { addPerson, joinPerson } from './add-person';
 import { changePerson } from './change-person';
 import { listPeople } from './people-read-model';
@@ -31,8 +32,13 @@ export const peopleRoutes: readonly Route[] = [
     permission: 'people.view',
     query: peopleQuerySchema,
     response: peopleResponseSchema,
-    handle: async ({ services, actor, query }) => ({
-      people: await listPeople(services.db, actor, query, services.clock.now()),
+    handle: async ({ services, actor, query, request }) => ({
+      people: await listPeople(services.db, actor, {
+        query,
+        now: services.clock.now(),
+        // A badge is half of a key, and the PIN of who came in by one may have been watched.
+        mayShowBadges: isPermitted(actor.role, 'people.edit') && isPasswordSignIn(request),
+      }),
     }),
   }),
   defineRoute({
@@ -77,7 +83,10 @@ export const peopleRoutes: readonly Route[] = [
     permission: 'people.edit',
     params: personParams,
     response: 'file',
-    handle: ({ services, actor, params }) => printBadge(services, actor, params.personId),
+    handle: ({ services, actor, params, request }) => {
+      requirePasswordSignIn(request);
+      return printBadge(services, actor, params.personId);
+    },
   }),
   defineRoute({
     method: 'post',

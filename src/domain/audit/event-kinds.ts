@@ -11,6 +11,7 @@ export type AuditPayloads = {
   'person.changed': { readonly before: unknown; readonly after: unknown };
   'person.password-reset': { readonly expiresAt: string };
   'person.pin-reset': Record<string, never>;
+  'person.badge-printed': Record<string, never>;
   'item.added': { readonly code: string };
   'item.changed': { readonly before: unknown; readonly after: unknown };
   'items.imported': { readonly added: number; readonly changed: number; readonly refused: number };

@@ -312,6 +312,12 @@ describe('badge, PIN and sign-in', () => {
     expect(link).toHaveAttribute('href', `${hana}/badge`);
   });
 
+  it('says why the code of a badge is not shown after a sign-in by badge', async () => {
+    open(`/people?person=${aPerson().id}`, 'administrator', [aPerson({ badgeCode: null })]);
+    const panel = await screen.findByRole('region', { name: 'Hana Strudwick' });
+    expect(within(panel).getByText(/to who signed in with a password/)).toBeVisible();
+  });
+
   it('a clash with somebody else’s change is told, and asks for another look', async () => {
     const { user } = open();
     await table();

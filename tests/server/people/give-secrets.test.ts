@@ -161,6 +161,28 @@ describe('a printed badge', () => {
     expect((reply.body as Buffer).subarray(0, 5).toString()).toBe('%PDF-');
   });
 
+  test('is told in the history each time, with who printed it and without its code', async () => {
+    const person = await aTechnician();
+    const administrator = await app.as('administrator');
+    for (let print = 0; print < 2; print += 1) await administrator.get(`/api/people/${person.id}/badge`).expect(200);
+    const events = await eventsAbout(app.db, person.id);
+    expect(events.map(({ kind, actor_id, facility_id, payload }) => [kind, actor_id, facility_id, payload])).toEqual(
+      [0, 1].map(() => ['person.badge-printed', app.person('administrator').id, app.facilities.A, {}]),
+    );
+  });
+
+  test('needs a sign-in with the password', async () => {
+    const person = await aTechnician();
+    const agent = app.anyone();
+    await agent
+      .post('/api/session/badge')
+      .send({ badge: app.person('administrator').badge, pin: testPin })
+      .expect(200);
+    const reply = await agent.get(`/api/people/${person.id}/badge`).expect(403);
+    expect(reply.body).toMatchObject({ code: 'session.password-needed' });
+    expect(await eventsAbout(app.db, person.id)).toEqual([]);
+  });
+
   test('is nobody else’s to have', async () => {
     const person = await aTechnician();
     for (const role of ['technician', 'lead', 'supervisor', 'surveyor'] as const) {

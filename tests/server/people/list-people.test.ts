@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 import type { Person } from '../../../src/contract/people';
 import { roles, type Role } from '../../../src/domain/access/permissions';
-import { addTestPerson, openTestApp } from '../../support/test-app';
+import { addTestPerson, openTestApp, testPin } from '../../support/test-app';
 
 const app = openTestApp();
 
@@ -41,6 +41,18 @@ test('shows nobody’s hash to anybody, and a badge code only to who gives badge
     expect(people.every(({ hasBadge }) => hasBadge)).toBe(true);
   }
   expect(JSON.stringify(await listed(''))).not.toMatch(/argon2|hash/);
+});
+
+test('shows no badge code after a sign-in by badge: half of the key would lead to all the others', async () => {
+  const agent = app.anyone();
+  await agent
+    .post('/api/session/badge')
+    .send({ badge: app.person('administrator').badge, pin: testPin })
+    .expect(200);
+  const reply = await agent.get('/api/people').expect(200);
+  const { people } = reply.body as { people: Person[] };
+  expect(people.length).toBeGreaterThan(1);
+  expect(people.map(({ hasBadge, badgeCode }) => [hasBadge, badgeCode])).toEqual(people.map(() => [true, null]));
 });
 
 test('finds by part of name, initials or staff number, in any capitals', async () => {

@@ -60,6 +60,11 @@ export function PersonPanel({ person, onClose, onShown }: PersonPanelProps) {
               <Code>{person.badgeCode}</Code>
             </>
           )}
+          {person.hasBadge && person.badgeCode === null && mayEdit && (
+            <span className="block text-small font-normal text-ink-2">
+              Its code is shown, and the badge printed, to who signed in with a password.
+            </span>
+          )}
         </Fact>
         {person.worksElsewhere && <Fact name="Also at">another facility</Fact>}
       </dl>
