@@ -10,9 +10,10 @@ import type { Transaction } from '../../platform/db';
 import { Conflict, InvalidInput, RuleRefused } from '../../platform/errors';
 import { hashSecret, isSecretOf } from '../../platform/secret-hash';
 import { endSessionsOf } from '../../platform/sessions';
-import { noteSuccess, sourceOf, subjectOf, takeTry } from '../../platform/sign-in-tries';
+import { noteSuccess, sourceOf, subjectOf } from '../../platform/sign-in-tries';
 import { getSession } from './session-read-model';
 import { getCredentials, lockCredentials, setPassword, setPin, type Credentials } from './sign-in-store';
+import { takeSignInTry } from './take-sign-in-try';
 
 /**
  * A person's own new password. It ends every other session of theirs and puts this one under a new id.
@@ -91,9 +92,11 @@ async function requireOwnPassword(
   { password, pointer }: { readonly password: string; readonly pointer: string },
 ): Promise<Credentials> {
   const person = await getCredentials(services.db, actor.personId);
-  const tryId = await takeTry(services, {
+  const tryId = await takeSignInTry(services, {
+    by: 'password',
     subject: subjectOf('staff-number', person.staffNumber),
     source: sourceOf(request.ip),
+    findPerson: () => Promise.resolve(person),
   });
   if (!(await isSecretOf(person.passwordHash, password))) {
     refuseSecret('password.current-wrong', 'This is not your present password.', pointer);

@@ -6,6 +6,7 @@ import { isSecretOf } from '../../platform/secret-hash';
 import { sweepSessions } from '../../platform/sessions';
 import { noteSuccess } from '../../platform/sign-in-tries';
 import { listFacilityIds, type Credentials } from './sign-in-store';
+import { noteRefusedSignIn } from './take-sign-in-try';
 
 type Attempt = {
   readonly by: 'password' | 'badge';
@@ -36,15 +37,7 @@ export async function judgeSignIn(services: Services, attempt: Attempt): Promise
   const now = clock.now();
 
   async function refused(reason: string, code: string, words: string): Promise<NotSignedIn> {
-    await appendEvent(db, {
-      kind: 'person.sign-in-refused',
-      at: now,
-      facilityId: person ? ((await listFacilityIds(db, person.personId, now))[0] ?? null) : null,
-      actorId: null,
-      subjectKind: 'person',
-      subjectId: person?.personId ?? 'unknown',
-      payload: { by, reason },
-    });
+    await noteRefusedSignIn(services, { by, person, reason }, now);
     return new NotSignedIn(code, words);
   }
 

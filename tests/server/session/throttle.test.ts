@@ -1,6 +1,7 @@
 import { beforeEach, expect, test } from 'vitest';
 import type TestAgent from 'supertest/lib/agent';
 import { addTestPerson, openTestApp, testPassword, testPin } from '../../support/test-app';
+import { eventsAbout } from './session-support';
 
 const app = openTestApp();
 const wrongPassword = 'lantern gravel thirty badgers';
@@ -190,6 +191,46 @@ test('stops at a hundred failures in a row, until a new one-time password is giv
     .expect(200);
   const { oneTimePassword } = given.body as { oneTimePassword: string };
   await tryPassword(app.anyone(), person.staffNumber, oneTimePassword).expect(200);
+});
+
+test('tells in the history that tries had to wait, once a minute however many there are, and in the right name', async () => {
+  const person = await addTestPerson(app, { role: 'lead', facilityId: app.facilities.A });
+  const agent = app.anyone();
+  const told = async () =>
+    (await eventsAbout(app.db, person.id))
+      .filter(({ kind }) => kind === 'person.sign-in-refused')
+      .map(({ payload, facility_id }) => ({ ...(payload as { by: string; reason: string }), facility_id }));
+  for (let failure = 0; failure < 5; failure += 1) await tryPassword(agent, person.staffNumber).expect(401);
+  expect((await told()).map(({ reason }) => reason)).toEqual(Array(5).fill('wrong-secret'));
+
+  for (let held = 0; held < 4; held += 1) await tryPassword(agent, person.staffNumber, testPassword).expect(429);
+  expect((await told()).slice(5)).toEqual([
+    { by: 'password', reason: 'too-many-tries', facility_id: app.facilities.A },
+  ]);
+
+  app.clock.advance({ seconds: 30 });
+  await tryPassword(agent, person.staffNumber).expect(401);
+  await tryPassword(agent, person.staffNumber).expect(429);
+  expect((await told()).map(({ reason }) => reason).slice(5)).toEqual([
+    'too-many-tries',
+    'wrong-secret',
+    'too-many-tries',
+  ]);
+
+  for (let failure = 0; failure < 5; failure += 1) {
+    await agent.post('/api/session/badge').send({ badge: person.badge, pin: '111111' }).expect(401);
+  }
+  await agent.post('/api/session/badge').send({ badge: person.badge, pin: testPin }).expect(429);
+  expect((await told()).at(-1)).toMatchObject({ by: 'badge', reason: 'too-many-tries' });
+});
+
+test('tells tries for nobody’s number that had to wait without that number', async () => {
+  const agent = app.anyone();
+  for (let failure = 0; failure < 5; failure += 1) await tryPassword(agent, 'Z8888').expect(401);
+  await tryPassword(agent, 'Z8888').expect(429);
+  const last = (await eventsAbout(app.db, 'unknown')).at(-1);
+  expect(last).toMatchObject({ kind: 'person.sign-in-refused', facility_id: null, actor_id: null });
+  expect(last?.payload).toEqual({ by: 'password', reason: 'too-many-tries' });
 });
 
 test('keeps what failed before a success only as long as the address it came from is counted', async () => {
