@@ -1,5 +1,6 @@
 import type { Knex } from 'knex';
 import * as createFirstTables from './20261201090000_create_first_tables';
+import * as addPolicyVersions from './20261201180000_add_policy_versions';
 
 /**
  * Every migration, oldest first. A static list and names without extension, since Knex stores the names: the same
@@ -7,6 +8,7 @@ import * as createFirstTables from './20261201090000_create_first_tables';
  */
 const migrations: Readonly<Record<string, Knex.Migration>> = {
   '20261201090000_create_first_tables': createFirstTables,
+  '20261201180000_add_policy_versions': addPolicyVersions,
 };
 
 export const migrationSource: Knex.MigrationSource<string> = {

@@ -1,6 +1,5 @@
 import type { Knex } from 'knex';
 import { defaultLoadNumberPattern } from '../src/domain/label/load-number';
-import { defaultPolicy } from '../src/domain/load/policy';
 
 /* Two invented facilities, so that it shows that neither sees anything of the other. */
 
@@ -9,11 +8,8 @@ export const hospitalId = '0198a000-0000-7000-8000-000000000001';
 /** Quenby Vale Surgery Center. */
 export const surgeryCenterId = '0198a000-0000-7000-8000-000000000002';
 
-const hospitalPolicyId = '0198a000-0000-7000-8000-000000000011';
-const surgeryCenterPolicyId = '0198a000-0000-7000-8000-000000000012';
-
 /** Days before the demonstration's today on which both were set up. */
-const setUpDaysAgo = 60;
+export const setUpDaysAgo = 60;
 
 export async function seedFacilities(trx: Knex.Transaction, now: Date): Promise<void> {
   const setUpAt = new Date(now.getTime() - setUpDaysAgo * 24 * 3_600_000);
@@ -44,18 +40,4 @@ export async function seedFacilities(trx: Knex.Transaction, now: Date): Promise<
       created_at: setUpAt,
     },
   ]);
-  await trx('policies').insert(
-    [
-      { id: hospitalPolicyId, facilityId: hospitalId },
-      { id: surgeryCenterPolicyId, facilityId: surgeryCenterId },
-    ].map(({ id, facilityId }) => ({
-      id,
-      facility_id: facilityId,
-      number: 1,
-      settings: JSON.stringify(defaultPolicy),
-      reason: 'The settings Paperside begins with.',
-      effective_at: setUpAt,
-      created_at: setUpAt,
-    })),
-  );
 }

@@ -4,6 +4,7 @@ import { seedEquipment, seedMorningTests, seedSurgeryCenterEquipment } from './d
 import { hospitalId, seedFacilities, surgeryCenterId } from './demonstration-facilities';
 import { seedPackages } from './demonstration-packages';
 import { demonstrationPersonId, seedPeople } from './demonstration-people';
+import { seedPolicies } from './demonstration-policies';
 
 /** What a surgery center of a few cases a day packs. */
 const surgeryCenterCodes = [
@@ -30,6 +31,7 @@ export async function seedDemonstration(db: Knex, now: Date): Promise<void> {
     await seedCatalogue(trx, { facilityId: surgeryCenterId, codes: surgeryCenterCodes });
     await seedEquipment(trx, { facilityId: hospitalId });
     await seedSurgeryCenterEquipment(trx, { facilityId: surgeryCenterId });
+    await seedPolicies(trx, now);
     await seedMorningTests(trx, { facilityId: hospitalId, now, readBy: demonstrationPersonId('LM') });
     await seedPackages(trx, now);
   });

@@ -1,6 +1,7 @@
 import { loadStates } from '#domain/load/state-machine';
 import { z } from 'zod';
 import { idSchema, instantSchema, reasonSchema, requestIdSchema } from './common';
+import { keptFindingSchema } from './judged-again';
 import {
   acceptanceSchema,
   cartViewSchema,
@@ -67,8 +68,8 @@ export const loadDetailSchema = z.object({
   undoable: z.string().nullable(),
   /** Packages with a live load sticker. */
   stickers: z.array(z.object({ packageId: idSchema, stickerId: idSchema, copy: z.number().int() })),
-  /** Of a closed load: digest of its contents and the rule set it was judged by. */
-  closing: z.object({ digest: z.string(), ruleSet: z.string() }).nullable(),
+  /** Of a closed load: digest of its contents, the rule set it was judged by, and what that found. */
+  closing: z.object({ digest: z.string(), ruleSet: z.string(), findings: z.array(keptFindingSchema) }).nullable(),
   version: z.number().int(),
 });
 export type LoadDetail = z.infer<typeof loadDetailSchema>;

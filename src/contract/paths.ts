@@ -30,5 +30,9 @@ export const paths = {
   run: (runId: string) => `/api/runs/${runId}`,
   loads: '/api/loads',
   today: '/api/today',
+  policies: '/api/policies',
+  policyProposals: '/api/policy-proposals',
+  policyProposal: (proposalId: string) => `/api/policy-proposals/${proposalId}`,
   load: (loadId: string) => `/api/loads/${loadId}`,
+  loadJudgedAgain: (loadId: string) => `/api/loads/${loadId}/judged-again`,
 } as const;

@@ -1,39 +1,44 @@
-import { policyParameters, type LoadPolicy, type QuantityParameter } from '#domain/load/policy';
-import type { Quantity } from '#domain/units/quantity';
+import { policyParameters, type FacingRule, type LoadPolicy, type PolicyParameter } from '#domain/load/policy';
+import { facingRules } from '#domain/policy/settings';
 import { z } from 'zod';
+import { idSchema } from './common';
 
-function rangeOf(id: QuantityParameter['id']): QuantityParameter['range'] {
-  const parameter = policyParameters.find((candidate) => candidate.id === id);
-  if (parameter?.form !== 'quantity') throw new Error(`No range is known for ${id}`);
-  return parameter.range;
+/* Made from the list of parameters, so that a parameter added there is on the wire, in its range, without a line here. */
+
+const unitSigns: Readonly<Record<string, string>> = { degC: ' °C', deg: '°', count: '' };
+
+function withUnit(value: number, unit: string): string {
+  return `${value}${unitSigns[unit] ?? ` ${unit}`}`;
 }
 
-function setting<Unit extends string>(id: QuantityParameter['id'], _unit: Unit) {
-  const { least, greatest } = rangeOf(id);
-  return z
-    .number()
-    .min(least, `At least ${least}.`)
-    .max(greatest, `At most ${greatest}.`)
-    .transform((value) => value as Quantity<Unit>);
+function valueSchema(parameter: PolicyParameter): z.ZodType<number | string> {
+  switch (parameter.form) {
+    case 'quantity': {
+      const { range, unit } = parameter;
+      return z
+        .number({ error: 'Please write a number.' })
+        .min(range.least, `At least ${withUnit(range.least, unit)}.`)
+        .max(range.greatest, `At most ${withUnit(range.greatest, unit)}.`);
+    }
+    case 'choice':
+      return z.enum(parameter.choices.map((choice) => choice.value));
+  }
 }
 
-export const loadPolicySchema: z.ZodType<LoadPolicy> = z.strictObject({
-  facing: z.enum(['one-way', 'alternating', 'not-set']),
-  challengeDevice: z.enum(['not-asked', 'implant-loads', 'every-load']),
-  challengeDeviceMissing: z.enum(['stop', 'accept', 'advice']),
-  challengeDeviceReachMm: setting('challengeDeviceReachMm', 'mm'),
-  pouchGapMm: setting('pouchGapMm', 'mm'),
-  greatestLeanDeg: setting('greatestLeanDeg', 'deg'),
-  labelReadingGapMm: setting('labelReadingGapMm', 'mm'),
-  packageClearanceMm: setting('packageClearanceMm', 'mm'),
-  wallClearanceMm: setting('wallClearanceMm', 'mm'),
-  headroomMm: setting('headroomMm', 'mm'),
-  greatestShelfCoverPercent: setting('greatestShelfCoverPercent', '%'),
-  greatestSetMassKg: setting('greatestSetMassKg', 'kg'),
-  greatestTextilePackMassKg: setting('greatestTextilePackMassKg', 'kg'),
-  greatestPouchMassKg: setting('greatestPouchMassKg', 'kg'),
-  massMarginPercent: setting('massMarginPercent', '%'),
-  metalOverTextileKg: setting('metalOverTextileKg', 'kg'),
-  waterPerDryMinute: setting('waterPerDryMinute', 'kg/min'),
-  startTemperatureC: setting('startTemperatureC', 'degC'),
-});
+const values = Object.fromEntries(policyParameters.map((parameter) => [parameter.id, valueSchema(parameter)]));
+
+/** All settings of one policy. */
+export const loadPolicySchema: z.ZodType<LoadPolicy> = z
+  .strictObject(values)
+  // Each value was read by the schema of its own parameter.
+  .transform((policy) => policy as LoadPolicy);
+
+/** Those settings that a person wants otherwise. */
+export const policyChangesSchema: z.ZodType<Partial<LoadPolicy>> = z
+  .strictObject(values)
+  .partial()
+  .transform((changes) => changes as Partial<LoadPolicy>);
+
+export const facingRuleSchema: z.ZodType<FacingRule> = z.enum(facingRules);
+
+export const facingBySterilizerSchema = z.record(idSchema, facingRuleSchema);

@@ -85,6 +85,8 @@ async function close(services: Services, actor: Actor, loadId: string, requestId
         }),
         contents,
         contents_digest: digest,
+        // All of what the rules looked at, so that later rules can look at it again.
+        view_at_close: JSON.stringify(view),
       });
     await stepVersion(trx, load);
     // Until unloading is recorded, a closed load's holders count as free for the next cart.

@@ -6,14 +6,16 @@ import { findLoadSummary } from './load-list-read-model';
 import { getLoad } from './load-store';
 import { readLoadView } from './load-view-read-model';
 import { getUndoable } from './undoable-read-model';
+import { findVerdictAtClose } from './verdict-at-close';
 
 /** One load with everything a station needs to go on building it, read at one moment. */
 export async function getLoadDetail(services: Services, actor: Actor, loadId: string): Promise<LoadDetail> {
   return services.db.transaction(
     async (trx) => {
       const load = await getLoad(trx, actor.facilityId, loadId);
-      const [known, summary, stickers, undoable] = await Promise.all([
+      const [known, closed, summary, stickers, undoable] = await Promise.all([
         readLoadView(trx, load, services.clock.now()),
+        findVerdictAtClose(trx, load.id),
         findLoadSummary(trx, actor.facilityId, loadId),
         trx('load_stickers')
           .where({ load_id: load.id })
@@ -24,7 +26,8 @@ export async function getLoadDetail(services: Services, actor: Actor, loadId: st
       if (!summary) throw new NotFound('load.none', 'There is no such load here.');
       return {
         summary,
-        view: known.view,
+        // A closed load stays as it was, whatever becomes of the catalogue and the equipment.
+        view: closed?.view ?? known.view,
         policy: known.policy,
         policyNumber: known.policyNumber,
         counts: [...known.counts],
@@ -32,8 +35,8 @@ export async function getLoadDetail(services: Services, actor: Actor, loadId: st
         undoable: undoable?.words ?? null,
         stickers: stickers.map((row) => ({ packageId: row.package_id, stickerId: row.id, copy: row.copy })),
         closing:
-          load.contents_digest !== null && load.rule_set !== null
-            ? { digest: load.contents_digest, ruleSet: load.rule_set }
+          closed && load.contents_digest !== null && load.rule_set !== null
+            ? { digest: load.contents_digest, ruleSet: load.rule_set, findings: [...closed.findings] }
             : null,
         version: load.version,
       };

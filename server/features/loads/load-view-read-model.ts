@@ -1,6 +1,6 @@
-import { loadPolicySchema } from '#contract/policy';
 import type { LoadView } from '#domain/load/model';
 import type { LoadPolicy } from '#domain/load/policy';
+import { policyFor } from '#domain/policy/settings';
 import type { Db, Transaction } from '../../platform/db';
 import {
   airRemovalOfDay,
@@ -11,6 +11,7 @@ import {
   sterilizerById,
 } from '../equipment/read-model';
 import { catalogueItems } from '../items/read-model';
+import { policyById } from '../policies/read-model';
 import { facilityDay } from '../../platform/facility-day';
 import {
   listAcceptances,
@@ -50,7 +51,7 @@ export async function readLoadView(db: Db | Transaction, load: LoadRow, at: Date
       holderKinds(db, facilityId),
       listCounts(db, load.id),
       listAcceptances(db, load.id),
-      db('policies').where({ id: load.policy_id }).first<{ number: number; settings: unknown }>('number', 'settings'),
+      policyById(db, load.policy_id),
     ]);
   const [items, airRemoval] = await Promise.all([
     catalogueItems(
@@ -60,14 +61,15 @@ export async function readLoadView(db: Db | Transaction, load: LoadRow, at: Date
     ),
     airRemovalOfDay(db, facilityId, load.sterilizer_id, facility.day),
   ]);
+  const policy = present(policyRow, 'a policy');
   const sterilizer = present(sterilizerRow, 'a sterilizer');
   const cart = present(cartRow, 'a cart');
   // The sterilizer may lose a qualification while a load is being built: then a rule says so.
   const qualified = programs.find((candidate) => candidate.id === load.program_id);
   return {
     load,
-    policy: loadPolicySchema.parse(policyRow.settings),
-    policyNumber: policyRow.number,
+    policy: policyFor(policy.settings, load.sterilizer_id),
+    policyNumber: policy.number,
     counts,
     acceptances,
     view: {

@@ -1,4 +1,5 @@
 import { idSchema } from '#contract/common';
+import { judgedAgainSchema } from '#contract/judged-again';
 import {
   abandonLoadRequestSchema,
   acceptFindingRequestSchema,
@@ -30,6 +31,7 @@ import { countShelf } from './count-shelf';
 import { editLoad } from './edit-load';
 import { getLoadDetail } from './get-load-detail';
 import { getOpeningOptions } from './get-opening-options';
+import { judgeAgain } from './judge-again';
 import { listLoadHistory } from './load-history-read-model';
 import { listLoads } from './load-list-read-model';
 import { getLoad } from './load-store';
@@ -86,6 +88,14 @@ export const loadRoutes = [
       const load = await getLoad(services.db, actor.facilityId, params.loadId);
       return { events: await listLoadHistory(services.db, load.id) };
     },
+  }),
+  defineRoute({
+    method: 'get',
+    path: paths.loadJudgedAgain(':loadId'),
+    permission: 'load.view',
+    params: loadParams,
+    response: judgedAgainSchema,
+    handle: ({ services, actor, params }) => judgeAgain(services, actor, params.loadId),
   }),
   defineRoute({
     method: 'post',

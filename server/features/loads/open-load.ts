@@ -10,6 +10,7 @@ import { Conflict, InvalidInput, NotFound, RuleRefused } from '../../platform/er
 import { once } from '../../platform/once';
 import { cartWithShelves, qualifiedPrograms, sterilizerById } from '../equipment/read-model';
 import { lockPackages, lockRun, packagesOfRun, type RunFacts } from '../packages/read-model';
+import { policyInForce } from '../policies/read-model';
 import { facilityDay, type FacilityDay } from '../../platform/facility-day';
 import { buildingLoadOfCart } from './open-load-read-model';
 
@@ -39,11 +40,7 @@ export async function openLoad(
       { sterilizer: sterilizer.number, day: facility.day, count },
       facility.loadNumberPattern,
     );
-    const policy = await trx('policies')
-      .where({ facility_id: actor.facilityId })
-      .where('effective_at', '<=', at)
-      .orderBy('number', 'desc')
-      .first<{ id: string } | undefined>('id');
+    const policy = await policyInForce(trx, actor.facilityId, facility.day);
     if (!policy) throw new RuleRefused('load.no-policy', 'No policy is in force here yet, so no load can be judged.');
     const loadId = ids.next();
     await trx('loads').insert({

@@ -19,6 +19,8 @@ export const permissions = [
   'people.view',
   'people.edit',
   'policy.view',
+  'policy.propose',
+  'policy.confirm',
   'audit.view',
 ] as const;
 

@@ -1,4 +1,5 @@
 import type { LoadDifference } from '../load/difference';
+import type { SettingChange } from '../policy/setting-change';
 
 /** The closed list of what the history can tell. Past tense; one payload type each, versioned when it changes. */
 export type AuditPayloads = {
@@ -52,6 +53,14 @@ export type AuditPayloads = {
   'load.sticker-voided': { readonly reason: string };
   'load.close-refused': { readonly blocks: readonly string[] };
   'load.closed': { readonly digest: string; readonly ruleSet: string };
+  'policy.change-proposed': {
+    readonly changes: readonly SettingChange[];
+    readonly effectiveOn: string;
+    readonly reason: string;
+  };
+  'policy.change-confirmed': { readonly number: number; readonly effectiveOn: string };
+  'policy.change-withdrawn': { readonly reason: string };
+  'policy.change-refused': { readonly reason: string };
   'load.abandoned': { readonly reason: string };
 };
 

@@ -1,4 +1,4 @@
-import type { FindingPlace, Severity, Source } from '../load/finding';
+import type { FindingPlace, Severity } from '../load/finding';
 
 /** A figure as it was kept: its unit may be one that the rules of today do not use any more. */
 export type KeptFigure = {
@@ -17,7 +17,7 @@ export type KeptFinding = {
   readonly title: string;
   readonly reason: string;
   readonly remedy: string;
-  readonly source: Source;
+  readonly source: { readonly text: string; readonly provenance: string };
   readonly places: readonly FindingPlace[];
   readonly figure: KeptFigure | null;
 };
@@ -88,5 +88,15 @@ function isJudgedAlike({ then, now }: FindingPair): boolean {
   if (then.severity !== now.severity) return false;
   const [was, is] = [then.figure, now.figure];
   if (was === null || is === null) return was === is;
-  return was.measured === is.measured && was.limit === is.limit && was.unit === is.unit && was.want === is.want;
+  return (
+    isSameFigure(was.measured, is.measured) &&
+    isSameFigure(was.limit, is.limit) &&
+    was.unit === is.unit &&
+    was.want === is.want
+  );
+}
+
+/** The last digits of a sum depend on the order of adding up, which is no difference to anybody. */
+function isSameFigure(one: number, other: number): boolean {
+  return Math.abs(one - other) < 1e-6;
 }

@@ -33,12 +33,13 @@ export function takesValue(parameter: PolicyParameter, value: unknown): value is
   }
 }
 
-/** Every facing rule there is, as the parameter offers them. */
-export const facingRules: readonly FacingRule[] = policyParameters.flatMap((parameter) =>
-  parameter.id === 'facing' && parameter.form === 'choice'
-    ? parameter.choices.map((choice) => choice.value as FacingRule)
-    : [],
-);
+/** Every facing rule there is, as the facility's own parameter offers them. */
+export const facingRules: readonly FacingRule[] = choicesOf('facing').map((choice) => choice.value as FacingRule);
+
+function choicesOf(id: ParameterId): readonly { readonly value: string; readonly label: string }[] {
+  const parameter = findParameter(id);
+  return parameter?.form === 'choice' ? parameter.choices : [];
+}
 
 function isRecord(value: unknown): value is Readonly<Record<string, unknown>> {
   return typeof value === 'object' && value !== null && !Array.isArray(value);

@@ -47,6 +47,7 @@ const acts: readonly {
   },
   { method: 'get', path: (id) => `/api/loads/${id}`, may: onlookers },
   { method: 'get', path: (id) => `/api/loads/${id}/history`, may: onlookers },
+  { method: 'get', path: () => `/api/loads/${anId()}/judged-again`, may: onlookers },
   {
     method: 'post',
     path: (id) => `/api/loads/${id}/scans`,

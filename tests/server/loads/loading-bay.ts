@@ -46,6 +46,7 @@ export async function openLoadingBay(app: TestApp, facility: FacilityLetter = 'A
     settings: JSON.stringify(defaultPolicy),
     reason: 'As delivered',
     effective_at: new Date(now.getTime() - 86_400_000),
+    effective_on: '2026-03-02',
     created_at: now,
   });
   const program = (code: string) => ({

@@ -109,6 +109,7 @@ async function policyId(): Promise<string> {
     settings: '{}',
     reason: 'First',
     effective_at: '2026-01-01T00:00:00Z',
+    effective_on: '2026-01-01',
     created_at: '2026-01-01T00:00:00Z',
   });
   return id;
