@@ -34,21 +34,39 @@ export async function closeLoad(services: Services, actor: Actor, loadId: string
   try {
     return await close(services, actor, loadId, requestId);
   } catch (error) {
-    if (error instanceof CloseRefused) {
-      await appendEvent(services.db, {
-        kind: 'load.close-refused',
-        at: services.clock.now(),
-        facilityId: actor.facilityId,
-        actorId: actor.personId,
-        subjectKind: 'load',
-        subjectId: loadId,
-        loadId,
-        requestId,
-        payload: { blocks: error.blocks },
-      });
-    }
+    if (error instanceof CloseRefused) await tellRefused(services, actor, { loadId, requestId, blocks: error.blocks });
     throw error;
   }
+}
+
+/** Once for each request, however often it is repeated, also when two repeats come at one moment. */
+function tellRefused(
+  { db, clock }: Services,
+  actor: Actor,
+  {
+    loadId,
+    requestId,
+    blocks,
+  }: { readonly loadId: string; readonly requestId: string; readonly blocks: readonly string[] },
+): Promise<void> {
+  return db.transaction(async (trx) => {
+    await trx.raw('select pg_advisory_xact_lock(hashtextextended(?, 3))', [requestId]);
+    const told = await trx('audit_events')
+      .where({ load_id: loadId, request_id: requestId, kind: 'load.close-refused' })
+      .first<{ id: number } | undefined>('id');
+    if (told) return;
+    await appendEvent(trx, {
+      kind: 'load.close-refused',
+      at: clock.now(),
+      facilityId: actor.facilityId,
+      actorId: actor.personId,
+      subjectKind: 'load',
+      subjectId: loadId,
+      loadId,
+      requestId,
+      payload: { blocks },
+    });
+  });
 }
 
 async function close(services: Services, actor: Actor, loadId: string, requestId: string): Promise<Closing> {

@@ -80,6 +80,19 @@ describe('closing a load', () => {
     await giveUp(app, loadId);
   });
 
+  it('tells a refusal once in the history, however often the same request is repeated, also at one moment', async () => {
+    const { technician, loadId } = await readyLoad();
+    const requestId = anId();
+    const ask = () => technician.post(`/api/loads/${loadId}/close`).send({ requestId });
+    const replies = [await ask(), ...(await Promise.all([ask(), ask(), ask()]))];
+    expect(replies.map((reply) => problemOf(reply.body).code)).toEqual(Array(4).fill('load.close-refused'));
+    const told = () => app.db('audit_events').where({ load_id: loadId, kind: 'load.close-refused' });
+    expect(await told()).toHaveLength(1);
+    await technician.post(`/api/loads/${loadId}/close`).send({ requestId: anId() });
+    expect(await told()).toHaveLength(2);
+    await giveUp(app, loadId);
+  });
+
   it('keeps who, when, rule set, findings, counts and a digest that anybody can compute again', async () => {
     const { technician, loadId, packages } = await readyLoad();
     const { full, empty } = await shelfOfRack(loadId);
