@@ -1,6 +1,8 @@
 import type { Knex } from 'knex';
 import * as createFirstTables from './20261201090000_create_first_tables';
 import * as addPolicyVersions from './20261201180000_add_policy_versions';
+import * as addFinishedLessons from './20261201190000_add_finished_lessons';
+import * as addFacingToItems from './20261201200000_add_facing_to_items';
 
 /**
  * Every migration, oldest first. A static list and names without extension, since Knex stores the names: the same
@@ -9,6 +11,8 @@ import * as addPolicyVersions from './20261201180000_add_policy_versions';
 const migrations: Readonly<Record<string, Knex.Migration>> = {
   '20261201090000_create_first_tables': createFirstTables,
   '20261201180000_add_policy_versions': addPolicyVersions,
+  '20261201190000_add_finished_lessons': addFinishedLessons,
+  '20261201200000_add_facing_to_items': addFacingToItems,
 };
 
 export const migrationSource: Knex.MigrationSource<string> = {

@@ -94,6 +94,7 @@ function item(
     filterZones: [],
     cycleNeeds: [wrappedCycle(20)],
     preferredHolder: null,
+    facing: null,
     massLimitKg: null,
     coolS: seconds(1_800),
     expiryRule: 'event-related',

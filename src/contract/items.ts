@@ -1,5 +1,5 @@
 import { cycleTypes } from '#domain/catalogue/cycle-need-text';
-import { expiryRules, itemKinds, metals, packagings, poses } from '#domain/catalogue/item-fields';
+import { expiryRules, itemKinds, metals, packagings, poses, pouchFacings } from '#domain/catalogue/item-fields';
 import { z } from 'zod';
 import {
   codeSchema,
@@ -61,6 +61,7 @@ export const itemFieldsSchema = z.strictObject({
   filterZones: z.array(itemFilterZoneSchema).max(8, 'At most 8 filters.'),
   cycleNeeds: z.array(itemCycleNeedSchema).max(12, 'At most 12 cycles.'),
   preferredHolder: codeSchema.nullable(),
+  facing: oneOf(pouchFacings).nullable(),
   massLimitKg: statedMassSchema.nullable(),
   coolS: statedDurationSchema,
   expiryRule: oneOf(expiryRules),

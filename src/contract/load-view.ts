@@ -97,6 +97,7 @@ export const catalogueItemSchema: z.ZodType<CatalogueItem> = z.object({
   filterZones: z.array(filterZoneSchema),
   cycleNeeds: z.array(cycleNeedSchema),
   preferredHolder: z.string().nullable(),
+  facing: z.enum(['one-way', 'alternating']).nullable(),
   massLimitKg: massSchema.nullable(),
   ifuReference: z.string().nullable(),
   isRetired: z.boolean(),

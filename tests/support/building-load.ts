@@ -128,6 +128,7 @@ export function anItem(changes: Partial<CatalogueItem> & { readonly code: string
       },
     ],
     preferredHolder: null,
+    facing: null,
     massLimitKg: null,
     ifuReference: 'IFU-1',
     isRetired: false,

@@ -53,6 +53,7 @@ export function anItem(
     filterZones: [],
     cycleNeeds: [dynamic(20)],
     preferredHolder: null,
+    facing: null,
     massLimitKg: null,
     ifuReference: `IFU ${code}`,
     isRetired: false,

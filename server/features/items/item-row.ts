@@ -1,5 +1,5 @@
 import type { ItemFields } from '#domain/catalogue/item-fields';
-import type { CatalogueItem } from '#domain/load/model';
+import type { CatalogueItem, PouchFacing } from '#domain/load/model';
 import { kg, mm, seconds } from '#domain/units/quantity';
 import { cycleNeedSchema, filterZoneSchema } from '#contract/load-view';
 import { z } from 'zod';
@@ -27,6 +27,7 @@ export type ItemRow = {
   readonly filter_zones: unknown;
   readonly cycle_needs: unknown;
   readonly preferred_holder: string | null;
+  readonly facing: PouchFacing | null;
   readonly mass_limit_kg: number | null;
   readonly ifu_reference: string | null;
   readonly is_retired: boolean;
@@ -70,6 +71,7 @@ export function catalogueItemFromRow(row: ItemRow): CatalogueItem {
     filterZones: filterZonesSchema.parse(row.filter_zones),
     cycleNeeds: cycleNeedsSchema.parse(row.cycle_needs),
     preferredHolder: row.preferred_holder,
+    facing: row.facing,
     massLimitKg: row.mass_limit_kg === null ? null : kg(row.mass_limit_kg),
     ifuReference: row.ifu_reference,
     isRetired: row.is_retired,
@@ -112,6 +114,7 @@ export function itemRowFrom(fields: ItemFields) {
     filter_zones: JSON.stringify(fields.filterZones),
     cycle_needs: JSON.stringify(fields.cycleNeeds),
     preferred_holder: fields.preferredHolder,
+    facing: fields.facing,
     mass_limit_kg: fields.massLimitKg,
     cool_s: fields.coolS,
     expiry_rule: fields.expiryRule,

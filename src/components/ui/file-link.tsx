@@ -55,9 +55,11 @@ export function FileLink({ to, how, children, kind = 'film', size = 'normal', ic
         {icon && <Icon name={isWaiting ? 'wait' : icon} size={size === 'small' ? 18 : 20} />}
         {children}
       </a>
-      <span role="alert" className={refusal === null ? 'sr-only' : 'max-w-96 text-row font-semibold text-madder-3'}>
-        {refusal}
-      </span>
+      {refusal !== null && (
+        <span role="alert" className="max-w-96 text-row font-semibold text-madder-3">
+          {refusal}
+        </span>
+      )}
     </span>
   );
 }

@@ -94,6 +94,9 @@ function checkReferences(item: ItemFields): FieldProblem[] {
   if (item.preferredHolder !== null && item.kind !== 'pouch') {
     problems.push({ field: 'preferredHolder', sentence: 'Only a pouch stands in a holder.' });
   }
+  if (item.facing !== null && item.kind !== 'pouch') {
+    problems.push({ field: 'facing', sentence: 'Only a pouch has a paper side that faces somewhere.' });
+  }
   if (item.pose === 'tilted' && item.kind === 'pouch') {
     problems.push({ field: 'pose', sentence: 'A pouch stands on edge or lies flat.' });
   }

@@ -71,6 +71,13 @@ export function choiceColumn<Choice extends string>(about: About, choices: reado
   };
 }
 
+export function choiceOrNothingColumn<Choice extends string>(
+  about: About,
+  choices: readonly Choice[],
+): Column<Choice | null> {
+  return { ...choiceColumn(about, choices), write: (value) => value ?? '', whenEmpty: null };
+}
+
 /** Codes separated by spaces. */
 export function codesColumn(about: About): Column<readonly string[]> {
   return {

@@ -1,6 +1,7 @@
 import { kg, mm, seconds } from '../units/quantity';
 import {
   choiceColumn,
+  choiceOrNothingColumn,
   codesColumn,
   numberColumn,
   numberOrNothingColumn,
@@ -11,7 +12,7 @@ import {
 } from './csv-column';
 import { readCycleNeeds, writeCycleNeeds } from './cycle-need-text';
 import { readFilterZones, writeFilterZones } from './filter-zone-text';
-import { expiryRules, itemKinds, metals, packagings, poses, type ItemFields } from './item-fields';
+import { expiryRules, itemKinds, metals, packagings, poses, pouchFacings, type ItemFields } from './item-fields';
 
 const cooling = numberColumn(
   { name: 'cooling_min', about: 'Minutes to cool before it is touched. Empty: 30.', example: '60' },
@@ -98,6 +99,14 @@ export const itemColumns: ColumnSet<ItemFields> = {
     about: 'Code of the kind of holder a pouch belongs in. Empty: none.',
     example: '',
   }),
+  facing: choiceOrNothingColumn(
+    {
+      name: 'facing',
+      about: 'What the instructions of a pouch ask for: one-way or alternating. Empty: they do not say.',
+      example: '',
+    },
+    pouchFacings,
+  ),
   massLimitKg: numberOrNothingColumn(
     { name: 'mass_limit_kg', about: 'Greatest mass its instructions permit. Empty: they do not say.', example: '11.3' },
     kg,

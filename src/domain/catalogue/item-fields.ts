@@ -34,6 +34,8 @@ export const packagings = [
 
 export const poses = ['flat', 'on-edge', 'tilted'] as const satisfies readonly CatalogueItem['pose'][];
 
+export const pouchFacings = ['one-way', 'alternating'] as const satisfies readonly CatalogueItem['facing'][];
+
 export const metals = ['stainless-steel', 'aluminium', 'titanium'] as const satisfies readonly CatalogueItem['metal'][];
 
 export const expiryRules = ['event-related', 'dated'] as const satisfies readonly ItemFields['expiryRule'][];

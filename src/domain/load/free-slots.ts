@@ -1,6 +1,6 @@
 import type { Body, HolderBody, Layout, Side } from './layout';
 import type { CatalogueItem, HolderKind, PaperSide } from './model';
-import { limitOf, type LoadPolicy } from './policy';
+import { facingRuleOf, limitOf, type LoadPolicy } from './policy';
 import { otherPaper } from './rules/facing-groups';
 import { isUsableRack, misfitsOf } from './rules/holder-fit';
 import { clearanceOf } from './rules/near-pairs';
@@ -31,16 +31,15 @@ export function freeSlots(
 }
 
 /**
- * Where the paper side of a pouch put into a slot should look, by the house rule and by what stands there already: in a
- * one-way house like most others on the shelf, alternating like or unlike the nearest neighbour; left where nothing stands.
+ * Where the paper side of a pouch put into a slot should look, by its instructions or the house rule and by what stands there
+ * already: one way like most others on the shelf, alternating like or unlike the nearest neighbour; left where nothing stands.
  */
 export function paperForSlot(
-  layout: Layout,
+  { layout, item, policy }: { readonly layout: Layout; readonly item: CatalogueItem; readonly policy: LoadPolicy },
   { holder, shelf }: HolderBody,
   slot: number,
-  policy: LoadPolicy,
 ): PaperSide {
-  if (policy.facing === 'alternating') {
+  if (facingRuleOf(item, policy) === 'alternating') {
     const neighbours = insideOf(layout, holder.holderId).flatMap((body) =>
       body.slot !== null && isLeftOrRight(body.placement.paper)
         ? [{ away: Math.abs(body.slot - slot), paper: body.placement.paper }]

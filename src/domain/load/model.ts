@@ -18,6 +18,9 @@ export type Pose = 'flat' | 'on-edge' | 'tilted';
 /** Where a pouch's paper side looks. In a rack: left is towards slot 1. Lying flat: up or down. */
 export type PaperSide = 'left' | 'right' | 'up' | 'down';
 
+/** How pouches face their neighbours. One way: all paper sides look the same way. Alternating: paper faces paper and film faces film. */
+export type PouchFacing = 'one-way' | 'alternating';
+
 /** Quarter turn seen from above: 0 is length away from the door (along y), 90 is length across (along x). */
 export type Turn = 0 | 90;
 
@@ -67,6 +70,8 @@ export type CatalogueItem = {
   readonly cycleNeeds: readonly CycleNeed[];
   /** Code of the holder kind its pouch belongs in. */
   readonly preferredHolder: string | null;
+  /** What the instructions for use of its pouch ask for; null where they are silent, and for everything else. */
+  readonly facing: PouchFacing | null;
   /** From its instructions for use; null where they are silent. */
   readonly massLimitKg: Kilogram | null;
   readonly ifuReference: string | null;

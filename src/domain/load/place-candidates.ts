@@ -80,7 +80,7 @@ function* inSlots({ layout, item, policy }: PlaceSearch, holder: HolderBody): It
       ? 'This is the kind of holder it belongs in.'
       : 'It fits this holder, and none of its own kind has a slot left.';
   for (const slot of freeSlots(layout, holder, item, policy)) {
-    const paper = paperForSlot(layout, holder, slot, policy);
+    const paper = paperForSlot({ layout, item, policy }, holder, slot);
     yield { placement: { at: 'slot', holderId, slot, pose: 'on-edge', paper }, why };
   }
 }

@@ -13,12 +13,12 @@ import {
   type Percent,
 } from '../units/quantity';
 import type { Figure, Severity, Source } from './finding';
+import type { CatalogueItem, PouchFacing } from './model';
 
 /** Changes whenever a rule, a default or a severity changes: a closed load keeps the version it was judged by. */
 export const ruleSetVersion = '2026-12-01.2';
 
-/** One way: all paper sides look the same way. Alternating: paper faces paper and film faces film. */
-export type FacingRule = 'one-way' | 'alternating' | 'not-set';
+export type FacingRule = PouchFacing | 'not-set';
 
 export type ChallengeDeviceRule = 'not-asked' | 'implant-loads' | 'every-load';
 
@@ -295,6 +295,11 @@ export const policyParameters: readonly PolicyParameter[] = [
     source: { text: 'Room temperature, as in the worked figures for condensate.', provenance: 'common-practice' },
   },
 ];
+
+/** How a pouch has to face: as its instructions for use say, else as the facility does. */
+export function facingRuleOf(item: Pick<CatalogueItem, 'facing'>, policy: LoadPolicy): FacingRule {
+  return item.facing ?? policy.facing;
+}
 
 export type Limit = { readonly limit: number; readonly limitFrom: Figure['limitFrom'] };
 

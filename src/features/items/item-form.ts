@@ -35,6 +35,7 @@ export const emptyItem = {
     { type: 'dynamic-air-removal', temperatureC: 132, leastExposureS: 240, greatestExposureS: null, leastDryS: 1_800 },
   ],
   preferredHolder: null,
+  facing: null,
   massLimitKg: null,
   coolS: 1_800,
   expiryRule: 'event-related',

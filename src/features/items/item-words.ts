@@ -1,4 +1,4 @@
-import type { CycleNeed, Metal, Packaging, Pose } from '#domain/load/model';
+import type { CycleNeed, Metal, Packaging, Pose, PouchFacing } from '#domain/load/model';
 import type { UnitSystem } from '../../lib/facility';
 import { formatDuration, formatTemperature } from '../../lib/format';
 
@@ -14,6 +14,11 @@ export const poseWords: Readonly<Record<Pose, string>> = {
   flat: 'Flat',
   'on-edge': 'On edge',
   tilted: 'Tilted to drain',
+};
+
+export const facingWords: Readonly<Record<PouchFacing, string>> = {
+  'one-way': 'All paper sides one way',
+  alternating: 'Paper to paper, film to film',
 };
 
 export const metalWords: Readonly<Record<Metal, string>> = {

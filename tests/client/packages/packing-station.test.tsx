@@ -38,6 +38,7 @@ function anItem(changes: Partial<Item> = {}): Item {
       },
     ],
     preferredHolder: 'RS',
+    facing: null,
     massLimitKg: null,
     coolS: seconds(1800),
     expiryRule: 'event-related',

@@ -51,6 +51,7 @@ describe('an item that does not hold together', () => {
     ['a wrong device identifier', pouch({ deviceIdentifier: '09506000134353' }), 'deviceIdentifier'],
     ['a revision of nothing', pouch({ ifuReference: null }), 'ifuReference'],
     ['a tray in a pouch holder', theItem('W-01', { preferredHolder: 'RM' }), 'preferredHolder'],
+    ['a tray that faces somewhere', theItem('W-01', { facing: 'one-way' }), 'facing'],
     ['a tilted pouch', pouch({ pose: 'tilted' }), 'pose'],
   ])('%s', (_what, item, field) => {
     expect(fieldsOf(item)).toEqual([field]);

@@ -82,9 +82,16 @@ describe('freeSlots', () => {
 });
 
 describe('paperForSlot', () => {
-  const paperIn = (view: LoadView, holderId: string, slot: number, facing: 'one-way' | 'alternating' = 'one-way') => {
+  const paperIn = (
+    view: LoadView,
+    holderId: string,
+    slot: number,
+    facing: 'one-way' | 'alternating' = 'one-way',
+    item = forceps,
+  ) => {
     const { layout, holder } = rackIn(view, holderId);
-    return paperForSlot(layout, holder, slot, { ...defaultPolicy, facing });
+    const search = { layout, item, policy: { ...defaultPolicy, facing } };
+    return paperForSlot(search, holder, slot);
   };
   const aPouchAt = (id: string, holderId: string, slot: number, paper: 'left' | 'right') =>
     aPackage(id, forceps, { placement: inSlot(holderId, slot, paper) });
@@ -92,6 +99,13 @@ describe('paperForSlot', () => {
   it('begins to the left', () => {
     expect(paperIn(withPackages(), 'rs-1', 1)).toBe('left');
     expect(paperIn(withPackages(), 'rs-1', 1, 'alternating')).toBe('left');
+  });
+
+  it('goes by the instructions of the pouch before the house rule', () => {
+    const shy = { ...forceps, facing: 'alternating' } as const;
+    const view = withPackages(aPouchAt('p1', 'rs-1', 1, 'left'));
+    expect(paperIn(view, 'rs-1', 2, 'one-way', shy)).toBe('right');
+    expect(paperIn(view, 'rs-1', 2, 'alternating', { ...forceps, facing: 'one-way' })).toBe('left');
   });
 
   it('goes one way with most others on the shelf, in another rack too', () => {

@@ -487,7 +487,7 @@ describe('the file that goes out', () => {
     const { body } = await preview(text);
     expect(body.code).toBe('file.no-rows');
     const filled = await preview(
-      `${text}W-50,Set,wrapped-tray,wrap,500,260,90,3,2.8,,,,flat,,,,,,${cycles},,,60,,,,,,,,\r\n`,
+      `${text}W-50,Set,wrapped-tray,wrap,500,260,90,3,2.8,,,,flat,,,,,,${cycles},,,,60,,,,,,,,\r\n`,
     );
     expect(filled.body).toMatchObject({ added: 1, refused: 0 });
   });

@@ -25,17 +25,19 @@ const prevacuum: CycleNeed = {
 
 type Measures = readonly [lengthMm: number, widthMm: number, heightMm: number];
 
+/** The code is the name: drawings show the code, and a person at the cart knows the name. */
+export function named(name: string): Pick<CatalogueItem, 'id' | 'code' | 'name'> {
+  return { id: name, code: name, name };
+}
+
 function anItem(
-  code: string,
   name: string,
   kind: ItemKind,
   [lengthMm, widthMm, heightMm]: Measures,
   changes: Partial<CatalogueItem>,
 ): CatalogueItem {
   return {
-    id: code,
-    code,
-    name,
+    ...named(name),
     kind,
     packaging: 'wrap',
     lengthMm: mm(lengthMm),
@@ -54,6 +56,7 @@ function anItem(
     filterZones: [],
     cycleNeeds: [prevacuum],
     preferredHolder: null,
+    facing: null,
     massLimitKg: null,
     ifuReference: 'Teaching card',
     isRetired: false,
@@ -61,8 +64,8 @@ function anItem(
   };
 }
 
-function aPouch(code: string, name: string, measures: Measures, massKg: number): CatalogueItem {
-  return anItem(code, name, 'pouch', measures, {
+function aPouch(name: string, measures: Measures, massKg: number): CatalogueItem {
+  return anItem(name, 'pouch', measures, {
     packaging: 'paper-film-pouch',
     pose: 'on-edge',
     massKg: kg(massKg),
@@ -71,14 +74,14 @@ function aPouch(code: string, name: string, measures: Measures, massKg: number):
   });
 }
 
-export const scissors = aPouch('P1', 'Scissors', [230, 110, 12], 0.12);
-export const forceps = aPouch('P2', 'Forceps', [250, 90, 10], 0.1);
-export const clamps = aPouch('P3', 'Clamps', [240, 100, 22], 0.3);
-export const retractor = aPouch('P4', 'Retractor', [300, 190, 26], 0.4);
-export const boneScrews: CatalogueItem = { ...aPouch('P5', 'Bone screws', [200, 90, 12], 0.2), isImplant: true };
+export const scissors = aPouch('Scissors', [230, 110, 12], 0.12);
+export const forceps = aPouch('Forceps', [250, 90, 10], 0.1);
+export const clamps = aPouch('Clamps', [240, 100, 22], 0.3);
+export const retractor = aPouch('Retractor', [300, 190, 26], 0.4);
+export const boneScrews: CatalogueItem = { ...aPouch('Bone screws', [200, 90, 12], 0.2), isImplant: true };
 
 /** Two filters in its lid, one at each end. */
-export const basicSet = anItem('K1', 'Basic set', 'rigid-container', [420, 260, 130], {
+export const basicSet = anItem('Basic set', 'rigid-container', [420, 260, 130], {
   packaging: 'rigid-container',
   massKg: kg(6.4),
   metalMassKg: kg(5.4),
@@ -88,34 +91,34 @@ export const basicSet = anItem('K1', 'Basic set', 'rigid-container', [420, 260, 
   ],
 });
 
-export const smallTray = anItem('T1', 'Suture tray', 'wrapped-tray', [250, 200, 80], {
+export const smallTray = anItem('Suture tray', 'wrapped-tray', [250, 200, 80], {
   massKg: kg(2.2),
   metalMassKg: kg(2),
-  standsOn: ['K1'],
+  standsOn: ['Basic set'],
 });
 
 /** May stand on its like, up to two high. */
-export const drillTray = anItem('T2', 'Drill tray', 'wrapped-tray', [260, 220, 80], {
+export const drillTray = anItem('Drill tray', 'wrapped-tray', [260, 220, 80], {
   massKg: kg(2.6),
   metalMassKg: kg(2.3),
-  standsOn: ['T2'],
+  standsOn: ['Drill tray'],
   greatestStackHeightMm: mm(170),
 });
 
-export const basin = anItem('B1', 'Basin', 'basin', [300, 260, 90], {
+export const basin = anItem('Basin', 'basin', [300, 260, 90], {
   massKg: kg(0.6),
   metalMassKg: kg(0.6),
   pose: 'tilted',
   isPerforated: false,
 });
 
-export const drapes = anItem('X1', 'Drapes', 'textile-pack', [300, 220, 160], {
+export const drapes = anItem('Drapes', 'textile-pack', [300, 220, 160], {
   massKg: kg(1.1),
   textileMassKg: kg(1.1),
   pose: 'on-edge',
 });
 
-export const challengeDevice = anItem('C1', 'Challenge device', 'challenge-device', [160, 120, 60], {
+export const challengeDevice = anItem('Challenge device', 'challenge-device', [160, 120, 60], {
   massKg: kg(0.4),
 });
 

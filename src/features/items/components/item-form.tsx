@@ -1,6 +1,6 @@
 import type { Item } from '#contract/items';
 import type { ItemFields } from '#domain/catalogue/item-fields';
-import { expiryRules, itemKinds, metals, packagings, poses } from '#domain/catalogue/item-fields';
+import { expiryRules, itemKinds, metals, packagings, poses, pouchFacings } from '#domain/catalogue/item-fields';
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useQuery } from '@tanstack/react-query';
 import { useForm, useWatch } from 'react-hook-form';
@@ -22,7 +22,7 @@ import {
   type ItemFormControl,
   type ItemFormInput,
 } from '../item-form';
-import { capital, metalWords, packagingWords, poseWords } from '../item-words';
+import { capital, facingWords, metalWords, packagingWords, poseWords } from '../item-words';
 import { useAddItem, useChangeItem } from '../mutations';
 import { itemQueries } from '../queries';
 import { CyclesPart } from './cycles-part';
@@ -37,6 +37,10 @@ type ItemFormProps = {
 
 const kindOptions = itemKinds.map((value) => ({ value, label: capital(kindInWords(value)) }));
 const packagingOptions = packagings.map((value) => ({ value, label: packagingWords[value] }));
+const facingOptions = [
+  { value: '', label: 'They do not say' },
+  ...pouchFacings.map((value) => ({ value, label: facingWords[value] })),
+];
 const poseOptions = poses.map((value) => ({ value, label: poseWords[value] }));
 const metalOptions = metals.map((value) => ({ value, label: metalWords[value] }));
 const expiryOptions = expiryRules.map((value) => ({
@@ -161,7 +165,10 @@ function WhatItIs({ form, isNew }: PartProps & { isNew: boolean }) {
             setValue('pose', usual.pose);
             setValue('isPerforated', usual.isPerforated);
             if (kind !== 'rigid-container') setValue('filterZones', []);
-            if (kind !== 'pouch') setValue('preferredHolder', null);
+            if (kind !== 'pouch') {
+              setValue('preferredHolder', null);
+              setValue('facing', null);
+            }
           },
         })}
       />
@@ -243,6 +250,14 @@ function HowItIsLoaded({ form: { control, register, formState } }: PartProps) {
           options={holderOptions}
           error={errors.preferredHolder?.message}
           {...register('preferredHolder', { setValueAs: emptyToNull })}
+        />
+      )}
+      {kind === 'pouch' && (
+        <SelectField
+          label="Its instructions on facing"
+          options={facingOptions}
+          error={errors.facing?.message}
+          {...register('facing', { setValueAs: emptyToNull })}
         />
       )}
       <CodesField control={control} name="standsOn" label="May stand on these codes" />

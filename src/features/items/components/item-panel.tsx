@@ -11,7 +11,7 @@ import { ConfirmDialog } from '../../../components/ui/confirm-dialog';
 import { useFacility } from '../../../lib/facility';
 import { formatDuration, formatLength, formatMass } from '../../../lib/format';
 import { useMay } from '../../../lib/session';
-import { cycleInWords, metalWords, packagingWords, poseWords } from '../item-words';
+import { cycleInWords, metalWords, packagingWords, poseWords, facingWords } from '../item-words';
 import { useChangeItem } from '../mutations';
 import { ItemDrawing } from './item-drawing';
 
@@ -60,6 +60,7 @@ function ItemFacts({ item }: { item: Item }) {
         {item.clearanceMm === null ? 'Not said' : `${formatLength(item.clearanceMm, unitSystem)} on every side`}
       </Fact>
       {item.preferredHolder !== null && <Fact name="Holder">{item.preferredHolder}</Fact>}
+      {item.facing !== null && <Fact name="Facing">{facingWords[item.facing]}</Fact>}
       <Fact name="May stand on">{item.standsOn.length === 0 ? 'Nothing but a shelf' : item.standsOn.join(', ')}</Fact>
       <Fact name="Cycles">
         <ul className="grid gap-1">

@@ -85,8 +85,41 @@ describe('paper to paper and film to film', () => {
     expect(slotsFound(facing(sides), 'alternating')).toEqual(found);
   });
 
+  it('holds for pouches that stand face to face in a basket, and not for those side by side', () => {
+    const basket = aLoad().withHolder('TB-1', 'TB', { x: 20, y: 40 });
+    // P-16 is 10 mm thick, 200 mm long and 75 mm wide, and stands along the basket's 250 mm.
+    const pair = (paper: PaperSide, x: number, y: number) =>
+      basket
+        .withPackage('P-16', inBasket('TB-1', 20, 0, { paper: 'left' }))
+        .withPackage('P-16', inBasket('TB-1', x, y, { paper }));
+    const found = (load: LoadBuilder) => titlesOf('facing', load, { facing: 'alternating' });
+    expect(found(pair('left', 45, 0))).toHaveLength(1);
+    expect(found(pair('right', 45, 0))).toEqual([]);
+    expect(found(pair('left', 45, 205))).toEqual([]);
+  });
+
   it('turns the one that does not alternate', () => {
     expect(fixesOf('facing', facing('LRLL'), { facing: 'alternating' })).toEqual(['Turn it so paper is right']);
+  });
+});
+
+describe('what the instructions of a pouch ask for', () => {
+  const asks = (facing: 'one-way' | 'alternating') => rack.withItemChanged('P-02', { facing });
+
+  it('comes before the house rule, and is named as the source', () => {
+    const oneWay = facing('LLRL', asks('one-way'));
+    expect(slotsFound(oneWay, 'alternating')).toEqual(['3']);
+    expect(slotsFound(oneWay, 'not-set')).toEqual(['3']);
+    const [finding] = findingsOf('facing', oneWay, { facing: 'not-set' });
+    expect(finding?.source).toMatchObject({ provenance: 'ifu' });
+    expect(slotsFound(facing('LRLR', asks('alternating')), 'one-way')).toEqual([]);
+    expect(slotsFound(facing('LLLL', asks('alternating')), 'one-way')).toHaveLength(2);
+  });
+
+  it('says nothing about pouches beside it that are silent', () => {
+    const mixed = facing('LL', asks('alternating')).withPackage('P-16', inSlot('RS-1', 3, 'right'));
+    expect(titlesOf('facing', mixed, { facing: 'one-way' })).toHaveLength(1);
+    expect(titlesOf('facing', mixed, { facing: 'not-set' })).toHaveLength(1);
   });
 });
 
