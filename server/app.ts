@@ -14,6 +14,7 @@ import { itemRoutes } from './features/items/items.routes';
 import { equipmentRoutes } from './features/equipment/equipment.routes';
 import { packageRoutes } from './features/packages/packages.routes';
 import { loadRoutes } from './features/loads/loads.routes';
+import { lessonRoutes } from './features/lessons/lessons.routes';
 import { policyRoutes } from './features/policies/policies.routes';
 
 /** Every route there is. Tests walk this list to see that each names its permission. */
@@ -25,6 +26,7 @@ export const routes: readonly Route[] = [
   ...equipmentRoutes,
   ...packageRoutes,
   ...loadRoutes,
+  ...lessonRoutes,
   ...policyRoutes,
 ];
 

@@ -30,6 +30,8 @@ export const paths = {
   run: (runId: string) => `/api/runs/${runId}`,
   loads: '/api/loads',
   today: '/api/today',
+  lessons: '/api/lessons',
+  finishLesson: (ruleId: string) => `/api/lessons/${ruleId}/finish`,
   policies: '/api/policies',
   policyProposals: '/api/policy-proposals',
   policyProposal: (proposalId: string) => `/api/policy-proposals/${proposalId}`,

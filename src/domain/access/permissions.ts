@@ -8,6 +8,7 @@ export const permissions = [
   'load.abandon',
   'load.print-stickers',
   'air-removal-test.record',
+  'lesson.finish',
   'item.view',
   'item.edit',
   'equipment.view',

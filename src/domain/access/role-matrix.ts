@@ -16,6 +16,7 @@ const building = [
   'load.abandon',
   'load.print-stickers',
   'air-removal-test.record',
+  'lesson.finish',
   'package.pack',
   'package.stage',
   'package.print-labels',

@@ -37,6 +37,12 @@ export type AuditPayloads = {
     readonly result: 'passed' | 'failed';
     readonly testDay: string;
   };
+  'lesson.finished': {
+    readonly ruleId: string;
+    readonly ruleSet: string;
+    readonly tries: number;
+    readonly loadId: string | null;
+  };
   'load.opened': { readonly number: string; readonly listed: number };
   'load.package-scanned': { readonly packageCode: string; readonly entry: string; readonly difference: LoadDifference };
   'load.scan-refused': { readonly answer: string; readonly read: string; readonly entry: string };

@@ -20,9 +20,10 @@ export type LessonFamily = (typeof lessonFamilies)[number];
 
 /** What no drawing of a cart shows, as a card made of the same data. */
 export type LessonCard =
-  | { readonly shows: 'labels'; readonly packageIds: readonly string[] }
-  | { readonly shows: 'sterilizer' | 'program' | 'masses' | 'counts' | 'places' }
-  | { readonly shows: 'sizes'; readonly packageId: string };
+  | { readonly shows: 'label' | 'size'; readonly packageId: string }
+  /** Of all packages: what is written on them, what is known of them, where they are said to be, what they weigh. */
+  | { readonly shows: 'codes' | 'states' | 'places' | 'masses' }
+  | { readonly shows: 'counts' | 'sterilizer' | 'program' };
 
 /** How both carts of a lesson are drawn. */
 export type LessonPicture =

@@ -7,14 +7,14 @@ const [left, right] = [onShelf(smallTray, lower, 30, 140), onShelf(smallTray, lo
 export const externalIndicatorLesson: Lesson = {
   family: 'proof',
   why: [
-    'The outside CI tells at a glance whether a package has been through the sterilizer.',
+    'The external CI tells at a glance whether a package has been through the sterilizer.',
     'Without it, one that has not can end up on the sterile shelf.',
     'It shows exposure, not sterility.',
   ],
-  lookFor: 'Tape or a mark on every wrap and container; on a pouch, an inside CI that shows through will do.',
+  lookFor: 'Tape or a mark on every wrap and container; on a pouch, an internal CI that shows through will do.',
   bad: {
     view: aLoad({ packages: [left, but(right, { hasExternalIndicator: false })] }),
-    caption: 'The right tray looks packed. It has no outside CI.',
+    caption: 'The right tray looks packed. It has no external CI.',
   },
   good: {
     view: aLoad({ packages: [left, right] }),
@@ -22,10 +22,10 @@ export const externalIndicatorLesson: Lesson = {
   },
   pictures: [
     { of: 'shelf', shelfId: lower },
-    { of: 'card', card: { shows: 'labels', packageIds: ['2'] } },
+    { of: 'card', card: { shows: 'label', packageId: '2' } },
   ],
   question: {
-    text: 'After the cycle the outside CI has turned. What do you know?',
+    text: 'After the cycle the external CI has turned. What do you know?',
     right: 'c',
     answers: {
       a: { text: 'The contents are sterile.', because: 'It was outside: it cannot know what happened inside.' },

@@ -15,10 +15,7 @@ export const gapLesson: Lesson = {
   lookFor: 'You can see through between any two pouches, all the way down.',
   bad: { view: inSlots([2, 3, 6]), caption: 'Two thick pouches in slots next to each other.' },
   good: { view: inSlots([2, 4, 6]), caption: 'A free slot between them gives each its room.' },
-  pictures: [
-    { of: 'shelf', shelfId: lower },
-    { of: 'holder', holderId: 'Rack 1' },
-  ],
+  pictures: [{ of: 'shelf', shelfId: lower }],
   question: {
     text: 'A rack has eight slots and your pouches are thick. How many go in?',
     right: 'b',

@@ -1,18 +1,22 @@
 import { kg, mm } from '../../units/quantity';
 import type { Lesson } from '../lesson';
-import { basicSet, lower, smallTray, upper } from '../teaching/catalogue';
-import { aLoad, onShelf, withShelf } from '../teaching/load';
+import { basicSet, cart, lower, named, smallTray, upper } from '../teaching/catalogue';
+import { aLoad, onShelf } from '../teaching/load';
 
 const tallSet = {
   ...basicSet,
-  id: 'K2',
-  code: 'K2',
-  name: 'Tall set',
+  ...named('Tall set'),
   heightMm: mm(230),
   massKg: kg(8),
   metalMassKg: kg(7),
 };
-const changes = { cart: withShelf(upper, { clearHeightMm: mm(190) }) };
+/** Little height below, more above. */
+const changes = {
+  cart: {
+    ...cart,
+    shelves: cart.shelves.map((shelf) => ({ ...shelf, clearHeightMm: mm(shelf.id === lower ? 190 : 290) })),
+  },
+};
 
 export const headroomLesson: Lesson = {
   family: 'space',
@@ -24,16 +28,16 @@ export const headroomLesson: Lesson = {
   bad: {
     view: aLoad({
       changes,
-      packages: [onShelf(tallSet, upper, 20, 70), onShelf(smallTray, lower, 320, 140)],
+      packages: [onShelf(tallSet, lower, 20, 70), onShelf(smallTray, upper, 320, 140)],
     }),
-    caption: 'The tall set stands on the shelf with the lower height.',
+    caption: 'The tall set runs into the shelf above it.',
   },
   good: {
     view: aLoad({
       changes,
-      packages: [onShelf(tallSet, lower, 20, 70), onShelf(smallTray, upper, 320, 140)],
+      packages: [onShelf(tallSet, upper, 20, 70), onShelf(smallTray, lower, 320, 140)],
     }),
-    caption: 'It has the higher shelf, with air above its lid.',
+    caption: 'It stands on the shelf with more height, with air above its lid.',
   },
   pictures: [{ of: 'cart' }],
   question: {

@@ -20,7 +20,7 @@ export const holderFitsLesson: Lesson = {
     view: aLoad({ holders, packages: [...standing, inSlot(retractor, 'Rack 2', 2)] }),
     caption: 'It stands in the rack with wide slots, which is made for its size.',
   },
-  pictures: [{ of: 'cart' }, { of: 'shelf', shelfId: lower }],
+  pictures: [{ of: 'cart' }],
   question: {
     text: 'A pouch goes into a slot only if you push. What does that tell you?',
     right: 'a',

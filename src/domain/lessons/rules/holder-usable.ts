@@ -1,8 +1,8 @@
 import type { Lesson } from '../lesson';
-import { lower, rack, scissors, wideRack } from '../teaching/catalogue';
+import { lower, rack, scissors, wideRack, named } from '../teaching/catalogue';
 import { aLoad, aRack, inSlot } from '../teaching/load';
 
-const unmeasured = { ...rack, id: 'R9', code: 'R9', name: 'rack nobody measured', slots: null, pitchMm: null };
+const unmeasured = { ...rack, ...named('rack nobody measured'), slots: null, pitchMm: null };
 const measured = { ...unmeasured, name: 'rack with eight slots', slots: rack.slots, pitchMm: rack.pitchMm };
 const holders = [aRack('Rack 1', lower, 20, 120), aRack('Rack 2', lower, 310, 120, unmeasured)];
 const pouches = [inSlot(scissors, 'Rack 1', 2), inSlot(scissors, 'Rack 1', 4)];

@@ -22,7 +22,7 @@ export const ifuOnFileLesson: Lesson = {
   },
   pictures: [
     { of: 'shelf', shelfId: lower },
-    { of: 'card', card: { shows: 'labels', packageIds: ['2'] } },
+    { of: 'card', card: { shows: 'label', packageId: '2' } },
   ],
   question: {
     text: 'A loaned tray arrives at night without papers. What do you do?',

@@ -7,7 +7,7 @@ const [left, right] = [onShelf(smallTray, lower, 30, 140), onShelf(smallTray, lo
 export const internalIndicatorLesson: Lesson = {
   family: 'proof',
   why: [
-    'The inside CI shows that steam came into this very package.',
+    'The internal CI shows that steam came into this very package.',
     'It is read in the operating room as the package is opened. Without it, nobody there can tell.',
   ],
   lookFor: 'It goes in at packing, where steam reaches last, not on top.',
@@ -21,10 +21,10 @@ export const internalIndicatorLesson: Lesson = {
   },
   pictures: [
     { of: 'shelf', shelfId: lower },
-    { of: 'card', card: { shows: 'labels', packageIds: ['2'] } },
+    { of: 'card', card: { shows: 'label', packageId: '2' } },
   ],
   question: {
-    text: 'A tray was packed without an inside CI and is already on the cart. What now?',
+    text: 'A tray was packed without an internal CI and is already on the cart. What now?',
     right: 'a',
     answers: {
       a: {

@@ -22,8 +22,8 @@ export const labelKnownLesson: Lesson = {
     caption: 'It has been given a label of its own.',
   },
   pictures: [
-    { of: 'shelf', shelfId: lower },
-    { of: 'card', card: { shows: 'labels', packageIds: ['3'] } },
+    { of: 'holder', holderId: 'Rack 1' },
+    { of: 'card', card: { shows: 'codes' } },
   ],
   question: {
     text: 'A pouch in the rack has no label. You know what is in it. What now?',

@@ -23,8 +23,8 @@ export const labelOnceLesson: Lesson = {
     caption: 'Each has a code of its own.',
   },
   pictures: [
-    { of: 'shelf', shelfId: lower },
-    { of: 'card', card: { shows: 'labels', packageIds: ['1', '2'] } },
+    { of: 'holder', holderId: 'Rack 1' },
+    { of: 'card', card: { shows: 'codes' } },
   ],
   question: {
     text: 'The screen says a label is already on this cart, but the pouch is in your hand.',

@@ -20,7 +20,7 @@ export const lidFilterCoveredLesson: Lesson = {
     view: aLoad({ packages: [set, onShelf(smallTray, lower, 320, 140)] }),
     caption: 'It stands beside the set, and both filters breathe.',
   },
-  pictures: [{ of: 'shelf', shelfId: lower }, { of: 'cart' }],
+  pictures: [{ of: 'shelf', shelfId: lower }],
   question: {
     text: 'Half a filter is covered by a light pouch. Is that enough steam?',
     right: 'b',

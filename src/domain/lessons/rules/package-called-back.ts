@@ -22,8 +22,8 @@ export const packageCalledBackLesson: Lesson = {
     caption: 'It went to the lead; the load goes without it.',
   },
   pictures: [
-    { of: 'shelf', shelfId: lower },
-    { of: 'card', card: { shows: 'labels', packageIds: ['1', '2', '3'] } },
+    { of: 'holder', holderId: 'Rack 1' },
+    { of: 'card', card: { shows: 'states' } },
   ],
   question: {
     text: 'You find a called-back pouch among those to be sterilized. What comes first?',

@@ -22,8 +22,8 @@ export const packageExpiredLesson: Lesson = {
     caption: 'Packed again in a new pouch, with a new day.',
   },
   pictures: [
-    { of: 'shelf', shelfId: lower },
-    { of: 'card', card: { shows: 'labels', packageIds: ['3'] } },
+    { of: 'holder', holderId: 'Rack 1' },
+    { of: 'card', card: { shows: 'label', packageId: '3' } },
   ],
   question: {
     text: 'A pouch expired yesterday and looks perfect. What do you do?',

@@ -22,8 +22,8 @@ export const packageStateLesson: Lesson = {
     caption: 'It went to storage; the rest waits to be sterilized.',
   },
   pictures: [
-    { of: 'shelf', shelfId: lower },
-    { of: 'card', card: { shows: 'labels', packageIds: ['1', '2', '3'] } },
+    { of: 'holder', holderId: 'Rack 1' },
+    { of: 'card', card: { shows: 'states' } },
   ],
   question: {
     text: 'Why not simply run a sterile package a second time?',

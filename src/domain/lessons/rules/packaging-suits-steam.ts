@@ -21,7 +21,7 @@ export const packagingSuitsSteamLesson: Lesson = {
     view: aLoad({ packages: [tray, onShelf(basin, lower, 270, 130)] }),
     caption: 'The same basin, wrapped and tilted.',
   },
-  pictures: [{ of: 'cart' }, { of: 'card', card: { shows: 'labels', packageIds: ['2'] } }],
+  pictures: [{ of: 'cart' }, { of: 'card', card: { shows: 'label', packageId: '2' } }],
   question: {
     text: 'Somebody needs one bare basin, soon. May it ride along with wrapped trays?',
     right: 'c',

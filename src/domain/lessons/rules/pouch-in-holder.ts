@@ -21,7 +21,7 @@ export const pouchInHolderLesson: Lesson = {
     view: aLoad({ holders, packages: [...standing, inSlot(forceps, 'Rack 1', 6)] }),
     caption: 'The rack holds it upright on both sides.',
   },
-  pictures: [{ of: 'cart' }, { of: 'shelf', shelfId: lower }],
+  pictures: [{ of: 'shelf', shelfId: lower }],
   question: {
     text: 'The racks are full and two pouches are left. What helps?',
     right: 'c',

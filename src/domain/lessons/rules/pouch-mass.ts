@@ -1,14 +1,12 @@
 import { kg, mm } from '../../units/quantity';
 import type { Lesson } from '../lesson';
-import { clamps, lower, scissors, smallTray } from '../teaching/catalogue';
+import { clamps, lower, scissors, smallTray, named } from '../teaching/catalogue';
 import { aLoad, aRack, inSlot, onShelf } from '../teaching/load';
 
-const mallet = { ...clamps, id: 'P6', code: 'P6', name: 'Mallet', massKg: kg(0.9), metalMassKg: kg(0.8) };
+const mallet = { ...clamps, ...named('Mallet'), massKg: kg(0.9), metalMassKg: kg(0.8) };
 const wrappedMallet = {
   ...smallTray,
-  id: 'T6',
-  code: 'T6',
-  name: 'Mallet, wrapped',
+  ...named('Mallet, wrapped'),
   lengthMm: mm(260),
   widthMm: mm(150),
   massKg: kg(1.2),

@@ -1,21 +1,17 @@
 import { kg } from '../../units/quantity';
 import type { Lesson } from '../lesson';
-import { basicSet, lower } from '../teaching/catalogue';
+import { basicSet, lower, named } from '../teaching/catalogue';
 import { aLoad, onShelf } from '../teaching/load';
 
 const heavySet = {
   ...basicSet,
-  id: 'K3',
-  code: 'K3',
-  name: 'Bone set',
+  ...named('Bone set'),
   massKg: kg(12.8),
   metalMassKg: kg(11.6),
 };
 const halfSet = (part: 'A' | 'B') => ({
   ...basicSet,
-  id: `K3${part}`,
-  code: `K3${part}`,
-  name: `Bone set, part ${part}`,
+  ...named(`Bone set ${part}`),
 });
 
 export const setMassLesson: Lesson = {

@@ -1,9 +1,9 @@
 import { kg } from '../../units/quantity';
 import type { Lesson } from '../lesson';
-import { basicSet, cart, lower, upper } from '../teaching/catalogue';
+import { basicSet, cart, lower, upper, named } from '../teaching/catalogue';
 import { aLoad, onShelf } from '../teaching/load';
 
-const heavySet = { ...basicSet, id: 'K4', code: 'K4', name: 'Hip set', massKg: kg(9.6), metalMassKg: kg(8.5) };
+const heavySet = { ...basicSet, ...named('Hip set'), massKg: kg(9.6), metalMassKg: kg(8.5) };
 const changes = { cart: { ...cart, shelves: cart.shelves.map((shelf) => ({ ...shelf, greatestMassKg: kg(18) })) } };
 
 export const shelfMassLesson: Lesson = {

@@ -23,8 +23,8 @@ export const sizeMakesNoSenseLesson: Lesson = {
     caption: 'Ten millimetres: the entry is mended, the pouch is drawn.',
   },
   pictures: [
-    { of: 'shelf', shelfId: lower },
-    { of: 'card', card: { shows: 'sizes', packageId: '3' } },
+    { of: 'holder', holderId: 'Rack 1' },
+    { of: 'card', card: { shows: 'size', packageId: '3' } },
   ],
   question: {
     text: 'The screen says a size cannot be. The pouch in your hand is normal. What now?',

@@ -1,13 +1,11 @@
 import { kg, mm, percent } from '../../units/quantity';
 import type { Lesson } from '../lesson';
-import { drillTray, smallTray, upper } from '../teaching/catalogue';
+import { drillTray, smallTray, upper, named } from '../teaching/catalogue';
 import { aLoad, onShelf } from '../teaching/load';
 
 const wideTray = {
   ...drillTray,
-  id: 'T3',
-  code: 'T3',
-  name: 'Wide tray',
+  ...named('Wide tray'),
   lengthMm: mm(540),
   widthMm: mm(272),
   massKg: kg(5),

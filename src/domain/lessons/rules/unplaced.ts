@@ -21,7 +21,7 @@ export const unplacedLesson: Lesson = {
     caption: 'Holder scanned, then pouch: now they have a place.',
   },
   pictures: [
-    { of: 'shelf', shelfId: lower },
+    { of: 'holder', holderId: 'Rack 1' },
     { of: 'card', card: { shows: 'places' } },
   ],
   question: {

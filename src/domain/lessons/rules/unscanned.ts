@@ -21,7 +21,7 @@ export const unscannedLesson: Lesson = {
     caption: 'All three are scanned and stand in the rack.',
   },
   pictures: [
-    { of: 'shelf', shelfId: lower },
+    { of: 'holder', holderId: 'Rack 1' },
     { of: 'card', card: { shows: 'counts' } },
   ],
   question: {
