@@ -19,6 +19,7 @@ export const runSummarySchema = z.object({
   createdAt: instantSchema,
   /** The load that took it. */
   load: z.object({ id: idSchema, number: z.string() }).nullable(),
+  version: z.number().int(),
 });
 export type RunSummary = z.infer<typeof runSummarySchema>;
 
@@ -38,6 +39,17 @@ export const addRunRequestSchema = z.strictObject({
 });
 export type AddRunRequest = z.infer<typeof addRunRequestSchema>;
 export const addRunResponseSchema = z.object({ runId: idSchema });
+
+/** What is absent stays as it is; null takes the hour away. */
+export const changeRunRequestSchema = z.strictObject({
+  requestId: requestIdSchema,
+  /** Of the run as it was when the change was decided on. */
+  version: z.number().int(),
+  name: textSchema(80).optional(),
+  wantedAt: instantSchema.nullable().optional(),
+});
+export type ChangeRunRequest = z.infer<typeof changeRunRequestSchema>;
+export const changeRunResponseSchema = z.object({ run: runSummarySchema });
 
 export const stagePackagesRequestSchema = z.strictObject({
   requestId: requestIdSchema,

@@ -19,6 +19,7 @@ type RunRow = {
   readonly created_at: Date;
   readonly load_id: string | null;
   readonly load_number: string | null;
+  readonly version: number;
 };
 
 type Named = { readonly id: string; readonly code: string; readonly name: string };
@@ -40,6 +41,7 @@ function fromRow(row: RunRow): RunSummary {
     createdBy: row.created_by,
     createdAt: row.created_at.toISOString(),
     load: row.load_id === null || row.load_number === null ? null : { id: row.load_id, number: row.load_number },
+    version: row.version,
   };
 }
 
@@ -80,6 +82,7 @@ function summaries(trx: Transaction | Db): Knex.QueryBuilder {
       'runs.created_at',
       'taking.id as load_id',
       'taking.number as load_number',
+      'runs.version',
     );
 }
 
@@ -96,7 +99,11 @@ export async function listRuns(db: Db, facilityId: string, state: RunSummary['st
   return rows.map(fromRow);
 }
 
-export async function findRunSummary(db: Db, facilityId: string, runId: string): Promise<RunSummary | undefined> {
+export async function findRunSummary(
+  db: Transaction | Db,
+  facilityId: string,
+  runId: string,
+): Promise<RunSummary | undefined> {
   const rows = (await summaries(db).where({ 'runs.facility_id': facilityId, 'runs.id': runId })) as RunRow[];
   return rows[0] && fromRow(rows[0]);
 }

@@ -2,6 +2,8 @@ import { paths } from '#contract/paths';
 import {
   addRunRequestSchema,
   addRunResponseSchema,
+  changeRunRequestSchema,
+  changeRunResponseSchema,
   dropRunRequestSchema,
   dropRunResponseSchema,
   removePackagesResponseSchema,
@@ -17,6 +19,7 @@ import {
 import { defineRoute, type Route } from '../../http/define-route';
 import { NotFound } from '../../platform/errors';
 import { addRun } from './add-run';
+import { changeRun } from './change-run';
 import { facilityDay } from '../../platform/facility-day';
 import { listStagedPackages } from './package-read-model';
 import { findRunSummary, listRuns } from './run-read-model';
@@ -55,6 +58,15 @@ export const runRoutes: readonly Route[] = [
       const { day } = await facilityDay(db, actor.facilityId, clock.now());
       return { run, packages: await listStagedPackages(db, run.id, day) };
     },
+  }),
+  defineRoute({
+    method: 'patch',
+    path: '/api/runs/:runId',
+    permission: 'package.stage',
+    params: runParamsSchema,
+    body: changeRunRequestSchema,
+    response: changeRunResponseSchema,
+    handle: ({ services, actor, params, body }) => changeRun(services, actor, params.runId, body),
   }),
   defineRoute({
     method: 'post',

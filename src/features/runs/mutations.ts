@@ -2,15 +2,17 @@ import { paths } from '#contract/paths';
 import {
   addRunRequestSchema,
   addRunResponseSchema,
+  changeRunResponseSchema,
   dropRunResponseSchema,
   removePackagesResponseSchema,
   stagePackagesResponseSchema,
   stagingScanResponseSchema,
   type AddRunRequest,
+  type ChangeRunRequest,
 } from '#contract/runs';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { api } from '../../lib/api-client';
-import { NoLineError } from '../../lib/errors';
+import { isProblem, NoLineError } from '../../lib/errors';
 
 /** A run shows on the board, in lists of packages, in the day and where loads are opened: all look again. */
 function useLookAgain() {
@@ -24,6 +26,18 @@ export function useAddRun() {
     mutationFn: (request: AddRunRequest) =>
       api.post(paths.runs, addRunRequestSchema.parse(request), addRunResponseSchema),
     onSuccess: lookAgain,
+  });
+}
+
+export function useChangeRun(runId: string) {
+  const lookAgain = useLookAgain();
+  return useMutation({
+    mutationFn: (request: ChangeRunRequest) => api.patch(paths.run(runId), request, changeRunResponseSchema),
+    onSuccess: lookAgain,
+    onError: (error) => {
+      // The screen behind shows what there is to look at again.
+      if (isProblem(error)) void lookAgain();
+    },
   });
 }
 

@@ -1,5 +1,6 @@
 import { addDays } from '#domain/time/calendar-day';
-import { dayOf, formatTime } from '../../lib/format';
+import { instantAt } from '#domain/time/instant-at';
+import { dayOf, formatWeekdayDate } from '../../lib/format';
 
 const minuteMs = 60_000;
 
@@ -9,26 +10,40 @@ export function timeOfText(text: string): string | null {
   return hour === undefined || minute === undefined ? null : `${hour.padStart(2, '0')}:${minute}`;
 }
 
-/** What a wall clock in that zone shows, counted as if it stood in Greenwich. */
-function wallMs(at: Date, timeZone: string): number {
-  return Date.parse(`${dayOf(at, timeZone)}T${formatTime(at, timeZone)}:00Z`);
-}
-
 /**
  * The next instant at which a wall clock in the zone shows this time: later today, or tomorrow when it is past.
- * A time that the clocks skip on the day they go forward is taken as the one an hour later.
  * @param time HH:MM
  * @returns an ISO instant
  */
 export function wantedAtOf(time: string, now: Date, timeZone: string): string {
-  const onDay = (day: string) => {
-    const wanted = Date.parse(`${day}T${time}:00Z`);
-    // Once for the zone's distance from Greenwich, once more where the clocks change in between.
-    let at = new Date(wanted);
-    for (let turn = 0; turn < 2; turn += 1) at = new Date(at.getTime() + wanted - wallMs(at, timeZone));
-    return at;
-  };
-  const today = onDay(dayOf(now, timeZone));
-  if (today.getTime() >= now.getTime() - minuteMs) return today.toISOString();
-  return onDay(addDays(dayOf(now, timeZone), 1)).toISOString();
+  const today = dayOf(now, timeZone);
+  const at = instantAt({ day: today, time }, timeZone);
+  return isPast(at, now) ? instantAt({ day: addDays(today, 1), time }, timeZone) : at;
+}
+
+/** The minute that is on the clock now is not past. */
+export function isPast(at: string, now: Date): boolean {
+  return Date.parse(at) < now.getTime() - minuteMs;
+}
+
+/** As far ahead as a department plans its sterilizers. */
+const daysAhead = 7;
+
+/** Days a run may be wanted for: today, the week after it, and the day it is wanted for already. */
+export function wantedDays(
+  wantedAt: string | null,
+  now: Date,
+  timeZone: string,
+): { readonly value: string; readonly label: string }[] {
+  const today = dayOf(now, timeZone);
+  const ahead = Array.from({ length: daysAhead + 1 }, (_, days) => addDays(today, days));
+  const own = wantedAt === null ? today : dayOf(wantedAt, timeZone);
+  const names = new Map([
+    [today, 'Today'],
+    [addDays(today, 1), 'Tomorrow'],
+  ]);
+  return [...new Set([...ahead, own])].sort().map((day) => ({
+    value: day,
+    label: names.get(day) ?? formatWeekdayDate(`${day}T12:00:00Z`, 'UTC'),
+  }));
 }

@@ -20,6 +20,7 @@ function aRun(changes: Partial<RunSummary> = {}): RunSummary {
     createdBy: 'Dele Oyelaran',
     createdAt: '2026-03-17T07:00:00.000Z',
     load: null,
+    version: 1,
     ...changes,
   };
 }

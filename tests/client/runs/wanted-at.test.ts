@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { timeOfText, wantedAtOf } from '../../../src/features/runs/wanted-at';
+import { timeOfText, wantedAtOf, wantedDays } from '../../../src/features/runs/wanted-at';
 
 describe('a time of day as people type it', () => {
   it.each([
@@ -56,5 +56,27 @@ describe('the instant a wall clock shows it next', () => {
 
   it('knows zones with half hours', () => {
     expect(wantedAtOf('12:00', new Date('2026-03-03T00:00:00Z'), 'Asia/Kolkata')).toBe('2026-03-03T06:30:00.000Z');
+  });
+});
+
+describe('the days a run may be wanted for', () => {
+  // 23:30 on Tuesday 3 March in Chicago; in Greenwich it is the 4th.
+  const now = new Date('2026-03-04T05:30:00Z');
+
+  it('are today and the week after it, by the wall calendar', () => {
+    const days = wantedDays(null, now, 'America/Chicago');
+    expect(days).toHaveLength(8);
+    expect(days.slice(0, 3)).toEqual([
+      { value: '2026-03-03', label: 'Today' },
+      { value: '2026-03-04', label: 'Tomorrow' },
+      { value: '2026-03-05', label: 'Thursday 5 March' },
+    ]);
+  });
+
+  it('hold the day it is wanted for, also when that is past', () => {
+    expect(wantedDays('2026-03-02T20:00:00Z', now, 'America/Chicago')[0]).toEqual({
+      value: '2026-03-02',
+      label: 'Monday 2 March',
+    });
   });
 });

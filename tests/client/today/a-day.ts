@@ -58,6 +58,7 @@ export function aRun(changes: Partial<RunSummary> = {}): RunSummary {
     createdBy: 'Ines Marchetti',
     createdAt: '2026-03-17T08:00:00.000Z',
     load: null,
+    version: 1,
     ...changes,
   };
 }

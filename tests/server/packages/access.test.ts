@@ -41,6 +41,11 @@ const calls = [
     body: () => ({ requestId: anId(), name: 'Run', sterilizerId: null, programId: null, wantedAt: null }),
   },
   { method: 'get', path: () => `/api/runs/${target.runId}` },
+  {
+    method: 'patch',
+    path: () => `/api/runs/${target.runId}`,
+    body: () => ({ requestId: anId(), version: 1, name: 'Another name' }),
+  },
   { method: 'post', path: () => `/api/runs/${target.runId}/packages`, body: packageIds },
   { method: 'post', path: () => `/api/runs/${target.runId}/remove`, body: packageIds },
   {
@@ -63,7 +68,7 @@ function routeOf(call: Call) {
 }
 
 async function send(agent: Awaited<ReturnType<typeof app.as>>, call: Call) {
-  return call.method === 'get' ? agent.get(call.path()) : agent.post(call.path()).send(call.body());
+  return call.method === 'get' ? agent.get(call.path()) : agent[call.method](call.path()).send(call.body());
 }
 
 const own = /^\/api\/(?:packages|runs|today)/;
@@ -94,7 +99,7 @@ describe('who may do what with packages and runs', () => {
     for (const call of calls) {
       const route = routeOf(call);
       if (route.path === '/api/today') continue;
-      const isWork = call.method === 'post' || route.path.includes('/labels/');
+      const isWork = call.method !== 'get' || route.path.includes('/labels/');
       const isAllowed = isWork ? mayWork.has(role) : maySee.has(role);
       expect(isPermitted(role, route.access as 'package.view'), `${role} ${route.method} ${route.path}`).toBe(
         isAllowed,

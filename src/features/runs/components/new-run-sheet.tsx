@@ -15,17 +15,14 @@ import { newRequestId } from '../../../lib/request-id';
 import { serverNow } from '../../../lib/server-clock';
 import { useAddRun } from '../mutations';
 import { runQueries } from '../queries';
+import { runNameSchema, wantedTimeSchema } from '../run-form';
 import { timeOfText, wantedAtOf } from '../wanted-at';
 
 const formSchema = z.object({
-  name: z.string().trim().min(1, 'Give it a name that people say, such as a room or a list.').max(80),
+  name: runNameSchema,
   sterilizerId: z.string(),
   programId: z.string(),
-  /** HH:MM on the wall, or empty. */
-  wanted: z
-    .string()
-    .trim()
-    .refine((text) => text === '' || timeOfText(text) !== null, 'A time such as 14:30.'),
+  wanted: wantedTimeSchema,
 });
 type Form = z.infer<typeof formSchema>;
 

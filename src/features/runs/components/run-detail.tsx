@@ -21,6 +21,7 @@ import { useMay } from '../../../lib/session';
 import { useSounds } from '../../../lib/sounds';
 import { useDropRun, useScanIntoRun } from '../mutations';
 import { runQueries } from '../queries';
+import { ChangeRunSheet } from './change-run-sheet';
 import { answerOf, RunScanLine, type LastStaging } from './run-scan-line';
 
 export type KeyInProps = { readonly onCode: (code: string) => void; readonly onClose: () => void };
@@ -103,6 +104,7 @@ function Shown({
   const drop = useDropRun();
   const [last, setLast] = useState<LastStaging>({ kind: 'none' });
   const [isKeyingIn, setIsKeyingIn] = useState(false);
+  const [isChanging, setIsChanging] = useState(false);
   const [isDropping, setIsDropping] = useState(false);
   const [dropRequestId] = useState(newRequestId);
   const isWaiting = run.state === 'waiting';
@@ -125,7 +127,7 @@ function Shown({
     (scan) => {
       void take(scan.text);
     },
-    { isOn: mayStage && isWaiting && !isKeyingIn },
+    { isOn: mayStage && isWaiting && !isKeyingIn && !isChanging },
   );
 
   return (
@@ -167,14 +169,24 @@ function Shown({
         </div>
         <div className="flex flex-wrap gap-2.5">
           {mayStage && isWaiting && (
-            <Button
-              kind="quiet"
-              onPress={() => {
-                setIsDropping(true);
-              }}
-            >
-              Drop this run
-            </Button>
+            <>
+              <Button
+                kind="quiet"
+                onPress={() => {
+                  setIsChanging(true);
+                }}
+              >
+                Change this run
+              </Button>
+              <Button
+                kind="quiet"
+                onPress={() => {
+                  setIsDropping(true);
+                }}
+              >
+                Drop this run
+              </Button>
+            </>
           )}
           {mayOpen && isWaiting && (
             <Button
@@ -213,6 +225,14 @@ function Shown({
             setIsKeyingIn(false);
           },
         })}
+      {isChanging && (
+        <ChangeRunSheet
+          run={run}
+          onClose={() => {
+            setIsChanging(false);
+          }}
+        />
+      )}
       <ConfirmDialog
         isOpen={isDropping}
         onClose={() => {
