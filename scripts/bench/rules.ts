@@ -1,7 +1,7 @@
 import { parseArgs } from 'node:util';
 import { Refusal } from '../setup/refusal.mjs';
 import { replay } from './rules/replay';
-import { listFalseStops, printByRule, printCarts, printMisses, printOnLegalCarts } from './rules/report';
+import { listFalseStops, printByRule, printCarts, printDoubts, printMisses, printOnLegalCarts } from './rules/report';
 import { measureSpeed, printSpeed } from './rules/speed';
 import { judgeCart, tryAllFaults } from './rules/trial';
 
@@ -26,6 +26,7 @@ export function run(): Promise<void> {
   const trials = tryAllFaults(seed, judged, copies);
   printByRule(trials);
   printMisses(seed, trials, fewestCopies);
+  printDoubts(seed, trials);
   printOnLegalCarts(seed, judged);
   const speed = measureSpeed(seed);
   printSpeed([speed[60], speed[200], speed[500], speed.scan]);

@@ -97,7 +97,8 @@ export function singleBlock(site: Site, item: CatalogueItem, turn: Turn): Block 
 }
 
 export function onDeck(item: CatalogueItem, shelfId: string, x: number, y: number, turn: Turn): Placement {
-  return { at: 'shelf', shelfId, xMm: mm(x), yMm: mm(y), turn, pose: item.pose, paper: null };
+  const paper = item.kind === 'pouch' ? 'down' : null;
+  return { at: 'shelf', shelfId, xMm: mm(x), yMm: mm(y), turn, pose: item.pose, paper };
 }
 
 export function putHolder(holderId: string, kind: HolderKind, x: number, y: number, turn: Turn): PutHolder {

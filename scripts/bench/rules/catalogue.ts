@@ -59,10 +59,9 @@ export function variedCatalogue(random: Random, program: Program): readonly Cata
       varied = { ...varied, cycleNeeds: [...item.cycleNeeds, needFor(program)] };
     }
     if (random.chance(0.25)) varied = { ...varied, clearanceMm: clearanceFor(item, random) };
-    if (random.chance(0.15))
-      varied = { ...varied, massLimitKg: kg(Math.ceil((item.massKg + random.next()) * 10) / 10) };
+    if (random.chance(0.15)) varied = { ...varied, massLimitKg: massLimitFor(item, random) };
     if (item.kind === 'pouch' && random.chance(0.15)) varied = { ...varied, packaging: 'double-pouch' };
-    if (item.kind === 'wrapped-tray') varied = asTray(varied, random);
+    varied = item.kind === 'wrapped-tray' ? asTray(varied, random) : asItsMakerWants(varied, random);
     if (item.standsOn.length > 0 && random.chance(0.3)) {
       varied = { ...varied, greatestStackHeightMm: random.pick([null, mm(450)]) };
     }
@@ -74,6 +73,22 @@ function clearanceFor(item: CatalogueItem, random: Random): CatalogueItem['clear
   if (random.chance(0.5)) return null;
   if (item.kind !== 'pouch') return mm(random.whole(10, 40));
   return mm(random.whole(5, 12));
+}
+
+/** Its own mass exactly, or something above it. */
+function massLimitFor(item: CatalogueItem, random: Random): CatalogueItem['massLimitKg'] {
+  return random.chance(0.3) ? item.massKg : kg(Math.ceil((item.massKg + random.next()) * 10) / 10);
+}
+
+/**
+ * Makers contradict each other about pouches that lie flat and about basins on edge, and what their instructions say goes;
+ * a challenge device that is bought comes in a pouch or in nothing.
+ */
+function asItsMakerWants(item: CatalogueItem, random: Random): CatalogueItem {
+  if (item.code === 'P-10' && random.chance(0.15)) return { ...item, pose: 'flat', preferredHolder: null };
+  if (item.code === 'W-11' && random.chance(0.3)) return { ...item, pose: 'on-edge' };
+  if (item.code === 'PCD-02') return { ...item, packaging: random.pick(['wrap', 'none', 'paper-film-pouch']) };
+  return item;
 }
 
 function asTray(item: CatalogueItem, random: Random): CatalogueItem {

@@ -78,14 +78,14 @@ export const holderKinds: readonly HolderKind[] = [
 
 export type Room = { readonly sterilizer: Sterilizer; readonly cart: Cart };
 
-function shelfOf(level: number, fields: Omit<Shelf, 'id' | 'level' | 'name' | 'placeCode' | 'isUsable'>): Shelf {
+function shelfOf(level: number, fields: Omit<Shelf, 'id' | 'level' | 'name' | 'placeCode'>): Shelf {
   const names = ['Lower shelf', 'Second shelf', 'Third shelf', 'Top shelf'];
   return {
     id: `shelf ${level}`,
     level,
     name: names[level - 1] ?? '',
     placeCode: `S-${level}`,
-    isUsable: true,
+
     ...fields,
   };
 }
@@ -99,7 +99,7 @@ function demonstrationRoom(random: Random, isLarge: boolean): Room {
       id: 'cart',
       code: seed.code,
       name: seed.name,
-      shelves: seed.shelves.map(({ level, name: _name, isUsable: _isUsable, ...fields }) => shelfOf(level, fields)),
+      shelves: seed.shelves.map(({ level, name: _name, ...fields }) => shelfOf(level, fields)),
     },
     sterilizer: sterilizerOf(random, {
       width: chamber.widthMm,
@@ -163,7 +163,14 @@ const big: Scale = {
   shelfKg: [90],
   loadKg: [300],
 };
-const huge: Scale = { ...big, shelves: [4, 4], widthCm: [130, 150], depthCm: [240, 280], shelfKg: [200], loadKg: [700] };
+const huge: Scale = {
+  ...big,
+  shelves: [4, 4],
+  widthCm: [130, 150],
+  depthCm: [240, 280],
+  shelfKg: [200],
+  loadKg: [700],
+};
 
 function inventedRoom(random: Random, scale: Scale): Room {
   const width = random.whole(...scale.widthCm) * 10;
@@ -176,6 +183,8 @@ function inventedRoom(random: Random, scale: Scale): Room {
       clearHeightMm: mm(random.whole(...scale.clearCm) * 10),
       surface: random.chance(0.7) ? 'wire' : 'solid',
       greatestMassKg: kg(random.pick(scale.shelfKg)),
+      // A bent shelf that nothing is put on, as long as it is not the one over the drain.
+      isUsable: index === 0 || !random.chance(0.06),
     });
   });
   const room = random.pick([10, 20, 30, 50]) * 2;

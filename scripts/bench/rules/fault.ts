@@ -14,6 +14,10 @@ export type Planted = {
   readonly policy?: LoadPolicy;
   /** It counts as found when a finding names one of these. */
   readonly at: readonly Place[];
+  /** Where findings have to name every one of these. */
+  readonly everyOne?: boolean;
+  /** What the rule has to have measured, in the unit it tells it in, where this says it. */
+  readonly measured?: number;
 };
 
 export type Place = string & { readonly of: 'place' };

@@ -7,7 +7,7 @@ import { Deck, massOf } from './deck';
 import { holderKinds, programs, roomFor } from './equipment';
 import { gapOf, sizeOf, type Rect } from './geometry';
 import { houseRules } from './house-rules';
-import { basketOfOne, basketOfPouches, rackBlock } from './pouch-blocks';
+import { basketOfOne, basketOfPouches, emptyHolder, rackBlock } from './pouch-blocks';
 import { randomFrom, type Random } from './random';
 import { oneOf, spacedTrays, stackBlock } from './set-blocks';
 
@@ -34,6 +34,10 @@ const small: Maker = (site) =>
 const tray: Maker = (site) => oneOf(site, ['wrapped-tray']);
 const container: Maker = (site) => oneOf(site, ['rigid-container']);
 const basin: Maker = (site) => oneOf(site, ['basin']);
+const flatPouch: Maker = (site) => {
+  const items = site.items.filter((item) => item.kind === 'pouch' && item.pose === 'flat');
+  return items.length > 0 ? singleBlock(site, site.random.pick(items), site.random.pick([0, 90])) : null;
+};
 const textile: Maker = (site) => oneOf(site, ['textile-pack']);
 
 /** What a cart mostly holds: each maker as often as it is named. */
@@ -41,7 +45,8 @@ const mixes: readonly (readonly Maker[])[] = [
   [rackBlock, rackBlock, rackBlock, basketOfPouches, tray],
   [tray, tray, container, stackBlock, spacedTrays, rackBlock],
   [container, stackBlock, tray],
-  [tray, container, basin, textile, rackBlock, rackBlock, basketOfPouches, small, spacedTrays, stackBlock],
+  [tray, container, basin, textile, rackBlock, rackBlock, basketOfPouches, small, spacedTrays, stackBlock, flatPouch],
+  [container, container, stackBlock, stackBlock, spacedTrays],
   [textile, textile, tray, basin, rackBlock],
   [basin, basin, tray, rackBlock, textile],
   [rackBlock],
@@ -144,7 +149,7 @@ class Filling {
   constructor(plan: Plan) {
     this.#plan = plan;
     const { random, policy, program, sterilizer, cart } = plan;
-    this.#decks = cart.shelves.map((shelf) => new Deck(shelf, sterilizer, policy));
+    this.#decks = cart.shelves.filter((shelf) => shelf.isUsable).map((shelf) => new Deck(shelf, sterilizer, policy));
     const side = () => random.pick(['left', 'right'] as const);
     this.#sides = new Map(cart.shelves.map((shelf) => [shelf.id, { x: side(), y: side() }]));
     const limit = Math.min(sterilizer.greatestLoadMassKg, program.greatestLoadMassKg ?? Infinity);
@@ -159,7 +164,8 @@ class Filling {
     const { random, wanted } = this.#plan;
     for (let failures = 0; failures < 40 + wanted / 2 && this.packages.length < wanted;) {
       const deck = random.pick(this.#decks);
-      const block = random.pick(makers)(this.#siteOn(deck.shelf));
+      const maker = random.chance(0.03) ? emptyHolder : random.pick(makers);
+      const block = maker(this.#siteOn(deck.shelf));
       if (!block || block.items.length > wanted - this.packages.length || !this.#place(deck, block)) failures += 1;
     }
   }
@@ -170,13 +176,17 @@ class Filling {
     const deck = this.#decks.find((one) => one.shelf.level === 1);
     if (!deck) return false;
     const turn = random.pick([0, 90] as const);
-    const block = singleBlock(this.#siteOn(deck.shelf), device, turn);
-    const size = sizeOf(device, device.pose, turn);
+    const site = this.#siteOn(deck.shelf);
+    const inBasket = random.chance(0.15) ? basketOfOne(site, [device]) : null;
+    const block = inBasket ?? singleBlock(site, device, turn);
+    const size = inBasket ?? sizeOf(device, device.pose, turn);
     for (let inset = 0; inset <= 60; inset += 1) {
       const x = within(Math.round(sterilizer.drainXMm - size.dx / 2), inset, deck.shelf.widthMm - size.dx - inset);
       const y = within(Math.round(sterilizer.drainYMm - size.dy / 2), inset, deck.shelf.depthMm - size.dy - inset);
       const away = Math.hypot(x + size.dx / 2 - sterilizer.drainXMm, y + size.dy / 2 - sterilizer.drainYMm);
-      if (away > policy.challengeDeviceReachMm - 5) return false;
+      // In a basket it may lie anywhere: all of the basket has to be near.
+      const spread = inBasket ? Math.hypot(size.dx, size.dy) / 2 : 0;
+      if (away + spread > policy.challengeDeviceReachMm - 5) return false;
       if (deck.hasRoomFor(block) && deck.isFree(block, x, y)) {
         this.#add(deck, block, x, y);
         return true;
@@ -257,7 +267,7 @@ export function loadPackage({ packageId, item, placement }: PutPackage, random: 
     placement,
     state: 'in-load',
     heldReason: null,
-    expiresOn: random.pick([null, null, '2026-03-11', '2026-09-01', '2027-01-31']),
+    expiresOn: random.pick([null, null, today, '2026-03-11', '2026-09-01', '2027-01-31']),
     hasExternalIndicator: true,
     hasInternalIndicator: true,
   };

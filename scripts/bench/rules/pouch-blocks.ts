@@ -13,6 +13,7 @@ function isLowEnough(site: Site, heightMm: number): boolean {
 export function fitsRack(item: CatalogueItem, kind: HolderKind): boolean {
   return (
     item.kind === 'pouch' &&
+    item.pose === 'on-edge' &&
     item.widthMm <= (kind.greatestHeightMm ?? 0) &&
     item.lengthMm <= (kind.greatestLengthMm ?? 0) &&
     item.heightMm <= (kind.greatestThicknessMm ?? 0) &&
@@ -92,7 +93,8 @@ export function basketOfPouches(site: Site): Block | null {
   const pouchTurn = turnOf(random);
   const [span, room] = pouchTurn === 0 ? [kind.acrossMm, kind.alongMm] : [kind.alongMm, kind.acrossMm];
   const pouches = site.items.filter(
-    (item) => item.kind === 'pouch' && item.lengthMm <= room && isLowEnough(site, item.widthMm),
+    (item) =>
+      item.kind === 'pouch' && item.pose === 'on-edge' && item.lengthMm <= room && isLowEnough(site, item.widthMm),
   );
   if (pouches.length === 0 || site.wanted < 2) return null;
   const row = rowAcross(site, pouches, span);
@@ -124,6 +126,22 @@ export function basketOfPouches(site: Site): Block | null {
         placement: { at: 'basket', holderId, xMm: mm(x), yMm: mm(y), turn: pouchTurn, pose: 'on-edge', paper },
       })),
     }),
+  };
+}
+
+/** A rack or basket that nobody has put anything into. */
+export function emptyHolder(site: Site): Block | null {
+  const kind = site.random.pick(site.holderKinds.filter((each) => each.form === 'rack' || each.form === 'basket'));
+  const turn = turnOf(site.random);
+  const holderId = site.nextId('holder');
+  return {
+    ...holderSize(kind, turn),
+    dz: 0,
+    clearanceMm: 0,
+    insetMm: 0,
+    items: [],
+    holderKinds: [kind],
+    put: (_shelfId, x, y) => ({ holders: [putHolder(holderId, kind, x, y, turn)], packages: [] }),
   };
 }
 

@@ -63,9 +63,12 @@ export function printByRule(trials: readonly Trial[]): void {
     const own = trials.filter((trial) => trial.fault.rule === rule);
     const found = own.filter((trial) => trial.isFound).length;
     const kinds = faults.filter((fault) => fault.rule === rule).length;
-    return [rule, String(kinds), String(own.length), String(found), shareText(found, own.length)];
+    const measured = own.filter((trial) => trial.isMeasuredRight !== null);
+    const right = measured.filter((trial) => trial.isMeasuredRight).length;
+    const figures = measured.length === 0 ? '' : `${right} of ${measured.length}`;
+    return [rule, String(kinds), String(own.length), String(found), shareText(found, own.length), figures];
   });
-  console.log(`\n${table(['rule', 'kinds of fault', 'planted', 'found', 'share'], rows)}`);
+  console.log(`\n${table(['rule', 'kinds of fault', 'planted', 'found', 'share', 'right figure'], rows)}`);
 }
 
 export function printMisses(seed: number, trials: readonly Trial[], fewest: number): void {
@@ -86,6 +89,25 @@ export function printMisses(seed: number, trials: readonly Trial[], fewest: numb
     console.log(`    Carts ${missed.map((trial) => trial.cartNumber).join(' ')}.`);
     console.log(`    npm run bench -- rules --seed ${seed} --cart ${first.cartNumber} --fault ${fault.name}`);
     for (const finding of first.newFindings.slice(0, 3)) console.log(`    told instead: ${words(finding)}`);
+  }
+}
+
+/** Figures that are not those the fault was planted with, and loads that are judged otherwise step by step. */
+export function printDoubts(seed: number, trials: readonly Trial[]): void {
+  const doubts = trials.flatMap((trial) => [
+    ...(trial.isMeasuredRight === false ? [[trial, `not ${trial.planted.measured ?? ''} measured`] as const] : []),
+    ...(trial.isSameStepByStep ? [] : [[trial, 'judged otherwise step by step'] as const]),
+  ]);
+  const alike = trials.filter((trial) => trial.isSameStepByStep).length;
+  console.log(`\n  Judged step by step and in full alike: ${alike} of ${trials.length}.`);
+  for (const fault of faults) {
+    const own = doubts.filter(([trial]) => trial.fault === fault);
+    const [first] = own;
+    if (!first) continue;
+    const [trial, what] = first;
+    console.log(
+      `  ${fault.name}, ${own.length} times: ${what}, --seed ${seed} --cart ${trial.cartNumber} --fault ${fault.name}`,
+    );
   }
 }
 

@@ -16,7 +16,8 @@ export function oneOf(site: Site, kinds: readonly CatalogueItem['kind'][]): Bloc
 
 /** A stack that the instructions of every member permit, with no filter in the lid of a member below. */
 export function stackBlock(site: Site): Block | null {
-  const { random, items, policy, shelf } = site;
+  const { random, policy, shelf } = site;
+  const items = site.items.filter((item) => item.pose === 'flat' && item.kind !== 'pouch');
   const lowers = items.filter(
     (item) => !hasLidFilter(item) && items.some((other) => other.standsOn.includes(item.code)),
   );

@@ -28,6 +28,19 @@ function needs(needsFor: (program: Program, random: Random) => readonly CycleNee
   };
 }
 
+/** Two packages of a larger load with another need: both have to be named as those to be taken out. */
+function twoDiffer(host: Host, random: Random): Planted | null {
+  const [one, other] = random.shuffled(host.placed.filter((each) => each.item.kind !== 'challenge-device'));
+  if (!one || !other || host.view.packages.length < 6) return null;
+  const { program } = host.view;
+  const cycleNeeds = [{ ...answered(program), temperatureC: celsius(program.temperatureC + 2) }];
+  return {
+    view: changeItemOf(changeItemOf(host.view, one, { cycleNeeds }), other, { cycleNeeds }),
+    at: [onPackage(one.one.packageId), onPackage(other.one.packageId)],
+    everyOne: true,
+  };
+}
+
 function differing(change: (need: CycleNeed, random: Random) => Partial<CycleNeed>) {
   return needs((program, random) => {
     const need = answered(program);
@@ -51,6 +64,12 @@ export const cycleFaults: readonly Fault[] = [
     rule: 'cycle-conflict',
     plant: differing(({ type }) => ({ type: type === 'gravity' ? 'dynamic-air-removal' : 'gravity' })),
   },
+  {
+    name: 'immediate-use-only',
+    rule: 'cycle-conflict',
+    plant: differing(() => ({ type: 'immediate-use' })),
+  },
+  { name: 'two-need-another-cycle', rule: 'cycle-conflict', plant: twoDiffer },
   {
     name: 'hotter-cycle',
     rule: 'cycle-conflict',

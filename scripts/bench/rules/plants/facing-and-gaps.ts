@@ -1,5 +1,5 @@
 import type { FacingRule } from '../../../../src/domain/load/policy';
-import type { CatalogueItem, PaperSide } from '../../../../src/domain/load/model';
+import type { CatalogueItem, PaperSide, Turn } from '../../../../src/domain/load/model';
 import { mm } from '../../../../src/domain/units/quantity';
 import { clearanceOf } from '../block';
 import { changeItemOf, changePackage, deck, freeSpot, moved, pickPlaced, without } from '../change';
@@ -109,6 +109,7 @@ function asksForMore(fits: (pair: Pair) => boolean) {
     return {
       view: changeItemOf(host.view, pair.placed, { clearanceMm }),
       at: [onPackage(pair.placed.one.packageId)],
+      measured: pair.gap,
     };
   };
 }
@@ -120,6 +121,7 @@ function houseAsksForMore(host: Host, random: Random): Planted | null {
     view: changeItemOf(host.view, pair.placed, { clearanceMm: null }),
     policy: { ...host.policy, pouchGapMm: mm(Math.floor(pair.gap) + random.whole(1, 8)) },
     at: [onPackage(pair.placed.one.packageId)],
+    measured: pair.gap,
   };
 }
 
@@ -141,6 +143,7 @@ function besideTheNextRack(host: Host, random: Random): Planted | null {
   return {
     view: changeItemOf(view, placed, { clearanceMm: mm(Math.floor(nearest.gap) + random.whole(2, 8)) }),
     at: [onPackage(placed.one.packageId)],
+    measured: nearest.gap,
   };
 }
 
@@ -170,6 +173,7 @@ function pushedInBasket(closerThan: (host: Host, placed: Placed) => number, film
     return {
       view: changePackage(host.view, placed.one.packageId, { placement: changed }),
       at: [onPackage(placed.one.packageId)],
+      ...(filmTowards ? {} : { measured: gap }),
     };
   };
 }
@@ -179,7 +183,7 @@ function hides(other: CatalogueItem, item: CatalogueItem): boolean {
   return other.kind === 'pouch' && other.widthMm >= item.widthMm * 0.9 && other.lengthMm >= item.lengthMm * 0.9;
 }
 
-/** Two pouches side by side on the deck, in no holder. */
+/** Two pouches side by side on the deck, in no holder, across x or across y. */
 function bunched(gapFor: (host: Host, random: Random, clearanceMm: number) => number | null) {
   return (host: Host, random: Random): Planted | null => {
     const one = pickPlaced(host, random, (each) => each.item.kind === 'pouch');
@@ -187,20 +191,38 @@ function bunched(gapFor: (host: Host, random: Random, clearanceMm: number) => nu
     if (!one || !other) return null;
     const gap = gapFor(host, random, Math.max(...[one, other].map((each) => clearanceOf(each.item, host.policy))));
     if (gap === null) return null;
-    const [first, second] = [sizeOf(one.item, 'on-edge', 0), sizeOf(other.item, 'on-edge', 0)];
-    const spot = freeSpot(host, random, {
-      dx: first.dx + gap + second.dx,
-      dy: Math.max(first.dy, second.dy),
-      dz: Math.max(first.dz, second.dz),
-      clearanceMm: 50,
-    });
+    const turn = random.pick<Turn>([0, 90]);
+    const [first, second] = [sizeOf(one.item, 'on-edge', turn), sizeOf(other.item, 'on-edge', turn)];
+    const thick = one.item.heightMm + gap + other.item.heightMm;
+    const long = Math.max(one.item.lengthMm, other.item.lengthMm);
+    const [dx, dy] = turn === 0 ? [thick, long] : [long, thick];
+    const spot = freeSpot(host, random, { dx, dy, dz: Math.max(first.dz, second.dz), clearanceMm: 50 });
     if (!spot) return null;
     const { shelf, x, y } = spot;
-    const put = moved(host.view, one.one.packageId, deck(shelf.id, x, y, 0, 'on-edge'));
-    const view = moved(put, other.one.packageId, deck(shelf.id, x + first.dx + gap, y, 0, 'on-edge'));
-    // Paper looks left, so the film of the first looks at the second.
-    return { view, at: [onPackage(one.one.packageId)] };
+    const put = moved(host.view, one.one.packageId, deck(shelf.id, x, y, turn, 'on-edge'));
+    const next = turn === 0 ? { x: x + first.dx + gap, y } : { x, y: y + first.dy + gap };
+    const view = moved(put, other.one.packageId, deck(shelf.id, next.x, next.y, turn, 'on-edge'));
+    // Paper looks left or to the door, so the film of the first looks at the second.
+    return { view, at: [onPackage(one.one.packageId)], ...(gap === 0 ? { measured: 0 } : {}) };
   };
+}
+
+/** A pouch on the deck whose film looks at a rack with something as high in it. */
+function filmAgainstARack(host: Host, random: Random): Planted | null {
+  const inside = pickPlaced(host, random, (each) => isInSlot(each) && each.holder?.turn === 0);
+  const pouch = pickPlaced(
+    host,
+    random,
+    (each) => inside !== null && each.holder !== inside.holder && hides(inside.item, each.item),
+  );
+  if (!inside?.holder || !pouch) return null;
+  const { holder } = inside;
+  const first = host.placed.filter((each) => each.holder === holder).map((each) => each.rect.left);
+  const x = holder.xMm - pouch.item.heightMm - random.whole(0, 4);
+  const gap = inside.rect.left - x - pouch.item.heightMm;
+  if (x < 0 || inside.rect.left !== Math.min(...first) || gap > host.policy.labelReadingGapMm - 1) return null;
+  const placement = deck(inside.shelfId, x, Math.round(inside.rect.front), 0, 'on-edge');
+  return { view: moved(host.view, pouch.one.packageId, placement), at: [onPackage(pouch.one.packageId)] };
 }
 
 function filmAgainstATray(host: Host, random: Random): Planted | null {
@@ -243,5 +265,6 @@ export const facingAndGapFaults: readonly Fault[] = [
     ),
   },
   { name: 'label-hidden-in-basket', rule: 'label-hidden', plant: pushedInBasket(readingGap, true) },
+  { name: 'label-hidden-by-rack', rule: 'label-hidden', plant: filmAgainstARack },
   { name: 'label-hidden-by-tray', rule: 'label-hidden', plant: filmAgainstATray },
 ];

@@ -137,6 +137,12 @@ function holderWith(changes: { readonly kindId: string } | { readonly shelfId: s
 
 export const labelFaults: readonly Fault[] = [
   { name: 'item-not-in-catalogue', rule: 'label-known', plant: packageWith(() => ({ itemId: 'no such item' })) },
+  {
+    name: 'blank-label',
+    rule: 'label-known',
+    orRules: ['label-once'],
+    plant: packageWith((random) => ({ code: random.pick(['', ' ']) })),
+  },
   { name: 'label-twice', rule: 'label-once', plant: labelTwice },
   { name: 'package-listed-twice', rule: 'label-once', plant: listedTwice },
   {

@@ -5,13 +5,15 @@ import {
   changeItem,
   changeItemOf,
   changePackage,
+  changeShelf,
   itemWithCode,
   moved,
   pickPlaced,
+  shelfWithId,
   standing,
   standsFree,
 } from '../change';
-import { onPackage, type Fault, type Host, type Planted } from '../fault';
+import { onPackage, onShelf, type Fault, type Host, type Planted } from '../fault';
 import { gapOf, sizeOf, type Placed, type Rect } from '../geometry';
 import type { Random } from '../random';
 import { hasLidFilter } from '../set-blocks';
@@ -25,7 +27,7 @@ const planted = 'planted package';
 function filterRect(container: Placed): Rect {
   const zone = container.item.filterZones.find((each) => each.face === 'lid');
   const placement = container.one.placement;
-  if (!zone || placement?.at !== 'shelf') throw new Error('no filter in this lid');
+  if (!zone || (placement?.at !== 'shelf' && placement?.at !== 'package')) throw new Error('no filter in this lid');
   const { left, front } = container.rect;
   return placement.turn === 90
     ? {
@@ -70,9 +72,24 @@ function lidFilterContainer(host: Host, random: Random): Placed | null {
   );
 }
 
-function onTheFilter(rectFor: (filter: Rect, lid: Rect, random: Random) => Rect) {
+/** The upper of a stack, which has a filter in its lid and nothing on it. */
+function stackedFilterContainer(host: Host, random: Random): Placed | null {
+  return pickPlaced(
+    host,
+    random,
+    (each) => hasLidFilter(each.item) && each.one.placement?.at === 'package' && !carries(host, each),
+  );
+}
+
+function carries(host: Host, placed: Placed): boolean {
+  return host.view.packages.some(
+    ({ placement }) => placement?.at === 'package' && placement.belowPackageId === placed.one.packageId,
+  );
+}
+
+function onTheFilter(rectFor: (filter: Rect, lid: Rect, random: Random) => Rect, containerOf = lidFilterContainer) {
   return (host: Host, random: Random): Planted | null => {
-    const container = lidFilterContainer(host, random);
+    const container = containerOf(host, random);
     if (!container) return null;
     const rect = rectFor(filterRect(container), container.rect, random);
     const { item, turn } = trayOf(host.view, rect);
@@ -203,13 +220,7 @@ function stackOfTwo(host: Host, random: Random): Stack | null {
 
 function turnedOver(host: Host, random: Random): Planted | null {
   const stack = stackOfTwo(host, random);
-  if (
-    !stack ||
-    host.placed.some(
-      ({ one }) => one.placement?.at === 'package' && one.placement.belowPackageId === stack.upper.one.packageId,
-    )
-  )
-    return null;
+  if (!stack || carries(host, stack.upper)) return null;
   const { upper, lower } = stack;
   if (lower.item.standsOn.includes(upper.item.code) || lower.one.placement?.at !== 'shelf') return null;
   const { xMm, yMm, turn } = lower.one.placement;
@@ -217,6 +228,22 @@ function turnedOver(host: Host, random: Random): Planted | null {
   return {
     view: changePackage(view, lower.one.packageId, { placement: standing(upper.one.packageId, xMm, yMm, turn) }),
     at: [onPackage(upper.one.packageId), onPackage(lower.one.packageId)],
+  };
+}
+
+/** The upper of a permitted stack far beside the one it is said to stand on. */
+function besideItsBase(host: Host, random: Random): Planted | null {
+  const stack = stackOfTwo(host, random);
+  if (stack?.upper.one.placement?.at !== 'package' || carries(host, stack.upper)) return null;
+  const { left, right, front, back } = stack.lower.rect;
+  const away = random.pick([
+    { xMm: mm(right + 30), yMm: mm(front) },
+    { xMm: mm(left), yMm: mm(back + 30) },
+  ]);
+  const placement = { ...stack.upper.one.placement, ...away };
+  return {
+    view: changePackage(host.view, stack.upper.one.packageId, { placement }),
+    at: [onPackage(stack.upper.one.packageId), onPackage(stack.lower.one.packageId)],
   };
 }
 
@@ -228,6 +255,7 @@ function lowLimit(whose: 'upper' | 'lower') {
     return {
       view: changeItem(host.view, stack[whose].item.id, { greatestStackHeightMm }),
       at: [onPackage(stack.upper.one.packageId), onPackage(stack.lower.one.packageId)],
+      measured: stack.upper.top,
     };
   };
 }
@@ -277,12 +305,37 @@ function unplacedBase(view: LoadView) {
   return { view: changePackage(view, first.packageId, { placement: null }), below: first.packageId };
 }
 
+function hasBaseFilter(each: Placed): boolean {
+  return each.item.filterZones.some((zone) => zone.face === 'base');
+}
+
+/** The shelf under a container with a filter in its base turns out to be solid. */
+function onSolidShelf(host: Host, random: Random): Planted | null {
+  const container = pickPlaced(host, random, (each) => hasBaseFilter(each) && each.one.placement?.at === 'shelf');
+  if (!container || shelfWithId(host.view, container.shelfId).surface === 'solid') return null;
+  return {
+    view: changeShelf(host.view, container.shelfId, { surface: 'solid' }),
+    at: [onPackage(container.one.packageId), onShelf(container.shelfId)],
+  };
+}
+
 export const lidAndStackFaults: readonly Fault[] = [
   { name: 'tray-on-lid-filter', rule: 'lid-filter-covered', plant: onTheFilter((filter) => filter) },
   { name: 'tray-over-corner-of-filter', rule: 'lid-filter-covered', plant: onTheFilter(cornerOver) },
+  {
+    name: 'tray-on-filter-of-stacked',
+    rule: 'lid-filter-covered',
+    plant: onTheFilter((filter) => filter, stackedFilterContainer),
+  },
   { name: 'overhang-from-neighbour', rule: 'lid-filter-covered', plant: overhangFromNeighbour },
   { name: 'overhang-of-higher-member', rule: 'lid-filter-covered', plant: overhangOfHigherMember },
   { name: 'pouch-flat-on-lid-filter', rule: 'lid-filter-covered', plant: onALid('flat', hasLidFilter) },
+  { name: 'base-filter-on-solid-shelf', rule: 'base-filter-shut', plant: onSolidShelf },
+  {
+    name: 'base-filter-on-tray',
+    rule: 'base-filter-shut',
+    plant: onAnother(({ view }) => itemWithCode(view, 'C-15')),
+  },
   {
     name: 'tray-on-tray',
     rule: 'stack-not-permitted',
@@ -290,6 +343,12 @@ export const lidAndStackFaults: readonly Fault[] = [
   },
   { name: 'same-on-same', rule: 'stack-not-permitted', plant: onAnother((_host, below) => below.item) },
   { name: 'stack-upside-down', rule: 'stack-not-permitted', plant: turnedOver },
+  {
+    name: 'stack-member-in-the-air',
+    rule: 'stack-not-permitted',
+    orRules: ['overlap', 'unplaced', 'size-makes-no-sense'],
+    plant: besideItsBase,
+  },
   { name: 'stack-over-upper-limit', rule: 'stack-too-high', plant: lowLimit('upper') },
   { name: 'stack-over-lower-limit', rule: 'stack-too-high', plant: lowLimit('lower') },
   { name: 'third-on-a-stack', rule: 'stack-too-high', plant: oneMore },

@@ -30,6 +30,7 @@ function tooHeavy(kinds: readonly CatalogueItem['kind'][], limit: Limit, whose: 
     return {
       view: changeItemOf(host.view, placed, { massKg, massLimitKg }),
       at: [onPackage(placed.one.packageId)],
+      measured: massKg,
     };
   };
 }
@@ -65,6 +66,7 @@ function shelfOverloaded(counts: 'packages' | 'holders') {
       view: changeShelf(host.view, placed.shelfId, { greatestMassKg: kg(limit) }),
       policy: { ...host.policy, massMarginPercent: percent(0) },
       at: [onShelf(placed.shelfId)],
+      measured: packagesMass(host, placed.shelfId) + holdersMass(host, placed.shelfId),
     };
   };
 }
@@ -78,6 +80,7 @@ function shelfOverMargin(host: Host, random: Random): Planted | null {
     view: changeShelf(host.view, placed.shelfId, { greatestMassKg: kg(all * 1.05) }),
     policy: { ...host.policy, massMarginPercent: percent(10) },
     at: [onShelf(placed.shelfId)],
+    measured: all,
   };
 }
 
@@ -94,6 +97,7 @@ function loadOverloaded(by: 'program' | 'sterilizer', counts: 'packages' | 'hold
           : { ...view, sterilizer: { ...view.sterilizer, greatestLoadMassKg } },
       policy: { ...host.policy, massMarginPercent: percent(0) },
       at: [onLoad],
+      measured: packagesMass(host, null) + holdersMass(host, null),
     };
   };
 }
@@ -105,6 +109,7 @@ function loadOverMargin(host: Host): Planted {
     view: { ...host.view, sterilizer },
     policy: { ...host.policy, massMarginPercent: percent(10) },
     at: [onLoad],
+    measured: all,
   };
 }
 

@@ -157,6 +157,33 @@ function outgrown(measure: 'heightMm' | 'widthMm' | 'lengthMm') {
   };
 }
 
+/** A low, thin pouch in a rack made for thick ones: its slot leaves it room to lie over. */
+function lostInItsSlot(host: Host, random: Random): Planted | null {
+  const { policy } = host;
+  const wide = pickPlaced(host, random, (each) => isInSlot(each) && slotWidth(host, each) >= 50);
+  const small = pickPlaced(
+    host,
+    random,
+    ({ item }) =>
+      item.kind === 'pouch' && wide !== null && leansIn(item, slotWidth(host, wide)) > policy.greatestLeanDeg + 5,
+  );
+  if (!wide || !small || wide === small || wide.one.placement?.at !== 'slot') return null;
+  const placement = wide.one.placement;
+  const emptied = without(host.view, [wide.one.packageId]);
+  return {
+    view: moved(emptied, small.one.packageId, placement),
+    at: [onPackage(small.one.packageId), onHolder(placement.holderId)],
+  };
+}
+
+function slotWidth(host: Host, placed: Placed): number {
+  return placed.holder ? (kindOf(host.view, placed.holder).greatestThicknessMm ?? 0) : 0;
+}
+
+function leansIn(item: CatalogueItem, widthMm: number): number {
+  return leanDegrees(item.widthMm, item.heightMm, widthMm - item.heightMm, item.widthMm);
+}
+
 function trayInASlot(host: Host, random: Random): Planted | null {
   const tray = pickPlaced(host, random, (each) => each.item.kind === 'wrapped-tray' && standsFree(host, each));
   const pouch = pickPlaced(host, random, isInSlot);
@@ -204,6 +231,17 @@ function inSlotNumber(slotOf: (slots: number) => number) {
   };
 }
 
+function looseInARack(host: Host, random: Random): Planted | null {
+  const placed = pickPlaced(host, random, isInSlot);
+  if (placed?.one.placement?.at !== 'slot') return null;
+  const { holderId, paper } = placed.one.placement;
+  const placement = { at: 'basket', holderId, xMm: mm(5), yMm: mm(0), turn: 0, pose: 'on-edge', paper } as const;
+  return {
+    view: changePackage(host.view, placed.one.packageId, { placement }),
+    at: [onPackage(placed.one.packageId), onHolder(holderId)],
+  };
+}
+
 function slotOfABasket(host: Host, random: Random): Planted | null {
   const inside = pickPlaced(host, random, isPouchInBasket);
   if (!inside?.holder) return null;
@@ -228,6 +266,7 @@ export const pouchFaults: readonly Fault[] = [
   { name: 'pouch-too-thick-for-rack', rule: 'holder-fits', plant: outgrown('heightMm') },
   { name: 'pouch-too-high-for-rack', rule: 'holder-fits', plant: outgrown('widthMm') },
   { name: 'pouch-too-long-for-rack', rule: 'holder-fits', plant: outgrown('lengthMm') },
+  { name: 'pouch-lost-in-wide-slot', rule: 'holder-fits', orRules: ['pouch-in-holder'], plant: lostInItsSlot },
   { name: 'tray-in-slot', rule: 'holder-fits', plant: trayInASlot },
   { name: 'reaches-out-of-basket', rule: 'holder-fits', plant: outOfTheBasket },
   { name: 'two-in-one-slot', rule: 'slot-shared', plant: twoInASlot },
@@ -235,5 +274,11 @@ export const pouchFaults: readonly Fault[] = [
   { name: 'slot-zero', rule: 'slot-unknown', plant: inSlotNumber(() => 0) },
   { name: 'slot-between-two', rule: 'slot-unknown', plant: inSlotNumber(() => 1.5) },
   { name: 'slot-not-a-number', rule: 'slot-unknown', plant: inSlotNumber(() => NaN) },
+  {
+    name: 'loose-in-a-rack',
+    rule: 'slot-unknown',
+    orRules: ['holder-fits', 'pouch-in-holder', 'holder-usable', 'unplaced'],
+    plant: looseInARack,
+  },
   { name: 'slot-of-a-basket', rule: 'slot-unknown', plant: slotOfABasket },
 ];

@@ -98,7 +98,7 @@ function wallsAskForMore(host: Host, random: Random): Planted | null {
   if (!placed) return null;
   const distance = wallDistance(host, placed.shelfId, placed.rect);
   const policy = { ...host.policy, wallClearanceMm: mm(Math.floor(distance) + random.whole(1, 10)) };
-  return { view: host.view, policy, at: [onPackage(placed.one.packageId)] };
+  return { view: host.view, policy, at: [onPackage(placed.one.packageId)], measured: distance };
 }
 
 /** Shelves as wide as their chamber, and something at the edge. */
@@ -231,6 +231,7 @@ function asksForMore(host: Host, random: Random): Planted | null {
   return {
     view: changeItemOf(host.view, found.placed, { clearanceMm }),
     at: [onPackage(found.placed.one.packageId)],
+    measured: found.gap,
   };
 }
 
@@ -241,6 +242,7 @@ function houseAsksForMore(host: Host, random: Random): Planted | null {
     view: changeItemOf(host.view, found.placed, { clearanceMm: null }),
     policy: { ...host.policy, packageClearanceMm: mm(Math.floor(found.gap) + random.whole(1, 10)) },
     at: [onPackage(found.placed.one.packageId)],
+    measured: found.gap,
   };
 }
 
@@ -302,6 +304,7 @@ function lowShelf(fits: (each: Placed) => boolean) {
     return {
       view: changeShelf(host.view, placed.shelfId, { clearHeightMm }),
       at: tooHigh(host, placed, clearHeightMm),
+      measured: placed.top,
     };
   };
 }
@@ -313,7 +316,12 @@ function headroomAsked(host: Host, random: Random): Planted | null {
   if (left < 0 || left > 190) return null;
   const headroomMm = mm(Math.floor(left) + random.whole(1, 8));
   const greatest = shelfWithId(host.view, placed.shelfId).clearHeightMm - headroomMm;
-  return { view: host.view, policy: { ...host.policy, headroomMm }, at: tooHigh(host, placed, greatest) };
+  return {
+    view: host.view,
+    policy: { ...host.policy, headroomMm },
+    at: tooHigh(host, placed, greatest),
+    measured: placed.top,
+  };
 }
 
 /** The share of a shelf in per cent that packages on its deck cover, holders left out. */
