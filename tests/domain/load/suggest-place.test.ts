@@ -141,8 +141,8 @@ describe('suggestPlace', () => {
   it('takes a place that a lead would have to accept only when there is no better', () => {
     // Chamber no wider than its shelf: what stands at the edge is too near to the wall, and racks stand where they stand.
     const sterilizer = { ...aView().sterilizer, chamberWidthMm: mm(560) };
-    const near = aHolder('rs-0', smallRack, { xMm: mm(0) });
-    // Slot 1 is 17 mm from the wall, slot 2 is 45 mm.
+    const near = aHolder('rs-0', smallRack, { xMm: mm(2) });
+    // Slot 1 is 19 mm from the wall, slot 2 is 47 mm.
     expect(suggest(aView({ sterilizer, holders: [near] }), forceps)?.placement).toEqual(inSlot('rs-0', 2));
     const inTheWay = Array.from({ length: 7 }, (_, index) =>
       aPackage(`in${index}`, forceps, { placement: inSlot('rs-0', index + 2) }),

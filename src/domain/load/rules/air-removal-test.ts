@@ -19,7 +19,9 @@ export const airRemovalTest: Rule = {
 };
 
 function find(scene: Scene): readonly Draft[] {
-  const { sterilizer, airRemoval } = scene.view;
+  const { sterilizer, today } = scene.view;
+  const airRemoval =
+    scene.view.airRemoval && mayBeOn(today, scene.view.airRemoval.testedAt) ? scene.view.airRemoval : null;
   if (!sterilizer.needsAirRemovalTest || airRemoval?.result === 'passed') return [];
   return [
     {
@@ -33,4 +35,16 @@ function find(scene: Scene): readonly Draft[] {
       places: onLoad,
     },
   ];
+}
+
+const hourMs = 3_600_000;
+
+/**
+ * Whether an instant falls on a calendar day in any time zone: they lie between 12 hours behind and 14 hours ahead of UTC.
+ * Whoever gathers the load knows the facility's own zone and hands over the test of its day; one of another day proves nothing.
+ */
+function mayBeOn(day: string, instant: string): boolean {
+  const begins = Date.parse(`${day}T00:00:00Z`);
+  const at = Date.parse(instant);
+  return at >= begins - 14 * hourMs && at < begins + (24 + 12) * hourMs;
 }

@@ -49,3 +49,8 @@ export function racksFor(item: CatalogueItem, holders: readonly HolderBody[], ga
   const order = rackKindsFor(item, [...new Set(holders.map((holder) => holder.kind))], gapMm);
   return order.flatMap((kind) => holders.filter((holder) => holder.kind === kind));
 }
+
+/** Whether a holder takes up room of its own: a wedge or a spacer is meant to be under something. */
+export function hasFrame({ kind }: HolderBody): boolean {
+  return kind.form === 'rack' || kind.form === 'basket';
+}

@@ -1,7 +1,7 @@
 /*
- * The label of a pouch that no holder keeps apart can be read: nothing stands close in front of its film side.
+ * The label of a pouch that no slot keeps apart can be read: nothing stands close in front of its film side.
  * Source: labels go on the plastic side (dental safety association answers and label guides, restated); how much room reading
- * takes is common practice, no source. In a holder each pouch can be tipped by itself, so its label counts as readable.
+ * takes is common practice, no source. In a slot each pouch can be tipped by itself, so its label counts as readable.
  */
 import { gapAcross, gapAlong, type ShelfBox } from '../../geometry/box';
 import { filmLooks, type Body } from '../layout';
@@ -31,7 +31,7 @@ export const labelHidden: Rule = {
 function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
   const limit = limitOf(null, scene.policy, 'labelReadingGapMm');
   return bodies.flatMap((body) => {
-    if (body.thinAxis === null || body.holder) return [];
+    if (body.thinAxis === null || body.slot !== null) return [];
     const nearest = nearestInFront(bodies, body);
     if (!nearest || nearest.gapMm >= limit.limit - slackMm) return [];
     const figure = { measured: nearest.gapMm, unit: 'mm', want: 'at-least', ...limit } as const;

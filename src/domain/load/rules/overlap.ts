@@ -3,7 +3,7 @@
  * Source: our own check of the drawn cart.
  */
 import { gapAcross, gapAlong, gapUpward, type ShelfBox } from '../../geometry/box';
-import type { HolderBody } from '../layout';
+import { hasFrame } from './holder-fit';
 import { moveNamed } from './moves';
 import { reachIntoEachOther } from './near-pairs';
 import { onHolder, onPackage } from './places';
@@ -74,11 +74,6 @@ function ofHolders(scene: Scene, { holders }: OnShelf): readonly Draft[] {
         places: [onHolder(b.holder), onHolder(a.holder)],
       })),
   );
-}
-
-/** A wedge or a spacer is meant to be under something. */
-function hasFrame({ kind }: HolderBody): boolean {
-  return kind.form === 'rack' || kind.form === 'basket';
 }
 
 /** How far two boxes reach into each other, the shortest way out in plan; 0 or less where they do not. */

@@ -3,9 +3,15 @@
  * Source: our own check; a load can be judged only from data that make sense.
  */
 import type { FindingPlace } from '../finding';
-import type { CatalogueItem, Shelf, Sterilizer } from '../model';
-import { isSensibleLength, isSensibleMass } from '../sensible';
-import { onLoad, onPackage, onShelf } from './places';
+import {
+  wrongOfHolderKind,
+  wrongOfItem,
+  wrongOfPolicy,
+  wrongOfProgram,
+  wrongOfShelf,
+  wrongOfSterilizer,
+} from './measures';
+import { onHolder, onLoad, onPackage, onShelf } from './places';
 import type { Draft, Rule } from './rule';
 import type { Scene } from './scene';
 import { drawing } from './sources';
@@ -22,11 +28,19 @@ export const sizeMakesNoSense: Rule = {
 };
 
 function find(scene: Scene): readonly Draft[] {
-  const { cart, sterilizer } = scene.view;
+  const { cart, sterilizer, program } = scene.view;
   return [
     ...ofPackages(scene),
+    ...ofHolders(scene),
     ...cart.shelves.flatMap((shelf) => told(shelf.id, shelf.name, wrongOfShelf(shelf, sterilizer), onShelf(shelf))),
     ...told(sterilizer.id, sterilizer.name, wrongOfSterilizer(sterilizer), onLoad),
+    ...told(program.id, program.code, wrongOfProgram(program), onLoad),
+    ...wrongOfPolicy(scene.policy).map((label) => ({
+      subjects: [label],
+      title: `The house rule “${label}” is set to something that cannot be`,
+      remedy: 'Have the house rule mended.',
+      places: onLoad,
+    })),
   ];
 }
 
@@ -45,13 +59,11 @@ function ofPackages(scene: Scene): readonly Draft[] {
   });
 }
 
-function wrongOfItem(item: CatalogueItem): string | null {
-  const lengths = { length: item.lengthMm, width: item.widthMm, height: item.heightMm };
-  const [badLength] = Object.entries(lengths).filter(([, value]) => !isSensibleLength(value));
-  if (badLength) return `a ${badLength[0]} of ${badLength[1]} mm`;
-  const masses = { mass: item.massKg, 'metal mass': item.metalMassKg, 'textile mass': item.textileMassKg };
-  const [badMass] = Object.entries(masses).filter(([, value]) => !isSensibleMass(value));
-  return badMass ? `a ${badMass[0]} of ${badMass[1]} kg` : null;
+function ofHolders(scene: Scene): readonly Draft[] {
+  const wrongOf = new Map(scene.view.holderKinds.map((kind) => [kind.id, wrongOfHolderKind(kind)]));
+  return scene.view.holders.flatMap((holder) =>
+    told(holder.holderId, scene.holderName(holder), wrongOf.get(holder.kindId) ?? null, [onHolder(holder)]),
+  );
 }
 
 function told(id: string, name: string, wrong: string | null, places: readonly FindingPlace[]): readonly Draft[] {
@@ -64,22 +76,4 @@ function told(id: string, name: string, wrong: string | null, places: readonly F
       places,
     },
   ];
-}
-
-function wrongOfShelf(shelf: Shelf, sterilizer: Sterilizer): string | null {
-  if (!isSensibleLength(shelf.widthMm)) return `a width of ${shelf.widthMm} mm`;
-  if (!isSensibleLength(shelf.depthMm)) return `a depth of ${shelf.depthMm} mm`;
-  if (!isSensibleLength(shelf.clearHeightMm)) return `a clear height of ${shelf.clearHeightMm} mm`;
-  if (!isSensibleMass(shelf.greatestMassKg)) return `a greatest mass of ${shelf.greatestMassKg} kg`;
-  if (shelf.widthMm > sterilizer.chamberWidthMm || shelf.depthMm > sterilizer.chamberDepthMm) {
-    return `a size of ${shelf.widthMm} × ${shelf.depthMm} mm, more than the chamber of ${sterilizer.name}`;
-  }
-  return null;
-}
-
-function wrongOfSterilizer(sterilizer: Sterilizer): string | null {
-  if (!isSensibleLength(sterilizer.chamberWidthMm)) return `a chamber width of ${sterilizer.chamberWidthMm} mm`;
-  if (!isSensibleLength(sterilizer.chamberDepthMm)) return `a chamber depth of ${sterilizer.chamberDepthMm} mm`;
-  if (!isSensibleMass(sterilizer.greatestLoadMassKg)) return `a load limit of ${sterilizer.greatestLoadMassKg} kg`;
-  return null;
 }

@@ -49,7 +49,7 @@ describe('labels can be read', () => {
     expect(titlesOf(rule, unknown)).toEqual([]);
   });
 
-  it('says nothing in a rack or a basket, where each pouch can be tipped by itself', () => {
+  it('says nothing in a rack, where each pouch can be tipped by itself, but looks into a basket', () => {
     const load = aLoad()
       .withHolder('RS-1', 'RS', { x: 20, y: 40 })
       .withHolder('TB-1', 'TB', { x: 20, y: 600 })
@@ -57,6 +57,10 @@ describe('labels can be read', () => {
       .withPackage('P-02', inSlot('RS-1', 2))
       .withPackage('P-03', inBasket('TB-1', 0, 10, { turn: 90, paper: 'left' }))
       .withPackage('P-04', inBasket('TB-1', 0, 30, { turn: 90, paper: 'left' }));
-    expect(titlesOf(rule, load, { labelReadingGapMm: mm(100) })).toEqual([]);
+    // P-03 is 12 mm thick: from 10 to 22, and P-04 begins at 30.
+    expect(titlesOf(rule, load, { labelReadingGapMm: mm(100) })).toEqual([
+      'The label of Mayo scissors curved is hidden by Single curette set of 2, 8 mm in front of it',
+    ]);
+    expect(titlesOf(rule, load, { labelReadingGapMm: mm(8) })).toEqual([]);
   });
 });

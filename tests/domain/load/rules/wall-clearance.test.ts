@@ -34,6 +34,17 @@ describe('clear of the chamber walls', () => {
     expect(titlesOf(rule, tight.withPackage('W-03', onLower(15, 5)), { wallClearanceMm: mm(26) })).toHaveLength(1);
   });
 
+  it('finds a holder that touches a wall, although its pouches keep away from it, but not one that is only near it', () => {
+    const at = (x: number) => tight.withHolder('RS-1', 'RS', { x, y: 40 }).withPackage('P-01', inSlot('RS-1', 4));
+    expect(findingsOf(rule, at(-10))).toMatchObject([
+      {
+        title: 'Holder RS-1 is 0 mm from the left wall, want 25 mm',
+        places: [{ on: 'holder', holderId: 'RS-1', slot: null }],
+      },
+    ]);
+    expect(titlesOf(rule, at(-9))).toEqual([]);
+  });
+
   it('is one finding for a holder, at its nearest pouch', () => {
     const load = tight
       .withHolder('RS-1', 'RS', { x: -3, y: 40 })
