@@ -1,6 +1,6 @@
 import { filterRects, type Body } from '#domain/load/layout';
+import { BasinPlan, BasinSide, leanFromRoom } from './basin-glyph';
 import {
-  Basin,
   ChallengeDevice,
   ContainerFront,
   ContainerPlan,
@@ -35,6 +35,12 @@ function PouchPlan({ body, box }: { body: Body; box: PixelBox }) {
   return <LeafFace box={box} isPaper={body.paperLooks === 'up'} label={body.item.code} />;
 }
 
+/** How far a basin leans to the side, seen from the door end: not at all where it leans toward the door or away from it. */
+function leanSeen({ item, box, placement, lengthAxis }: Body): number {
+  if (placement.pose !== 'tilted' || lengthAxis === 'x') return 0;
+  return leanFromRoom({ across: item.widthMm, thick: item.heightMm }, box.top - box.bottom);
+}
+
 /** A package as it looks from the door end. */
 export function BodyFront({ body, box }: { body: Body; box: PixelBox }) {
   const label = body.item.code;
@@ -48,7 +54,7 @@ export function BodyFront({ body, box }: { body: Body; box: PixelBox }) {
     case 'textile-pack':
       return <Textile box={box} label={label} isUpright={body.placement.pose === 'on-edge'} />;
     case 'basin':
-      return <Basin box={box} label={label} isTilted={body.placement.pose === 'tilted'} isFromAbove={false} />;
+      return <BasinSide box={box} label={label} pose={body.placement.pose} lean={leanSeen(body)} />;
     case 'challenge-device':
       return <ChallengeDevice box={box} />;
   }
@@ -75,7 +81,7 @@ export function BodyPlan({
     case 'textile-pack':
       return <Textile box={box} label={label} isUpright={body.placement.pose === 'on-edge'} />;
     case 'basin':
-      return <Basin box={box} label={label} isTilted={body.placement.pose === 'tilted'} isFromAbove />;
+      return <BasinPlan box={box} label={label} />;
     case 'challenge-device':
       return <ChallengeDevice box={box} />;
   }

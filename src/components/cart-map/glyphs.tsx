@@ -41,7 +41,7 @@ function isRoomFor(label: string, box: PixelBox): boolean {
   return box.height >= roomForLabel.height && box.width >= Math.max(roomForLabel.width, label.length * 6.7 + 4);
 }
 
-function CentredLabel({ box, label, ground }: { box: PixelBox; label: string | undefined; ground: string }) {
+export function CentredLabel({ box, label, ground }: { box: PixelBox; label: string | undefined; ground: string }) {
   if (label === undefined || !isRoomFor(label, box)) return null;
   const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
   const width = label.length * 6.7 + 8;
@@ -223,38 +223,6 @@ export function Textile({ box, label, isUpright }: GlyphProps & { isUpright: boo
       <rect {...box} rx={4} strokeWidth="1.4" className="fill-paper-0 stroke-paper-edge" />
       <path d={folds} strokeWidth="1" className="stroke-paper-edge/60" fill="none" />
       <CentredLabel box={box} label={label} ground="fill-paper-0" />
-    </g>
-  );
-}
-
-/** Basins: nested curves; tilted ones lean, so that they drain. */
-export function Basin({ box, label, isTilted, isFromAbove }: GlyphProps & { isTilted: boolean; isFromAbove: boolean }) {
-  const { x, y, width: w, height: h } = box;
-  const curve = (inset: number) =>
-    `M${x + inset} ${y + h * 0.25 + inset / 2}q${w / 2 - inset} ${h * 0.75} ${w - 2 * inset} 0`;
-  return (
-    <g>
-      {isFromAbove ? (
-        <>
-          <rect {...box} rx={Math.min(w, h) / 2.4} strokeWidth="1.5" className="fill-paper-0 stroke-paper-edge" />
-          <rect
-            x={x + w * 0.1}
-            y={y + h * 0.1}
-            width={w * 0.8}
-            height={h * 0.8}
-            rx={Math.min(w, h) / 3}
-            fill="none"
-            strokeWidth="1"
-            className="stroke-paper-edge"
-          />
-        </>
-      ) : (
-        <g transform={isTilted ? `rotate(-9 ${x + w / 2} ${y + h})` : undefined}>
-          <path d={`${curve(1)}z`} strokeWidth="1.5" className="fill-paper-0 stroke-paper-edge" />
-          <path d={curve(5)} fill="none" strokeWidth="1" className="stroke-paper-edge" />
-        </g>
-      )}
-      <CentredLabel box={box} label={label} ground="fill-paper-0/80" />
     </g>
   );
 }

@@ -1,6 +1,6 @@
 import type { CatalogueItem } from '#domain/load/model';
+import { BasinPlan, BasinSide } from '../../../components/cart-map/basin-glyph';
 import {
-  Basin,
   ContainerPlan,
   Leaf,
   LeafFace,
@@ -122,7 +122,7 @@ function PlanBody({ item, box, scale }: { item: DrawnItem; box: PixelBox; scale:
     case 'textile-pack':
       return <Textile box={box} isUpright={!isOnEdge} />;
     case 'basin':
-      return <Basin box={box} isTilted={false} isFromAbove />;
+      return <BasinPlan box={box} />;
   }
 }
 
@@ -142,7 +142,7 @@ function SideBody({ item, box, scale }: { item: DrawnItem; box: PixelBox; scale:
     case 'textile-pack':
       return <Textile box={box} isUpright={item.pose === 'on-edge'} />;
     case 'basin':
-      return <Basin box={box} isTilted={item.pose === 'tilted'} isFromAbove={false} />;
+      return <BasinSide box={box} pose={item.pose} />;
   }
 }
 
