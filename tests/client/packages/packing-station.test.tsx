@@ -144,6 +144,15 @@ describe('the packing station', () => {
     expect(server.callsTo('POST', '/api/packages')).toEqual([]);
   });
 
+  it('reminds of the inner pouch where an item goes into two', async () => {
+    const twice = { ...scissors, packaging: 'double-pouch' as const };
+    const { user } = open({
+      'GET /api/items': () => ({ json: { items: [twice, plates], total: 2, page: 1, pageSize: 200 } }),
+    });
+    await user.click(await screen.findByRole('button', { name: /Mayo scissors curved/ }));
+    expect(contents()).toHaveAccessibleDescription(/inner pouch is not folded/);
+  });
+
   it('makes the packages, then their labels, shows the codes and opens the labels', async () => {
     const { user, server, tab } = open();
     await user.click(await screen.findByRole('button', { name: /Mayo scissors/ }));

@@ -94,7 +94,7 @@ export function PackingPanel({ item, isWaiting, error, layout, onLayout, onPack 
           <CheckboxField
             className="py-2"
             label="Contents complete and in order"
-            hint="You have looked: clean, dry, whole, and everything on the list is there."
+            hint={contentsHint(item)}
             checked={said.contents}
             onChange={(event) => {
               say({ contents: event.target.checked });
@@ -183,4 +183,12 @@ export function PackingPanel({ item, isWaiting, error, layout, onLayout, onPack 
       </footer>
     </form>
   );
+}
+
+/** A double pouch: perioperative packaging guideline of 2019, summary. Hinged instruments: N.J. Admin. Code 8:43G-8.11(a). */
+function contentsHint({ packaging }: Pick<Item, 'packaging'>): string {
+  const looked = 'You have looked: clean, dry, whole, hinges open, and everything on the list is there.';
+  return packaging === 'double-pouch'
+    ? `${looked} The inner pouch is not folded and lies the same way round as the outer: film to film.`
+    : looked;
 }
