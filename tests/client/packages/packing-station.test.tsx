@@ -84,6 +84,7 @@ const run = {
   createdBy: 'Dele Oyelaran',
   createdAt: '2026-03-17T07:00:00.000Z',
   load: null,
+  version: 1,
 } as const;
 
 const aPackage: PackageSummary = {
