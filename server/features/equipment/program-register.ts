@@ -3,6 +3,7 @@ import { programColumns } from '#domain/catalogue/equipment-columns';
 import type { ProgramFields } from '#domain/catalogue/equipment-fields';
 import { putRows } from '../../platform/register/put-rows';
 import { keyOfCode, type FiledRegister } from '../../platform/register/register';
+import { endQualifications } from './end-qualifications';
 import { noteEquipment, noteImportOf, noteOf } from './equipment-history';
 import type { ProgramRow } from './equipment-rows';
 import { programFieldsFromRow } from './program-read-model';
@@ -41,6 +42,7 @@ export const programRegister: FiledRegister<ProgramFields> = {
       ...rowFrom(fields),
     }));
     await putRows(context.trx, 'programs', rows);
+    await endQualifications(context, written);
     await noteEquipment(
       context,
       'program',

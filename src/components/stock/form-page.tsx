@@ -86,7 +86,7 @@ export function FormPart({ title, hint, children }: { title: string; hint?: Reac
   return (
     <fieldset>
       <legend className="mb-3 w-full border-b border-paper-3 pb-1.5 text-head">{title}</legend>
-      {hint !== undefined && <p className="-mt-1 mb-3 text-small text-ink-2">{hint}</p>}
+      {hint !== undefined && <div className="-mt-1 mb-3 text-small text-ink-2">{hint}</div>}
       <div className="grid items-start gap-x-4 gap-y-4 sm:grid-cols-2 tablet:grid-cols-3">{children}</div>
     </fieldset>
   );

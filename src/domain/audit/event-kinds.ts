@@ -18,6 +18,12 @@ export type AuditPayloads = {
   'items.imported': { readonly added: number; readonly changed: number; readonly refused: number };
   'equipment.added': { readonly what: string; readonly code: string };
   'equipment.changed': { readonly what: string; readonly before: unknown; readonly after: unknown };
+  'equipment.qualification-ended': {
+    readonly sterilizer: string;
+    readonly program: string;
+    /** What of the program's cycle was changed. */
+    readonly because: readonly string[];
+  };
   'equipment.imported': {
     readonly what: string;
     readonly added: number;

@@ -41,7 +41,11 @@ export const programColumns: ColumnSet<ProgramFields> = {
   code: textColumn({ name: 'code', about: 'Your code for it. It stays as it is for good.', example: 'W4-30' }),
   name: textColumn({ name: 'name', about: 'What people call it.', example: 'Wrapped, 4 min, dry 30 min' }),
   type: choiceColumn(
-    { name: 'cycle_type', about: `One of ${cycleTypes.join(', ')}.`, example: 'dynamic-air-removal' },
+    {
+      name: 'cycle_type',
+      about: `One of ${cycleTypes.join(', ')}. With another type, temperature, exposure or drying a program loses its qualification on every sterilizer.`,
+      example: 'dynamic-air-removal',
+    },
     cycleTypes,
   ),
   temperatureC: numberColumn({ name: 'temperature_c', about: 'Temperature of the exposure.', example: '132' }, celsius),

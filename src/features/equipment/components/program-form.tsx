@@ -1,7 +1,9 @@
 import { programFieldsSchema, type ProgramOnFile } from '#contract/equipment';
 import type { ProgramFields } from '#domain/catalogue/equipment-fields';
+import { cycleChanges } from '#domain/catalogue/cycle-change';
 import { cycleTypes } from '#domain/catalogue/cycle-need-text';
 import { zodResolver } from '@hookform/resolvers/zod';
+import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { cycleTypeWords } from '../../../components/stock/cycle-words';
@@ -10,8 +12,10 @@ import { QuantityField } from '../../../components/stock/quantity-field';
 import { showAtFields, useWrite } from '../../../components/stock/use-write';
 import { useAnnounce } from '../../../components/ui/announcer';
 import { CheckboxField } from '../../../components/ui/checkbox-field';
+import { ConfirmDialog } from '../../../components/ui/confirm-dialog';
 import { SelectField } from '../../../components/ui/select-field';
 import { TextField } from '../../../components/ui/text-field';
+import { listInWords } from '../../../lib/format';
 import { changesBetween, optionsOf } from '../equipment-words';
 import { useKeepProgram } from '../mutations';
 
@@ -40,7 +44,10 @@ export function ProgramForm({
         : fieldsOf(program),
   });
   const { errors } = formState;
-  const send = handleSubmit(async (fields) => {
+  const [asking, setAsking] = useState<ProgramFields | null>(null);
+  const qualifiedOn = program?.qualifiedOn ?? [];
+
+  async function sendFields(fields: ProgramFields) {
     const { code: _code, ...changeable } = fields;
     try {
       const kept = await write((requestId) =>
@@ -52,7 +59,13 @@ export function ProgramForm({
       onLeave(kept.id);
     } catch (error) {
       showAtFields(error, setError);
+      throw error;
     }
+  }
+
+  const send = handleSubmit(async (fields) => {
+    if (program !== null && qualifiedOn.length > 0 && cycleChanges(program, fields).length > 0) setAsking(fields);
+    else await sendFields(fields).catch(() => undefined);
   });
   return (
     <FormPage
@@ -70,7 +83,20 @@ export function ProgramForm({
         {program === null && <TextField label="Code" isCode error={errors.code?.message} {...register('code')} />}
         <TextField label="Name" error={errors.name?.message} className="sm:col-span-2" {...register('name')} />
       </FormPart>
-      <FormPart title="What it does">
+      <FormPart
+        title="What it does"
+        {...(qualifiedOn.length > 0
+          ? {
+              hint: (
+                <span className="block border-l-4 border-straw-3 bg-straw-1 px-4 py-2.5 text-row text-ink-1">
+                  {listInWords(qualifiedOn)} {qualifiedOn.length === 1 ? 'is' : 'are'} qualified for this cycle. Another
+                  type, temperature, exposure or drying makes it another cycle, and takes the qualification away. To
+                  keep it, leave these as they are and add a program of its own.
+                </span>
+              ),
+            }
+          : {})}
+      >
         <SelectField
           label="Type"
           options={optionsOf(cycleTypes, cycleTypeWords)}
@@ -96,6 +122,21 @@ export function ProgramForm({
           />
         )}
       </FormPart>
+      {asking !== null && (
+        <ConfirmDialog
+          isOpen
+          onClose={() => {
+            setAsking(null);
+          }}
+          title={`Take the qualification for ${program?.code ?? ''} away?`}
+          confirmWords="Change the cycle"
+          waitingWords="Changing it"
+          kind="stop"
+          onConfirm={() => sendFields(asking)}
+        >
+          {`It is another cycle now. No load can be opened with it on ${listInWords(qualifiedOn)} until somebody says there that it is qualified again; a load being built with it cannot be closed.`}
+        </ConfirmDialog>
+      )}
     </FormPage>
   );
 }
