@@ -14,6 +14,7 @@ export const places: readonly Place[] = [
   { to: '/', label: 'Today', icon: 'today', permissions: [] },
   { to: '/loads', label: 'Load', icon: 'load', permissions: ['load.view'] },
   { to: '/pack', label: 'Pack', icon: 'pack', permissions: ['package.pack'] },
+  { to: '/lessons', label: 'Lessons', icon: 'practice', permissions: ['load.view'] },
   { to: '/stock', label: 'Stock', icon: 'stock', permissions: ['item.view', 'equipment.view'] },
   { to: '/people', label: 'People', icon: 'people', permissions: ['people.view'] },
 ];

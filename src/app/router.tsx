@@ -76,6 +76,8 @@ export function createRoutes(queryClient: QueryClient): RouteObject[] {
               children: [
                 { path: 'loads', ...lazyRoute(() => import('./routes/loads')) },
                 { path: 'loads/:loadId', ...lazyRoute(() => import('./routes/load')) },
+                { path: 'lessons', ...lazyRoute(() => import('./routes/lessons')) },
+                { path: 'lessons/:ruleId', ...lazyRoute(() => import('./routes/lesson')) },
               ],
             },
             {

@@ -11,13 +11,13 @@ export type DialogProps = {
   children: ReactNode;
   /** The buttons at its foot; the main one first. */
   actions?: ReactNode;
-  size?: 'normal' | 'wide';
+  size?: 'normal' | 'wide' | 'full';
   /** paper: something to read or fill in. film: something to do now. */
   material?: 'paper' | 'film';
   role?: 'dialog' | 'alertdialog';
 };
 
-const widths = { normal: 'tablet:max-w-[33rem]', wide: 'tablet:max-w-[52rem]' } as const;
+const widths = { normal: 'tablet:max-w-[33rem]', wide: 'tablet:max-w-[52rem]', full: 'tablet:max-w-[78rem]' } as const;
 
 /** A sheet over the screen. The screen below keeps all it has. On the phone it rises from the foot. */
 export function Dialog({

@@ -1,5 +1,9 @@
+import type { Severity } from '#domain/load/finding';
+
 /** hold: holds the load. look: may stay with a written reason. note: good to know. Three outlines, not only three colours. */
 export type PinLevel = 'hold' | 'look' | 'note';
+
+export const levelOf: Readonly<Record<Severity, PinLevel>> = { stop: 'hold', accept: 'look', advice: 'note' };
 
 export const pinWords: Readonly<Record<PinLevel, string>> = {
   hold: 'Holds the load',

@@ -1,7 +1,7 @@
-import type { RuleId } from '../load/finding';
+import { ruleIds, type RuleId } from '../load/finding';
 import { rules } from '../load/rules/all-rules';
 import type { Rule } from '../load/rules/rule';
-import type { Lesson } from './lesson';
+import { lessonFamilies, type Lesson, type LessonFamily } from './lesson';
 import { airRemovalTestLesson } from './rules/air-removal-test';
 import { baseFilterShutLesson } from './rules/base-filter-shut';
 import { basinDrainsLesson } from './rules/basin-drains';
@@ -115,3 +115,11 @@ export function ruleOf(ruleId: RuleId): Rule {
   if (!rule) throw new Error(`No rule judges ${ruleId}.`);
   return rule;
 }
+
+export type FamilyOfLessons = { readonly family: LessonFamily; readonly ruleIds: readonly RuleId[] };
+
+/** Every lesson in the order in which they are listed. */
+export const lessonsByFamily: readonly FamilyOfLessons[] = lessonFamilies.map((family) => ({
+  family,
+  ruleIds: ruleIds.filter((ruleId) => lessons[ruleId].family === family),
+}));

@@ -17,21 +17,21 @@ const looking = { mayOpenLoads: false, mayAddItems: false, mayAddPeople: false }
 
 /** Who sees what, written down apart from the program's own table. */
 const expected: Readonly<Record<Role, Sees>> = {
-  technician: { ...looking, rail: ['Today', 'Load', 'Pack', 'Stock'], mayOpenLoads: true },
-  lead: { ...looking, rail: ['Today', 'Load', 'Pack', 'Stock'], mayOpenLoads: true, mayAddItems: true },
+  technician: { ...looking, rail: ['Today', 'Load', 'Pack', 'Lessons', 'Stock'], mayOpenLoads: true },
+  lead: { ...looking, rail: ['Today', 'Load', 'Pack', 'Lessons', 'Stock'], mayOpenLoads: true, mayAddItems: true },
   supervisor: {
     ...looking,
-    rail: ['Today', 'Load', 'Pack', 'Stock', 'People'],
+    rail: ['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'People'],
     mayOpenLoads: true,
     mayAddItems: true,
   },
-  'infection-prevention': { ...looking, rail: ['Today', 'Load', 'Stock'] },
-  'operating-room': { ...looking, rail: ['Today', 'Load', 'Stock'] },
-  engineer: { ...looking, rail: ['Today', 'Load', 'Stock'] },
-  surveyor: { ...looking, rail: ['Today', 'Load', 'Stock', 'People'] },
+  'infection-prevention': { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock'] },
+  'operating-room': { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock'] },
+  engineer: { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock'] },
+  surveyor: { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock', 'People'] },
   administrator: {
     mayOpenLoads: false,
-    rail: ['Today', 'Load', 'Stock', 'People'],
+    rail: ['Today', 'Load', 'Lessons', 'Stock', 'People'],
     mayAddItems: true,
     mayAddPeople: true,
   },
@@ -40,6 +40,7 @@ const expected: Readonly<Record<Role, Sees>> = {
 const addresses: Readonly<Record<string, string>> = {
   Load: '/loads',
   Pack: '/pack/station',
+  Lessons: '/lessons',
   Stock: '/stock',
   People: '/people',
 };

@@ -1,13 +1,12 @@
 import type { LoadDetail } from '#contract/loads';
-import type { Finding, Fix, Severity } from '#domain/load/finding';
+import type { Finding, Fix } from '#domain/load/finding';
 import type { LetteredFinding } from '../../../components/cart-map/map-model';
 import { Button } from '../../../components/ui/button';
 import { FilmPanel } from '../../../components/ui/film-panel';
 import { PanelHead } from '../../../components/ui/heading';
-import { LevelWords, Pin, type PinLevel } from '../../../components/ui/pin';
+import { levelOf, LevelWords, Pin } from '../../../components/ui/pin';
+import { useLessonOpener } from '../../../lib/lesson-opener';
 import { figureWords, limitWords } from '../figure-words';
-
-export const levelOf: Readonly<Record<Severity, PinLevel>> = { stop: 'hold', accept: 'look', advice: 'note' };
 
 type FindingsPanelProps = {
   readonly detail: LoadDetail;
@@ -97,6 +96,8 @@ function OpenFinding({
 }: FindingsPanelProps & { entry: LetteredFinding }) {
   const { letter, finding } = entry;
   const { fix } = finding;
+  const openLesson = useLessonOpener();
+  const isMendable = isBuilding && (fix !== null || finding.severity === 'accept');
   return (
     <li className="-ml-3">
       <FilmPanel seal="none" className="grid grid-cols-[1.625rem_1fr] gap-x-2.5 px-3 py-2">
@@ -125,9 +126,9 @@ function OpenFinding({
           <p className="mt-1 text-least text-ink-2">
             <LevelWords level={levelOf[finding.severity]} /> <span className="ml-1.5">{finding.source.text}</span>
           </p>
-          {isBuilding && (fix !== null || finding.severity === 'accept') && (
+          {(isMendable || openLesson) && (
             <div className="mt-1.5 flex flex-wrap gap-2">
-              {fix && (
+              {isMendable && fix && (
                 <Button
                   size="small"
                   onPress={() => {
@@ -137,7 +138,7 @@ function OpenFinding({
                   {fix.label}
                 </Button>
               )}
-              {finding.severity === 'accept' && (
+              {isMendable && finding.severity === 'accept' && (
                 <Button
                   size="small"
                   kind="quiet"
@@ -149,6 +150,17 @@ function OpenFinding({
                   }}
                 >
                   Let it stay
+                </Button>
+              )}
+              {openLesson && (
+                <Button
+                  size="small"
+                  kind="plain"
+                  onPress={() => {
+                    openLesson(finding.ruleId);
+                  }}
+                >
+                  Why? 90 seconds
                 </Button>
               )}
             </div>

@@ -2,8 +2,7 @@ import type { Block, CloseDecision } from '#domain/load/decide-close';
 import { Icon } from '../../../components/icon';
 import type { LetteredFinding } from '../../../components/cart-map/map-model';
 import { Button } from '../../../components/ui/button';
-import { Pin } from '../../../components/ui/pin';
-import { levelOf } from './findings-panel';
+import { levelOf, Pin } from '../../../components/ui/pin';
 
 const shownBlocks = 4;
 
