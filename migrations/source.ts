@@ -3,6 +3,7 @@ import * as createFirstTables from './20261201090000_create_first_tables';
 import * as addPolicyVersions from './20261201180000_add_policy_versions';
 import * as addFinishedLessons from './20261201190000_add_finished_lessons';
 import * as addFacingToItems from './20261201200000_add_facing_to_items';
+import * as addOrderOfLoads from './20261201210000_add_order_of_loads';
 
 /**
  * Every migration, oldest first. A static list and names without extension, since Knex stores the names: the same
@@ -13,6 +14,7 @@ const migrations: Readonly<Record<string, Knex.Migration>> = {
   '20261201180000_add_policy_versions': addPolicyVersions,
   '20261201190000_add_finished_lessons': addFinishedLessons,
   '20261201200000_add_facing_to_items': addFacingToItems,
+  '20261201210000_add_order_of_loads': addOrderOfLoads,
 };
 
 export const migrationSource: Knex.MigrationSource<string> = {

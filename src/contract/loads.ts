@@ -26,7 +26,11 @@ const rawScanSchema = z.string().max(20_000);
 
 export const loadListQuerySchema = z.strictObject({
   state: z.enum(['open', 'closed', 'all']).default('open'),
+  /** The last load of the page before: only what was opened before it. */
+  olderThan: idSchema.optional(),
+  limit: z.coerce.number().int().min(1).max(200).default(50),
 });
+export type LoadListQuery = z.output<typeof loadListQuerySchema>;
 
 export const loadSummarySchema = z.object({
   id: idSchema,
@@ -45,7 +49,7 @@ export const loadSummarySchema = z.object({
   version: z.number().int(),
 });
 export type LoadSummary = z.infer<typeof loadSummarySchema>;
-export const loadListResponseSchema = z.object({ loads: z.array(loadSummarySchema) });
+export const loadListResponseSchema = z.object({ loads: z.array(loadSummarySchema), hasOlder: z.boolean() });
 
 const shelfCountWithPersonSchema = z.object({
   shelfId: idSchema,

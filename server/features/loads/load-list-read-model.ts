@@ -1,5 +1,6 @@
-import type { LoadSummary } from '#contract/loads';
+import type { LoadListQuery, LoadSummary } from '#contract/loads';
 import type { Db, Transaction } from '../../platform/db';
+import { getLoad } from './load-store';
 
 type SummaryRow = {
   readonly id: string;
@@ -31,20 +32,15 @@ function summaries(db: Db | Transaction, facilityId: string) {
     .join('carts as cart', 'cart.id', 'load.cart_id')
     .join('people as opener', 'opener.id', 'load.opened_by')
     .leftJoin('people as closer', 'closer.id', 'load.closed_by')
-    .leftJoin(
-      db('load_packages as listed')
-        .join('packages as package', 'package.id', 'listed.package_id')
-        .join('items as item', 'item.id', 'package.item_id')
-        .groupBy('listed.load_id')
-        .select(
-          'listed.load_id',
-          db.raw('count(*) as listed'),
-          db.raw('count(listed.scanned_at) as scanned'),
-          db.raw('count(*) filter (where item.is_implant) as implants'),
-        )
-        .as('tally'),
-      'tally.load_id',
-      'load.id',
+    .joinRaw(
+      `left join lateral (
+         select count(*) as listed, count(listed.scanned_at) as scanned,
+                count(*) filter (where item.is_implant) as implants
+           from load_packages as listed
+           join packages as package on package.id = listed.package_id
+           join items as item on item.id = package.item_id
+          where listed.load_id = load.id
+       ) as tally on true`,
     )
     .where('load.facility_id', facilityId)
     .select<SummaryRow[]>(
@@ -65,9 +61,9 @@ function summaries(db: Db | Transaction, facilityId: string) {
       'cart.name as cart_name',
       'opener.display_name as opened_by_name',
       'closer.display_name as closed_by_name',
-      db.raw('coalesce(tally.listed, 0) as listed'),
-      db.raw('coalesce(tally.scanned, 0) as scanned'),
-      db.raw('coalesce(tally.implants, 0) as implants'),
+      'tally.listed',
+      'tally.scanned',
+      'tally.implants',
     );
 }
 
@@ -90,13 +86,26 @@ function fromRow(row: SummaryRow): LoadSummary {
   };
 }
 
-const longestList = 200;
-
-export async function listLoads(db: Db, facilityId: string, state: 'open' | 'closed' | 'all'): Promise<LoadSummary[]> {
-  const query = summaries(db, facilityId).orderBy('load.opened_at', 'desc').limit(longestList);
+/** One page of the facility's loads, the newest first. */
+export async function listLoads(
+  db: Db,
+  facilityId: string,
+  { state, olderThan, limit }: LoadListQuery,
+): Promise<{ loads: LoadSummary[]; hasOlder: boolean }> {
+  const query = summaries(db, facilityId)
+    .orderBy([
+      { column: 'load.opened_at', order: 'desc' },
+      { column: 'load.id', order: 'desc' },
+    ])
+    .limit(limit + 1);
   if (state === 'open') void query.where('load.state', 'building');
   if (state === 'closed') void query.whereNot('load.state', 'building');
-  return (await query).map(fromRow);
+  if (olderThan !== undefined) {
+    const { id } = await getLoad(db, facilityId, olderThan);
+    void query.whereRaw('(load.opened_at, load.id) < (select opened_at, id from loads where id = ?)', [id]);
+  }
+  const rows = await query;
+  return { loads: rows.slice(0, limit).map(fromRow), hasOlder: rows.length > limit };
 }
 
 export async function findLoadSummary(

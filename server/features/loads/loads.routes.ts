@@ -50,9 +50,7 @@ export const loadRoutes = [
     permission: 'load.view',
     query: loadListQuerySchema,
     response: loadListResponseSchema,
-    handle: async ({ services, actor, query }) => ({
-      loads: await listLoads(services.db, actor.facilityId, query.state),
-    }),
+    handle: ({ services, actor, query }) => listLoads(services.db, actor.facilityId, query),
   }),
   defineRoute({
     method: 'get',

@@ -6,7 +6,7 @@ import { loadQueries } from '../../features/loads/queries';
 export const loader =
   (queryClient: QueryClient): LoaderFunction =>
   async () => {
-    await queryClient.query({ ...loadQueries.list('open'), staleTime: 'static' });
+    await queryClient.infiniteQuery({ ...loadQueries.list('open'), staleTime: 'static' });
     return null;
   };
 

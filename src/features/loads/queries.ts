@@ -1,6 +1,6 @@
 import { loadDetailSchema, loadHistorySchema, loadListResponseSchema, loadOpeningOptionsSchema } from '#contract/loads';
 import { paths } from '#contract/paths';
-import { queryOptions } from '@tanstack/react-query';
+import { infiniteQueryOptions, queryOptions } from '@tanstack/react-query';
 import { api, withQuery } from '../../lib/api-client';
 
 /** While a load is being built, another station may change it: look again this often. */
@@ -11,12 +11,12 @@ export const loadQueries = {
   all: () => ['loads'] as const,
   lists: () => [...loadQueries.all(), 'list'] as const,
   list: (state: 'open' | 'closed' | 'all') =>
-    queryOptions({
+    infiniteQueryOptions({
       queryKey: [...loadQueries.lists(), { state }] as const,
-      queryFn: async ({ signal }) => {
-        const { loads } = await api.get(withQuery(paths.loads, { state }), loadListResponseSchema, { signal });
-        return loads;
-      },
+      queryFn: ({ pageParam: olderThan, signal }) =>
+        api.get(withQuery(paths.loads, { state, olderThan }), loadListResponseSchema, { signal }),
+      initialPageParam: null as string | null,
+      getNextPageParam: ({ loads, hasOlder }) => (hasOlder ? (loads.at(-1)?.id ?? null) : null),
     }),
   openingOptions: () =>
     queryOptions({

@@ -71,7 +71,7 @@ const run = {
 async function openSheet(options: Options) {
   const server = stubServer({
     'GET /api/session': () => ({ json: aSession('technician') }),
-    'GET /api/loads': () => ({ json: { loads: [] } }),
+    'GET /api/loads': () => ({ json: { loads: [], hasOlder: false } }),
     'GET /api/loads/opening-options': () => ({ json: options }),
   });
   const view = renderApp('/loads');

@@ -1,6 +1,6 @@
 import type { LoadSummary } from '#contract/loads';
 import { loadStateWords } from '#domain/load/state-machine';
-import { useSuspenseQuery } from '@tanstack/react-query';
+import { useSuspenseInfiniteQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { Button } from '../../../components/ui/button';
 import { Code } from '../../../components/ui/code';
@@ -9,6 +9,7 @@ import { PageHead } from '../../../components/ui/heading';
 import { EmptyState } from '../../../components/ui/states';
 import { SegmentedChoice } from '../../../components/ui/segmented-choice';
 import { Moment } from '../../../components/ui/time';
+import { sentenceOf } from '../../../lib/errors';
 import { useMay } from '../../../lib/session';
 import { loadQueries } from '../queries';
 import { OpenLoadSheet } from './open-load-sheet';
@@ -51,7 +52,9 @@ const columns: readonly Column<LoadSummary>[] = [
 export function LoadList() {
   const [state, setState] = useState<'open' | 'closed' | 'all'>('open');
   const [isOpening, setIsOpening] = useState(false);
-  const { data: loads } = useSuspenseQuery(loadQueries.list(state));
+  const { data, hasNextPage, isFetchingNextPage, isFetchNextPageError, error, fetchNextPage } =
+    useSuspenseInfiniteQuery(loadQueries.list(state));
+  const loads = data.pages.flatMap((page) => page.loads);
   const mayOpen = useMay('load.open');
   const open = mayOpen && (
     <Button
@@ -91,6 +94,22 @@ export function LoadList() {
           </EmptyState>
         }
       />
+      {hasNextPage && (
+        <div className="flex flex-wrap items-center gap-4">
+          <Button
+            kind="quiet"
+            onPress={() => {
+              void fetchNextPage();
+            }}
+            waitingWords={isFetchingNextPage ? 'Fetching them' : undefined}
+          >
+            Show older loads
+          </Button>
+          <p role="alert" className="text-row font-semibold text-madder-3">
+            {isFetchNextPageError ? sentenceOf(error) : ''}
+          </p>
+        </div>
+      )}
       {isOpening && (
         <OpenLoadSheet
           onClose={() => {
