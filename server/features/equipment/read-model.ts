@@ -45,23 +45,36 @@ export async function sterilizerById(
   return row && { ...sterilizerFromRow(row), sizeClass: row.size_class };
 }
 
-async function programsOnPanel(
-  trx: Transaction | Db,
-  facilityId: string,
-  sterilizerId: string,
-  isQualified: boolean,
-): Promise<Program[]> {
-  const rows = await trx('programs')
+function programsOnPanels(trx: Transaction | Db, facilityId: string) {
+  return trx('programs')
     .join('sterilizer_programs', 'sterilizer_programs.program_id', 'programs.id')
-    .where({
-      'programs.facility_id': facilityId,
-      'programs.is_retired': false,
-      'sterilizer_programs.sterilizer_id': sterilizerId,
-      'sterilizer_programs.is_qualified': isQualified,
-    })
-    .orderBy('programs.code')
-    .select<ProgramRow[]>('programs.*');
-  return rows.map(programFromRow);
+    .where({ 'programs.facility_id': facilityId, 'programs.is_retired': false })
+    .orderBy('programs.code');
+}
+
+export type Panel = {
+  /** What the sterilizer is qualified for and that is still in use, by code. */
+  readonly qualified: readonly Program[];
+  /** What its panel offers although it is not qualified for it, by code. */
+  readonly unqualified: readonly Program[];
+};
+
+type PanelRow = ProgramRow & { readonly sterilizer_id: string; readonly is_qualified: boolean };
+
+/** The panels of all the facility's sterilizers, in one reading. */
+export async function panelsOf(trx: Transaction | Db, facilityId: string): Promise<(sterilizerId: string) => Panel> {
+  const rows = await programsOnPanels(trx, facilityId).select<PanelRow[]>(
+    'programs.*',
+    'sterilizer_programs.sterilizer_id',
+    'sterilizer_programs.is_qualified',
+  );
+  return (sterilizerId) => {
+    const own = rows.filter((row) => row.sterilizer_id === sterilizerId);
+    return {
+      qualified: own.filter((row) => row.is_qualified).map(programFromRow),
+      unqualified: own.filter((row) => !row.is_qualified).map(programFromRow),
+    };
+  };
 }
 
 /** A program of the facility, also one that is retired or that no sterilizer is qualified for. */
@@ -77,17 +90,15 @@ export async function programById(
 }
 
 /** Programs this sterilizer is qualified for and that are still in use, by code. */
-export function qualifiedPrograms(trx: Transaction | Db, facilityId: string, sterilizerId: string): Promise<Program[]> {
-  return programsOnPanel(trx, facilityId, sterilizerId, true);
-}
-
-/** Programs its panel offers although it is not qualified for them, by code. */
-export function unqualifiedPrograms(
+export async function qualifiedPrograms(
   trx: Transaction | Db,
   facilityId: string,
   sterilizerId: string,
 ): Promise<Program[]> {
-  return programsOnPanel(trx, facilityId, sterilizerId, false);
+  const rows = await programsOnPanels(trx, facilityId)
+    .where({ 'sterilizer_programs.sterilizer_id': sterilizerId, 'sterilizer_programs.is_qualified': true })
+    .select<ProgramRow[]>('programs.*');
+  return rows.map(programFromRow);
 }
 
 function cartOf(row: CartRow, shelves: readonly ShelfRow[]): SizedCart {
@@ -190,26 +201,44 @@ export function holderById(trx: Transaction | Db, facilityId: string, holderId: 
   return holderWhere(trx, facilityId, 'holders.id', holderId);
 }
 
-/** The last air-removal test of the facility's day (YYYY-MM-DD): a passed retest counts, and so does a failed one. */
+type TestRow = { readonly sterilizer_id: string; readonly result: 'passed' | 'failed'; readonly tested_at: Date };
+
+/**
+ * The last air-removal test of the facility's day (YYYY-MM-DD) of each sterilizer: a passed retest counts, and so does a
+ * failed one.
+ */
+export async function airRemovalsOfDay(
+  trx: Transaction | Db,
+  facilityId: string,
+  day: string,
+): Promise<(sterilizerId: string) => AirRemovalState> {
+  const rows = await lastTests(trx, facilityId, day);
+  return (sterilizerId) => stateOf(rows.find((row) => row.sterilizer_id === sterilizerId));
+}
+
+/** The same, of one sterilizer. */
 export async function airRemovalOfDay(
   trx: Transaction | Db,
   facilityId: string,
   sterilizerId: string,
   day: string,
 ): Promise<AirRemovalState> {
-  const row = await trx('air_removal_tests')
-    .where({
-      'air_removal_tests.facility_id': facilityId,
-      'air_removal_tests.sterilizer_id': sterilizerId,
-      'air_removal_tests.test_day': day,
-    })
+  const [row] = await lastTests(trx, facilityId, day).where('air_removal_tests.sterilizer_id', sterilizerId);
+  return stateOf(row);
+}
+
+function lastTests(trx: Transaction | Db, facilityId: string, day: string) {
+  return trx('air_removal_tests')
+    .distinctOn('air_removal_tests.sterilizer_id')
+    .where({ 'air_removal_tests.facility_id': facilityId, 'air_removal_tests.test_day': day })
     .orderBy([
+      { column: 'air_removal_tests.sterilizer_id' },
       { column: 'air_removal_tests.tested_at', order: 'desc' },
       { column: 'air_removal_tests.id', order: 'desc' },
     ])
-    .first<{ readonly result: 'passed' | 'failed'; readonly tested_at: Date } | undefined>(
-      'air_removal_tests.result',
-      'air_removal_tests.tested_at',
-    );
+    .select<TestRow[]>('air_removal_tests.sterilizer_id', 'air_removal_tests.result', 'air_removal_tests.tested_at');
+}
+
+function stateOf(row: TestRow | undefined): AirRemovalState {
   return row ? { result: row.result, testedAt: row.tested_at.toISOString() } : null;
 }

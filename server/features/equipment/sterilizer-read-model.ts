@@ -7,7 +7,7 @@ import { pageOf, whereFound, type ListFilters } from '../../platform/paged-list'
 import type { Kept } from '../../platform/register/register';
 import { sterilizerFromRow, type SterilizerRow } from './equipment-rows';
 import { facilityDay } from '../../platform/facility-day';
-import { airRemovalOfDay } from './read-model';
+import { airRemovalOfDay, airRemovalsOfDay } from './read-model';
 
 type PanelRow = { readonly sterilizer_id: string; readonly code: string; readonly is_qualified: boolean };
 
@@ -82,9 +82,7 @@ export async function listSterilizers(
     select: ['sterilizers.*'],
   });
   const { day } = await facilityDay(db, facilityId, at);
-  const sterilizers: SterilizerOnFile[] = [];
-  for (const kept of await keptSterilizers(db, rows)) {
-    sterilizers.push(onFile(kept, await airRemovalOfDay(db, facilityId, kept.id, day)));
-  }
-  return { sterilizers, ...paging };
+  const airRemovalOf = await airRemovalsOfDay(db, facilityId, day);
+  const kept = await keptSterilizers(db, rows);
+  return { sterilizers: kept.map((one) => onFile(one, airRemovalOf(one.id))), ...paging };
 }

@@ -1,42 +1,42 @@
 import type { LoadOpeningOptions } from '#contract/loads';
 import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
-import {
-  airRemovalOfDay,
-  cartsOf,
-  qualifiedPrograms,
-  sterilizersOf,
-  unqualifiedPrograms,
-} from '../equipment/read-model';
+import { airRemovalsOfDay, cartsOf, panelsOf, sterilizersOf } from '../equipment/read-model';
 import { waitingRuns } from '../packages/read-model';
 import { facilityDay } from '../../platform/facility-day';
-import { buildingLoadOfCart } from './open-load-read-model';
+import { buildingLoadsOf } from './open-load-read-model';
 
 /** What a load can be opened on now: sterilizers with the programs they are qualified for, carts, and runs that wait. */
 export async function getOpeningOptions({ db, clock }: Services, actor: Actor): Promise<LoadOpeningOptions> {
   const { facilityId } = actor;
   const { day } = await facilityDay(db, facilityId, clock.now());
-  const carts = await Promise.all(
-    (await cartsOf(db, facilityId)).map(async (cart) => {
-      const used = await buildingLoadOfCart(db, cart.id);
+  const [sterilizers, panelOf, airRemovalOf, allCarts, inUse, runs] = await Promise.all([
+    sterilizersOf(db, facilityId),
+    panelsOf(db, facilityId),
+    airRemovalsOfDay(db, facilityId, day),
+    cartsOf(db, facilityId),
+    buildingLoadsOf(db, facilityId),
+    waitingRuns(db, facilityId),
+  ]);
+  const carts = allCarts.map((cart) => {
+    const used = inUse.get(cart.id);
+    return {
+      ...cart,
+      isFree: cart.isUsable && used === undefined,
+      usedBy: used ? `load ${used.number}` : cart.isUsable ? null : cart.note || 'out of use',
+    };
+  });
+  return {
+    sterilizers: sterilizers.map((sterilizer) => {
+      const { qualified, unqualified } = panelOf(sterilizer.id);
       return {
-        ...cart,
-        isFree: cart.isUsable && used === undefined,
-        usedBy: used ? `load ${used.number}` : cart.isUsable ? null : cart.note || 'out of use',
+        sterilizer,
+        programs: [...qualified],
+        unqualified: unqualified.map(({ id, code }) => ({ id, code })),
+        carts: carts.filter((cart) => cart.sizeClass === sterilizer.sizeClass),
+        airRemoval: airRemovalOf(sterilizer.id),
       };
     }),
-  );
-  const sterilizers = await sterilizersOf(db, facilityId);
-  return {
-    sterilizers: await Promise.all(
-      sterilizers.map(async (sterilizer) => ({
-        sterilizer,
-        programs: await qualifiedPrograms(db, facilityId, sterilizer.id),
-        unqualified: (await unqualifiedPrograms(db, facilityId, sterilizer.id)).map(({ id, code }) => ({ id, code })),
-        carts: carts.filter((cart) => cart.sizeClass === sterilizer.sizeClass),
-        airRemoval: await airRemovalOfDay(db, facilityId, sterilizer.id, day),
-      })),
-    ),
-    runs: (await waitingRuns(db, facilityId)).map((run) => ({ ...run, wantedAt: run.wantedAt?.toISOString() ?? null })),
+    runs: runs.map((run) => ({ ...run, wantedAt: run.wantedAt?.toISOString() ?? null })),
   };
 }
