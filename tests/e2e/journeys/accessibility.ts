@@ -56,6 +56,22 @@ const packing: readonly Sight[] = [
   { name: 'New run', address: '/pack/runs', show: press('New run') },
 ];
 
+const lessons: readonly Sight[] = [
+  { name: 'Lessons', address: '/lessons' },
+  { name: 'A lesson', address: '/lessons/lid-filter-covered' },
+  { name: 'A lesson with a card', address: '/lessons/package-expired' },
+  {
+    name: 'A lesson, answered',
+    address: '/lessons/lid-filter-covered',
+    show: async (page) => {
+      for (const answer of ['Yes, half is open.', 'No, take the pouch off.']) {
+        await page.getByRole('button', { name: answer }).click();
+      }
+      await see(page.getByText('Kept: you have finished this lesson.'));
+    },
+  },
+];
+
 const others: readonly Sight[] = [
   { name: 'Today', address: '/' },
   { name: 'Loads', address: '/loads' },
@@ -87,6 +103,14 @@ function sightsOfLoads(full: string, empty: string): readonly Sight[] {
       show: async (page) => {
         await page.locator('button[id^="finding-"]').first().click();
         await see(page.locator('button[id^="finding-"][aria-expanded="true"]'));
+      },
+    },
+    {
+      name: 'The lesson of a finding',
+      address,
+      show: async (page) => {
+        await page.locator('button[id^="finding-"]').first().click();
+        await press('Why? 90 seconds')(page);
       },
     },
   ];
@@ -148,7 +172,7 @@ async function lookAt(stage: Stage, size: Size, prepared: Awaited<ReturnType<typ
   const faults: string[] = [];
   for (const [as, sights] of [
     [null, [{ name: 'Sign-in', address: '/sign-in' }]],
-    [supervisor, [...others, ...packing, ...stock, ...sightsOfLoads(loads.full, loads.empty)]],
+    [supervisor, [...others, ...lessons, ...packing, ...stock, ...sightsOfLoads(loads.full, loads.empty)]],
     [administrator, sightsOfPeople(size)],
   ] as const) {
     const station = await stage.openStation({
