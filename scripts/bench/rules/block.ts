@@ -8,7 +8,7 @@ import type {
   Shelf,
   Turn,
 } from '../../../src/domain/load/model';
-import type { LoadPolicy } from '../../../src/domain/load/policy';
+import type { FacingRule, LoadPolicy } from '../../../src/domain/load/policy';
 import { mm } from '../../../src/domain/units/quantity';
 import type { Random } from './random';
 import { sizeOf } from './geometry';
@@ -17,6 +17,8 @@ import { sizeOf } from './geometry';
 export type Site = {
   readonly random: Random;
   readonly policy: LoadPolicy;
+  /** How pouches are to face here, by the house or by the instructions for use of the pouches. */
+  readonly facing: FacingRule;
   readonly program: Program;
   /** What this load may hold: cycle, mass and instructions fit. */
   readonly items: readonly CatalogueItem[];
@@ -69,12 +71,12 @@ export function turnOf(random: Random): Turn {
 
 /** The paper sides of pouches that stand one behind another across x or across y, in that order. */
 export function paperSides(site: Site, axis: 'x' | 'y', count: number): readonly PaperSide[] {
-  const { random, policy, paperTowards } = site;
+  const { random, facing, paperTowards } = site;
   const first = random.pick(['left', 'right'] as const);
   const second = first === 'left' ? 'right' : 'left';
   return Array.from({ length: count }, (_, index) => {
-    if (policy.facing === 'one-way') return paperTowards[axis];
-    if (policy.facing === 'alternating') return index % 2 === 0 ? first : second;
+    if (facing === 'one-way') return paperTowards[axis];
+    if (facing === 'alternating') return index % 2 === 0 ? first : second;
     return random.pick(['left', 'right'] as const);
   });
 }

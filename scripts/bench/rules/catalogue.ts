@@ -2,6 +2,7 @@ import { challengePack, demonstrationItems, singleUseChallengeDevice } from '../
 import type { ItemFields } from '../../../src/domain/catalogue/item-fields';
 import type { CatalogueItem, CycleNeed, Program } from '../../../src/domain/load/model';
 import { kg, mm } from '../../../src/domain/units/quantity';
+import type { FacingRule } from '../../../src/domain/load/policy';
 import type { Random } from './random';
 
 /* The demonstration's catalogue, and how the instructions for use in it may differ from one hospital to the next. */
@@ -50,8 +51,11 @@ export function permits(item: CatalogueItem, program: Program): boolean {
  * The catalogue of one hospital: where instructions for use speak and where they are silent, which trays have a solid floor,
  * what may stand on what, and which cycles are permitted besides those of the demonstration.
  */
-export function variedCatalogue(random: Random, program: Program): readonly CatalogueItem[] {
+export function variedCatalogue(random: Random, program: Program, house: FacingRule): readonly CatalogueItem[] {
   if (random.chance(0.2)) return catalogue;
+  const facing = random.chance(0.2) ? random.pick(['one-way', 'alternating'] as const) : null;
+  // Where the house asks for nothing, some pouches may ask for one way and others not.
+  const isOfSome = facing === 'one-way' && house === 'not-set' && random.chance(0.5);
   const widening = random.pick([0, 0.3, 0.7]);
   return catalogue.map((item) => {
     let varied = item;
@@ -60,6 +64,7 @@ export function variedCatalogue(random: Random, program: Program): readonly Cata
     }
     if (random.chance(0.25)) varied = { ...varied, clearanceMm: clearanceFor(item, random) };
     if (random.chance(0.15)) varied = { ...varied, massLimitKg: massLimitFor(item, random) };
+    if (item.kind === 'pouch' && !(isOfSome && random.chance(0.5))) varied = { ...varied, facing };
     if (item.kind === 'pouch' && random.chance(0.15)) varied = { ...varied, packaging: 'double-pouch' };
     varied = item.kind === 'wrapped-tray' ? asTray(varied, random) : asItsMakerWants(varied, random);
     if (item.standsOn.length > 0 && random.chance(0.3)) {
@@ -73,6 +78,11 @@ function clearanceFor(item: CatalogueItem, random: Random): CatalogueItem['clear
   if (random.chance(0.5)) return null;
   if (item.kind !== 'pouch') return mm(random.whole(10, 40));
   return mm(random.whole(5, 12));
+}
+
+/** What the pouches of a catalogue ask for, where any of them does, before what the house asks for. */
+export function facingIn(items: readonly CatalogueItem[], house: FacingRule): FacingRule {
+  return items.find((item) => item.facing !== null)?.facing ?? house;
 }
 
 /** Its own mass exactly, or something above it. */

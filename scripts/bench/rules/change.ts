@@ -105,11 +105,13 @@ export function pickPlaced(host: Host, random: Random, fits: (placed: Placed) =>
 
 /** On the deck itself, with nothing standing on it. */
 export function standsFree(host: Host, placed: Placed): boolean {
-  return (
-    placed.one.placement?.at === 'shelf' &&
-    !host.view.packages.some(
-      ({ placement }) => placement?.at === 'package' && placement.belowPackageId === placed.one.packageId,
-    )
+  return placed.one.placement?.at === 'shelf' && !carries(host, placed);
+}
+
+/** Something stands on it. */
+export function carries(host: Host, placed: Placed): boolean {
+  return host.view.packages.some(
+    ({ placement }) => placement?.at === 'package' && placement.belowPackageId === placed.one.packageId,
   );
 }
 

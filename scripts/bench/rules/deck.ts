@@ -4,6 +4,9 @@ import type { Block } from './block';
 import { gapOf, rectOf, type Rect } from './geometry';
 import type { Random } from './random';
 
+/** What the arithmetic of a computer may leave of an exact distance, in mm. */
+const rounding = 1e-9;
+
 type Standing = { readonly block: Block; readonly rect: Rect };
 
 /** A shelf being filled: what stands on it, and where another block may go. */
@@ -12,11 +15,14 @@ export class Deck {
   readonly #area: Rect;
   readonly #policy: LoadPolicy;
   readonly #standing: Standing[] = [];
+  /** Positions in whole millimetres, as people measure, or just as far as asked, however odd the figure. */
+  readonly #isWhole: boolean;
   #massKg = 0;
   #coveredMm2 = 0;
 
-  constructor(shelf: Shelf, sterilizer: Sterilizer, policy: LoadPolicy) {
+  constructor(shelf: Shelf, sterilizer: Sterilizer, policy: LoadPolicy, isWhole: boolean) {
     this.shelf = shelf;
+    this.#isWhole = isWhole;
     this.#policy = policy;
     this.#area = usableArea(shelf, sterilizer, policy);
   }
@@ -55,9 +61,10 @@ export class Deck {
       ys.unshift(random.whole(0, Math.max(0, this.shelf.depthMm - Math.ceil(block.dy))));
     }
     const order = random.chance(0.7) ? (values: number[]) => values.sort((a, b) => a - b) : random.shuffled;
-    const [wholeXs, wholeYs] = [order(wholes(xs)), order(wholes(ys))];
-    for (const y of wholeYs) {
-      for (const x of wholeXs) if (this.isFree(block, x, y) && mayGo(rectOf(x, y, block))) return { x, y };
+    const exact = this.#isWhole ? wholes : (values: readonly number[]) => [...values];
+    const [tryXs, tryYs] = [order(exact(xs)), order(exact(ys))];
+    for (const y of tryYs) {
+      for (const x of tryXs) if (this.isFree(block, x, y) && mayGo(rectOf(x, y, block))) return { x, y };
     }
     return null;
   }
@@ -65,9 +72,9 @@ export class Deck {
   isFree(block: Block, x: number, y: number): boolean {
     const rect = rectOf(x, y, block);
     const area = this.#area;
-    if (rect.left < area.left || rect.right > area.right || rect.front < area.front || rect.back > area.back)
-      return false;
-    return this.#standing.every((one) => gapOf(one.rect, rect) >= apartMm(one.block, block));
+    const outside = [area.left - rect.left, rect.right - area.right, area.front - rect.front, rect.back - area.back];
+    if (outside.some((by) => by > rounding)) return false;
+    return this.#standing.every((one) => gapOf(one.rect, rect) >= apartMm(one.block, block) - rounding);
   }
 
   add(block: Block, x: number, y: number): void {
@@ -98,7 +105,6 @@ function apartMm(one: Block, other: Block): number {
   return Math.max(0, wanted - one.insetMm - other.insetMm);
 }
 
-/** People measure in whole millimetres. */
 function wholes(values: readonly number[]): number[] {
   return [...new Set(values.map(Math.ceil))];
 }

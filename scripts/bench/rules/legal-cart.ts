@@ -1,11 +1,11 @@
 import type { CatalogueItem, LoadHolder, LoadPackage, LoadView, Program, Shelf } from '../../../src/domain/load/model';
 import type { LoadPolicy } from '../../../src/domain/load/policy';
-import { kg } from '../../../src/domain/units/quantity';
+import { kg, mm } from '../../../src/domain/units/quantity';
 import { massLimitOf, singleBlock, type Block, type PutHolder, type PutPackage, type Site } from './block';
-import { permits, variedCatalogue } from './catalogue';
+import { facingIn, permits, variedCatalogue } from './catalogue';
 import { Deck, massOf } from './deck';
 import { holderKinds, programs, roomFor } from './equipment';
-import { gapOf, sizeOf, type Rect } from './geometry';
+import { gapOf, kindOf, placedOn, sizeOf, type Rect } from './geometry';
 import { houseRules } from './house-rules';
 import { basketOfOne, basketOfPouches, emptyHolder, rackBlock } from './pouch-blocks';
 import { randomFrom, type Random } from './random';
@@ -15,6 +15,8 @@ import { oneOf, spacedTrays, stackBlock } from './set-blocks';
 export type LegalCart = { readonly number: number; readonly view: LoadView; readonly policy: LoadPolicy };
 
 const today = '2026-03-10';
+/** Early and late on that day, in Chicago and in Auckland. */
+const todayIn = ['2026-03-10T11:10:00Z', '2026-03-11T03:30:00Z', '2026-03-09T14:00:00Z', '2026-03-10T09:40:00Z'];
 
 /** Cart `number` of a seed; always the same one. `wanted` asks for so many packages, as near as the cart holds them. */
 export function legalCart(seed: number, number: number, wanted?: number): LegalCart {
@@ -59,7 +61,7 @@ function tryCart(random: Random, number: number, asked: number | undefined): Leg
   const policy = houseRules(random);
   const { sterilizer, cart } = roomFor(random, wanted);
   const program = programFor(random);
-  const catalogue = variedCatalogue(random, program);
+  const catalogue = variedCatalogue(random, program, policy.facing);
   const device = challengeDeviceFor(catalogue, program, random);
   const items = catalogue.filter(
     (item) => mayGoIn(item, program, policy) && (!item.isImplant || mayHoldImplants(device, policy)),
@@ -70,7 +72,8 @@ function tryCart(random: Random, number: number, asked: number | undefined): Leg
   const withoutImplants = hasDevice || policy.challengeDevice === 'not-asked';
   const usable = withoutImplants ? items : items.filter((item) => !item.isImplant);
 
-  const filling = new Filling({ random, policy, program, sterilizer, cart, items: usable, wanted });
+  const facing = facingIn(catalogue, policy.facing);
+  const filling = new Filling({ random, policy, facing, program, sterilizer, cart, items: usable, wanted });
   if (hasDevice && device && !filling.putOverDrain(device)) return null;
   filling.fill(wanted > 45 ? manyPouches : random.pick(mixes));
   if (filling.packages.length < (asked ?? 2)) return null;
@@ -92,12 +95,33 @@ function tryCart(random: Random, number: number, asked: number | undefined): Leg
     acceptances: [],
     airRemoval:
       sterilizer.needsAirRemovalTest || random.chance(0.5)
-        ? { result: 'passed', testedAt: `${today}T12:10:00Z` }
+        ? { result: 'passed', testedAt: random.pick(todayIn) }
         : null,
     today,
   };
   const counts = cart.shelves.map((shelf) => ({ shelfId: shelf.id, counted: filling.countOn(shelf) }));
-  return { number, view: { ...view, counts }, policy };
+  const counted = { ...view, counts };
+  return { number, view: random.chance(0.15) ? justEnough(counted, policy) : counted, policy };
+}
+
+/** The same load on equipment that takes exactly this much and no more. */
+function justEnough(view: LoadView, policy: LoadPolicy): LoadView {
+  const placed = placedOn(view);
+  const massOn = (shelfId: string | null) => {
+    const items = placed.filter((each) => shelfId === null || each.shelfId === shelfId).map(({ item }) => item);
+    const holders = view.holders.filter((holder) => shelfId === null || holder.shelfId === shelfId);
+    const masses = [...items, ...holders.map((holder) => kindOf(view, holder))].map(({ massKg }) => massKg);
+    return kg(Number(masses.reduce<number>((sum, mass) => sum + mass, 0).toFixed(6)));
+  };
+  const isMassExact = policy.massMarginPercent === 0;
+  const shelves = view.cart.shelves.map((shelf) => {
+    const tops = placed.filter((each) => each.shelfId === shelf.id).map(({ top }) => top);
+    if (tops.length === 0) return shelf;
+    const clearHeightMm = mm(Math.max(...tops) + policy.headroomMm);
+    return { ...shelf, clearHeightMm, ...(isMassExact ? { greatestMassKg: massOn(shelf.id) } : {}) };
+  });
+  const sterilizer = isMassExact ? { ...view.sterilizer, greatestLoadMassKg: massOn(null) } : view.sterilizer;
+  return { ...view, sterilizer, cart: { ...view.cart, shelves } };
 }
 
 function programFor(random: Random): Program {
@@ -132,7 +156,8 @@ function mayGoIn(item: CatalogueItem, program: Program, policy: LoadPolicy): boo
   return item.kind !== 'challenge-device' && permits(item, program) && item.massKg <= massLimitOf(item, policy);
 }
 
-type Plan = Pick<Site, 'random' | 'policy' | 'program' | 'items' | 'wanted'> & Pick<LoadView, 'sterilizer' | 'cart'>;
+type Plan = Pick<Site, 'random' | 'policy' | 'facing' | 'program' | 'items' | 'wanted'> &
+  Pick<LoadView, 'sterilizer' | 'cart'>;
 
 /** One cart being filled, shelf by shelf and block by block. */
 class Filling {
@@ -149,7 +174,10 @@ class Filling {
   constructor(plan: Plan) {
     this.#plan = plan;
     const { random, policy, program, sterilizer, cart } = plan;
-    this.#decks = cart.shelves.filter((shelf) => shelf.isUsable).map((shelf) => new Deck(shelf, sterilizer, policy));
+    const isWhole = random.chance(0.85);
+    this.#decks = cart.shelves
+      .filter((shelf) => shelf.isUsable)
+      .map((shelf) => new Deck(shelf, sterilizer, policy, isWhole));
     const side = () => random.pick(['left', 'right'] as const);
     this.#sides = new Map(cart.shelves.map((shelf) => [shelf.id, { x: side(), y: side() }]));
     const limit = Math.min(sterilizer.greatestLoadMassKg, program.greatestLoadMassKg ?? Infinity);
@@ -196,10 +224,11 @@ class Filling {
   }
 
   #siteOn(shelf: Shelf): Site {
-    const { random, policy, program, items, wanted } = this.#plan;
+    const { random, policy, facing, program, items, wanted } = this.#plan;
     return {
       random,
       policy,
+      facing,
       program,
       items,
       holderKinds,

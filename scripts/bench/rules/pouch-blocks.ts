@@ -100,7 +100,7 @@ export function basketOfPouches(site: Site): Block | null {
   const row = rowAcross(site, pouches, span);
   if (row === null) return null;
   // What "left" means of a pouch turned in a turned basket, people may take either way; nobody is asked to here.
-  const turn = pouchTurn === 90 && policy.facing === 'one-way' ? 0 : turnOf(random);
+  const turn = pouchTurn === 90 && site.facing === 'one-way' ? 0 : turnOf(random);
   const sides = paperSides(site, pouchTurn === turn ? 'x' : 'y', row.items.length);
   const holderId = site.nextId('holder');
   let across = row.wall;
@@ -114,7 +114,8 @@ export function basketOfPouches(site: Site): Block | null {
   return {
     ...holderSize(kind, turn),
     dz: Math.max(...row.items.map((item) => item.widthMm)),
-    clearanceMm: Math.max(...row.items.map((item) => clearanceOf(item, policy))),
+    // The film of the last one looks out of the basket, and its label is to be read too.
+    clearanceMm: Math.max(policy.labelReadingGapMm, ...row.items.map((item) => clearanceOf(item, policy))),
     insetMm: 0,
     items: row.items,
     holderKinds: [kind],
@@ -129,9 +130,9 @@ export function basketOfPouches(site: Site): Block | null {
   };
 }
 
-/** A rack or basket that nobody has put anything into. */
+/** A rack, basket, wedge or spacer that nobody has used. */
 export function emptyHolder(site: Site): Block | null {
-  const kind = site.random.pick(site.holderKinds.filter((each) => each.form === 'rack' || each.form === 'basket'));
+  const kind = site.random.pick(site.holderKinds);
   const turn = turnOf(site.random);
   const holderId = site.nextId('holder');
   return {

@@ -53,6 +53,7 @@ export function printCarts(carts: readonly LegalCart[]): void {
         ['facing one way', with_(({ policy }) => policy.facing === 'one-way')],
         ['facing alternating', with_(({ policy }) => policy.facing === 'alternating')],
         ['facing not set', with_(({ policy }) => policy.facing === 'not-set')],
+        ['facing by instructions', with_(({ view }) => view.items.some((item) => item.facing !== null))],
       ],
     ),
   );

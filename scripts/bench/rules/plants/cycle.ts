@@ -1,7 +1,7 @@
 import type { CatalogueItem, CycleNeed, Program } from '../../../../src/domain/load/model';
 import { celsius, seconds } from '../../../../src/domain/units/quantity';
 import { changeItemOf, pickPlaced } from '../change';
-import { onPackage, type Fault, type Host, type Planted } from '../fault';
+import { onLoad, onPackage, type Fault, type Host, type Planted } from '../fault';
 import type { Random } from '../random';
 
 /* One package among others that does not go with the load's program or whose packaging or papers do not allow it. */
@@ -46,6 +46,15 @@ function differing(change: (need: CycleNeed, random: Random) => Partial<CycleNee
     const need = answered(program);
     return [{ ...need, ...change(need, random) }];
   });
+}
+
+/** A program that none of the packages goes with. */
+function nobodysProgram({ view }: Host): Planted {
+  const program: Program = { ...view.program, id: 'planted program', code: 'X', temperatureC: celsius(127) };
+  return {
+    view: { ...view, program, qualifiedPrograms: [...view.qualifiedPrograms, program] },
+    at: [onLoad, ...view.packages.map((one) => onPackage(one.packageId))],
+  };
 }
 
 function changed(changes: Partial<CatalogueItem>, kinds: readonly CatalogueItem['kind'][]) {
@@ -124,6 +133,7 @@ export const cycleFaults: readonly Fault[] = [
       ];
     }),
   },
+  { name: 'program-for-nobody', rule: 'cycle-conflict', plant: nobodysProgram },
   { name: 'no-cycle-permitted', rule: 'cycle-conflict', orRules: ['ifu-on-file'], plant: needs(() => []) },
   {
     name: 'unpacked',

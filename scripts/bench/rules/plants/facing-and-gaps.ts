@@ -21,10 +21,19 @@ function besides(host: Host, placed: Placed): readonly Placed[] {
   return host.placed.filter((each) => each.holder !== null && each.holder === placed.holder && each !== placed);
 }
 
+/** By its instructions for use, else by the house. */
+function facingOf(host: Host, placed: Placed): FacingRule {
+  return placed.item.facing ?? host.policy.facing;
+}
+
 function oneTurned(facing: FacingRule, fits: (placed: Placed) => boolean) {
   return (host: Host, random: Random): Planted | null => {
-    if (host.policy.facing !== facing) return null;
-    const placed = pickPlaced(host, random, (each) => fits(each) && besides(host, each).length >= 2);
+    const isAsked = (each: Placed) => facingOf(host, each) === facing;
+    const placed = pickPlaced(
+      host,
+      random,
+      (each) => fits(each) && isAsked(each) && besides(host, each).filter(isAsked).length >= 2,
+    );
     if (!placed) return null;
     return { view: turnedPaper(host, placed), at: [onPackage(placed.one.packageId)] };
   };
@@ -33,12 +42,17 @@ function oneTurned(facing: FacingRule, fits: (placed: Placed) => boolean) {
 /** Across an empty slot two pouches hardly face each other: the next slot has to be taken. */
 function nextSlotTaken(host: Host, placed: Placed): boolean {
   const slotOf = (each: Placed) => (each.one.placement?.at === 'slot' ? each.one.placement.slot : NaN);
-  return besides(host, placed).some((each) => Math.abs(slotOf(each) - slotOf(placed)) === 1);
+  return besides(host, placed).some(
+    (each) => Math.abs(slotOf(each) - slotOf(placed)) === 1 && facingOf(host, each) === facingOf(host, placed),
+  );
 }
 
 function alternationBroken(host: Host, random: Random): Planted | null {
-  if (host.policy.facing !== 'alternating') return null;
-  const placed = pickPlaced(host, random, (each) => isInSlot(each) && nextSlotTaken(host, each));
+  const placed = pickPlaced(
+    host,
+    random,
+    (each) => isInSlot(each) && facingOf(host, each) === 'alternating' && nextSlotTaken(host, each),
+  );
   return placed && { view: turnedPaper(host, placed), at: besideIt(host, placed) };
 }
 
@@ -55,7 +69,7 @@ function axisOf(placed: Placed): 'x' | 'y' {
 
 /** All pouches of one rack turned against the more numerous rest of their shelf. */
 function rackTurned(host: Host, random: Random): Planted | null {
-  if (host.policy.facing !== 'one-way') return null;
+  if (!host.placed.every((each) => each.item.kind !== 'pouch' || facingOf(host, each) === 'one-way')) return null;
   const placed = pickPlaced(host, random, isInSlot);
   if (!placed?.holder) return null;
   const { holder } = placed;
@@ -76,13 +90,28 @@ function rackTurned(host: Host, random: Random): Planted | null {
 function otherHouse(from: FacingRule, to: FacingRule) {
   return (host: Host, random: Random): Planted | null => {
     if (host.policy.facing !== from) return null;
-    const placed = pickPlaced(host, random, (each) => isInSlot(each) && nextSlotTaken(host, each));
+    const isFree = (each: Placed) => isInSlot(each) && each.item.facing === null;
+    const placed = pickPlaced(host, random, (each) => isFree(each) && nextSlotTaken(host, each));
     if (!placed?.holder) return null;
     return {
       view: host.view,
       policy: { ...host.policy, facing: to },
       at: [onHolder(placed.holder.holderId), ...besideIt(host, placed)],
     };
+  };
+}
+
+/** A rack that is loaded as the house wants it, of pouches whose instructions turn out to want it the other way. */
+function otherInstructions(host: Host, random: Random): Planted | null {
+  const placed = pickPlaced(host, random, (each) => isInSlot(each) && nextSlotTaken(host, each));
+  if (!placed?.holder) return null;
+  const from = facingOf(host, placed);
+  if (from === 'not-set') return null;
+  const facing = from === 'one-way' ? 'alternating' : 'one-way';
+  const inside = [placed, ...besides(host, placed)];
+  return {
+    view: inside.reduce((view, each) => changeItemOf(view, each, { facing }), host.view),
+    at: [onHolder(placed.holder.holderId), ...inside.map((each) => onPackage(each.one.packageId))],
   };
 }
 
@@ -213,7 +242,8 @@ function filmAgainstARack(host: Host, random: Random): Planted | null {
   const pouch = pickPlaced(
     host,
     random,
-    (each) => inside !== null && each.holder !== inside.holder && hides(inside.item, each.item),
+    (each) =>
+      each.item.kind === 'pouch' && each.holder !== inside?.holder && inside !== null && hides(inside.item, each.item),
   );
   if (!inside?.holder || !pouch) return null;
   const { holder } = inside;
@@ -247,6 +277,7 @@ export const facingAndGapFaults: readonly Fault[] = [
   { name: 'alternation-broken', rule: 'facing', plant: alternationBroken },
   { name: 'one-way-where-alternating', rule: 'facing', plant: otherHouse('one-way', 'alternating') },
   { name: 'alternating-where-one-way', rule: 'facing', plant: otherHouse('alternating', 'one-way') },
+  { name: 'against-facing-of-instructions', rule: 'facing', plant: otherInstructions },
   { name: 'gap-under-instructions', rule: 'gap', plant: asksForMore(({ slotsApart }) => slotsApart === 1) },
   { name: 'gap-across-empty-slot', rule: 'gap', plant: asksForMore(({ slotsApart }) => slotsApart > 1) },
   { name: 'gap-under-house-rule', rule: 'gap', plant: houseAsksForMore },

@@ -1,5 +1,5 @@
 import type { LoadPackage, PackageState } from '../../../../src/domain/load/model';
-import { changePackage, changeShelf, pickPlaced, recounted } from '../change';
+import { carries, changePackage, changeShelf, pickPlaced, recounted } from '../change';
 import { onHolder, onPackage, onShelf, type Fault, type Host, type Planted } from '../fault';
 import type { Placed } from '../geometry';
 import type { Random } from '../random';
@@ -50,12 +50,6 @@ function nowhere(host: Host, random: Random): Planted | null {
   if (!placed) return null;
   const view = recounted(changePackage(host.view, placed.one.packageId, { placement: null }));
   return { view, at: [onPackage(placed.one.packageId)] };
-}
-
-function carries(host: Host, placed: Placed): boolean {
-  return host.view.packages.some(
-    ({ placement }) => placement?.at === 'package' && placement.belowPackageId === placed.one.packageId,
-  );
 }
 
 function inMissingHolder(host: Host, random: Random): Planted | null {

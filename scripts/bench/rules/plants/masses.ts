@@ -116,8 +116,14 @@ function loadOverMargin(host: Host): Planted {
 const planted = 'planted package';
 
 /** A tray with enough metal in it not to be above a textile pack. */
-function metalTray(host: Host, dx: number, dy: number): { readonly item: CatalogueItem; readonly turn: Turn } {
-  const metalMassKg = kg(Math.max(host.policy.metalOverTextileKg + 0.2, 0.5));
+function metalTray(
+  host: Host,
+  random: Random,
+  dx: number,
+  dy: number,
+): { readonly item: CatalogueItem; readonly turn: Turn } {
+  // From just that mass on it may not be there.
+  const metalMassKg = kg(random.pick([host.policy.metalOverTextileKg, host.policy.metalOverTextileKg + 0.2]));
   const item: CatalogueItem = {
     ...itemWithCode(host.view, 'W-08'),
     id: 'planted item',
@@ -141,7 +147,7 @@ function metalOnTextile(host: Host, random: Random): Planted | null {
   const textile = textilePack(host, random);
   if (!textile) return null;
   const { left, front } = textile.rect;
-  const { item, turn } = metalTray(host, 160, 200);
+  const { item, turn } = metalTray(host, random, 160, 200);
   return {
     view: added(host.view, random, planted, item, standing(textile.one.packageId, left, front, turn)),
     at: [onPackage(planted), onPackage(textile.one.packageId)],
@@ -153,7 +159,7 @@ function metalHigherOnTextile(host: Host, random: Random): Planted | null {
   const textile = textilePack(host, random);
   if (!textile) return null;
   const { left, front } = textile.rect;
-  const { item, turn } = metalTray(host, 160, 200);
+  const { item, turn } = metalTray(host, random, 160, 200);
   const soft: CatalogueItem = { ...item, id: 'planted soft item', code: 'W-98', metalMassKg: kg(0) };
   const soften = added(host.view, random, 'planted soft', soft, standing(textile.one.packageId, left, front, turn));
   return {
@@ -181,7 +187,7 @@ function metalHangsOver(host: Host, random: Random): Planted | null {
   const left = isLeft ? box.rect.right - 150 : textile.rect.right - 60;
   const right = isLeft ? textile.rect.left + 60 : box.rect.left + 150;
   const front = Math.max(box.rect.front, textile.rect.front);
-  const { item, turn } = metalTray(host, Math.round(right - left), 100);
+  const { item, turn } = metalTray(host, random, Math.round(right - left), 100);
   const raised = changeItemOf(host.view, box, { heightMm: mm(Math.ceil(textile.top)) });
   const placement = standing(box.one.packageId, Math.round(left), Math.round(front), turn);
   return {
@@ -196,7 +202,7 @@ function metalOnHigherShelf(levelsUp: (levels: number) => boolean) {
     const textile = textilePack(host, random);
     if (!textile) return null;
     const below = shelfWithId(host.view, textile.shelfId);
-    const { item } = metalTray(host, 200, 260);
+    const { item } = metalTray(host, random, 200, 260);
     const spot = freeSpot(host, random, {
       dx: 200,
       dy: 260,
@@ -211,6 +217,35 @@ function metalOnHigherShelf(levelsUp: (levels: number) => boolean) {
       view: added(host.view, random, planted, item, deck(shelf.id, x, y, 0, 'flat')),
       at: [onPackage(planted), onPackage(textile.one.packageId)],
     };
+  };
+}
+
+/** A small set with enough metal in it, in a basket on a higher shelf above a textile pack. */
+function metalInBasketAbove(host: Host, random: Random): Planted | null {
+  const textile = textilePack(host, random);
+  const kind = host.view.holderKinds.find((each) => each.form === 'basket');
+  if (!textile || !kind) return null;
+  const below = shelfWithId(host.view, textile.shelfId);
+  const { item } = metalTray(host, random, 200, 240);
+  const middleX = (textile.rect.left + textile.rect.right) / 2;
+  const middleY = (textile.rect.front + textile.rect.back) / 2;
+  const isAbove = ({ left, front }: Rect) =>
+    left < middleX && middleX < left + 200 && front < middleY && middleY < front + 240;
+  const spot = freeSpot(host, random, {
+    dx: kind.acrossMm,
+    dy: kind.alongMm,
+    dz: item.heightMm,
+    clearanceMm: 20,
+    isGood: (rect, shelf) => shelf.level > below.level && shelf.widthMm === below.widthMm && isAbove(rect),
+  });
+  if (!spot) return null;
+  const holderId = 'planted basket';
+  const holder = { holderId, name: holderId, placeCode: holderId, kindId: kind.id, shelfId: spot.shelf.id };
+  const holders = [...host.view.holders, { ...holder, xMm: mm(spot.x), yMm: mm(spot.y), turn: 0 as const }];
+  const placement = { at: 'basket', holderId, xMm: mm(0), yMm: mm(0), turn: 0, pose: 'flat', paper: null } as const;
+  return {
+    view: added({ ...host.view, holders }, random, planted, item, placement),
+    at: [onPackage(planted), onPackage(textile.one.packageId)],
   };
 }
 
@@ -283,6 +318,7 @@ export const massFaults: readonly Fault[] = [
   { name: 'metal-hangs-over-textile', rule: 'metal-over-textile', plant: metalHangsOver },
   { name: 'metal-one-shelf-above', rule: 'metal-over-textile', plant: metalOnHigherShelf((levels) => levels === 1) },
   { name: 'metal-shelves-above', rule: 'metal-over-textile', plant: metalOnHigherShelf((levels) => levels > 1) },
+  { name: 'metal-in-basket-above', rule: 'metal-over-textile', plant: metalInBasketAbove },
   { name: 'water-house-rule', rule: 'water', plant: moreWater },
   { name: 'water-of-one-set', rule: 'water', plant: oneWetSet },
 ];

@@ -2,26 +2,24 @@ import type { CatalogueItem, LoadView, Turn } from '../../../../src/domain/load/
 import { kg, mm } from '../../../../src/domain/units/quantity';
 import {
   added,
-  changeItem,
+  carries,
   changeItemOf,
-  changePackage,
   changeShelf,
   itemWithCode,
-  moved,
   pickPlaced,
   shelfWithId,
   standing,
   standsFree,
 } from '../change';
 import { onPackage, onShelf, type Fault, type Host, type Planted } from '../fault';
-import { gapOf, sizeOf, type Placed, type Rect } from '../geometry';
+import { gapOf, type Placed, type Rect } from '../geometry';
 import type { Random } from '../random';
 import { hasLidFilter } from '../set-blocks';
 import { onALid } from './pouches';
 
-/* What stands on what, and what stands or hangs over the filters of a container's lid. */
+/* What stands or hangs over the filters of a container, or shuts them from below. */
 
-const planted = 'planted package';
+export const planted = 'planted package';
 
 /** A filter of a flat container in the frame of its shelf. Turned, its length lies along x and its width along y. */
 function filterRect(container: Placed): Rect {
@@ -45,7 +43,7 @@ function filterRect(container: Placed): Rect {
 }
 
 /** A tray of just this footprint. */
-function trayOf(view: LoadView, rect: Pick<Rect, 'left' | 'right' | 'front' | 'back'>, heightMm = 60) {
+export function trayOf(view: LoadView, rect: Pick<Rect, 'left' | 'right' | 'front' | 'back'>, heightMm = 60) {
   const dx = Math.round(rect.right - rect.left);
   const dy = Math.round(rect.back - rect.front);
   const turn: Turn = dy >= dx ? 0 : 90;
@@ -78,12 +76,6 @@ function stackedFilterContainer(host: Host, random: Random): Placed | null {
     host,
     random,
     (each) => hasLidFilter(each.item) && each.one.placement?.at === 'package' && !carries(host, each),
-  );
-}
-
-function carries(host: Host, placed: Placed): boolean {
-  return host.view.packages.some(
-    ({ placement }) => placement?.at === 'package' && placement.belowPackageId === placed.one.packageId,
   );
 }
 
@@ -186,125 +178,6 @@ function overhangOfHigherMember(host: Host, random: Random): Planted | null {
   };
 }
 
-function flatSet(each: Placed): boolean {
-  return (each.item.kind === 'wrapped-tray' || each.item.kind === 'rigid-container') && each.item.pose === 'flat';
-}
-
-/** Something on a set whose instructions for use do not name it. */
-function onAnother(upperOf: (host: Host, below: Placed, random: Random) => CatalogueItem | null) {
-  return (host: Host, random: Random): Planted | null => {
-    const below = pickPlaced(host, random, (each) => flatSet(each) && standsFree(host, each));
-    const upper = below && upperOf(host, below, random);
-    if (!below || !upper || upper.standsOn.includes(below.item.code)) return null;
-    const turn = below.one.placement?.at === 'shelf' ? below.one.placement.turn : 0;
-    const size = sizeOf(upper, 'flat', turn);
-    const x = Math.round((below.rect.left + below.rect.right - size.dx) / 2);
-    const y = Math.round((below.rect.front + below.rect.back - size.dy) / 2);
-    return {
-      view: added(host.view, random, planted, upper, standing(below.one.packageId, x, y, turn)),
-      at: [onPackage(planted), onPackage(below.one.packageId)],
-    };
-  };
-}
-
-type Stack = { readonly upper: Placed; readonly lower: Placed };
-
-function stackOfTwo(host: Host, random: Random): Stack | null {
-  const onTop = host.placed.filter(({ one }) => one.placement?.at === 'package');
-  const upper = onTop.length > 0 ? random.pick(onTop) : null;
-  if (upper?.one.placement?.at !== 'package') return null;
-  const below = upper.one.placement.belowPackageId;
-  const lower = host.placed.find((each) => each.one.packageId === below);
-  return lower?.one.placement?.at === 'shelf' ? { upper, lower } : null;
-}
-
-function turnedOver(host: Host, random: Random): Planted | null {
-  const stack = stackOfTwo(host, random);
-  if (!stack || carries(host, stack.upper)) return null;
-  const { upper, lower } = stack;
-  if (lower.item.standsOn.includes(upper.item.code) || lower.one.placement?.at !== 'shelf') return null;
-  const { xMm, yMm, turn } = lower.one.placement;
-  const view = changePackage(host.view, upper.one.packageId, { placement: lower.one.placement });
-  return {
-    view: changePackage(view, lower.one.packageId, { placement: standing(upper.one.packageId, xMm, yMm, turn) }),
-    at: [onPackage(upper.one.packageId), onPackage(lower.one.packageId)],
-  };
-}
-
-/** The upper of a permitted stack far beside the one it is said to stand on. */
-function besideItsBase(host: Host, random: Random): Planted | null {
-  const stack = stackOfTwo(host, random);
-  if (stack?.upper.one.placement?.at !== 'package' || carries(host, stack.upper)) return null;
-  const { left, right, front, back } = stack.lower.rect;
-  const away = random.pick([
-    { xMm: mm(right + 30), yMm: mm(front) },
-    { xMm: mm(left), yMm: mm(back + 30) },
-  ]);
-  const placement = { ...stack.upper.one.placement, ...away };
-  return {
-    view: changePackage(host.view, stack.upper.one.packageId, { placement }),
-    at: [onPackage(stack.upper.one.packageId), onPackage(stack.lower.one.packageId)],
-  };
-}
-
-function lowLimit(whose: 'upper' | 'lower') {
-  return (host: Host, random: Random): Planted | null => {
-    const stack = stackOfTwo(host, random);
-    if (!stack) return null;
-    const greatestStackHeightMm = mm(Math.ceil(stack.upper.top) - random.whole(1, 40));
-    return {
-      view: changeItem(host.view, stack[whose].item.id, { greatestStackHeightMm }),
-      at: [onPackage(stack.upper.one.packageId), onPackage(stack.lower.one.packageId)],
-      measured: stack.upper.top,
-    };
-  };
-}
-
-/** A third on top of two, each permitted on the next, and together too high. */
-function oneMore(host: Host, random: Random): Planted | null {
-  const stack = stackOfTwo(host, random);
-  if (!stack || stack.upper.one.placement?.at !== 'package') return null;
-  const { xMm, yMm, turn } = stack.upper.one.placement;
-  const { item } = trayOf(host.view, stack.upper.rect, 80);
-  const limit = mm(stack.upper.top + random.whole(10, 70));
-  const upper = { ...item, standsOn: [stack.upper.item.code], greatestStackHeightMm: limit };
-  return {
-    view: added(host.view, random, planted, upper, standing(stack.upper.one.packageId, xMm, yMm, turn)),
-    at: [onPackage(planted), onPackage(stack.upper.one.packageId), onPackage(stack.lower.one.packageId)],
-  };
-}
-
-function ring(count: number) {
-  return (host: Host, random: Random): Planted | null => {
-    const members = random
-      .shuffled(host.placed.filter((each) => flatSet(each) && standsFree(host, each)))
-      .slice(0, count);
-    if (members.length < count) return null;
-    const view = members.reduce((so, each, index) => {
-      const below = members[(index + 1) % count];
-      const { left, front } = each.rect;
-      return moved(so, each.one.packageId, standing(below?.one.packageId ?? '', left, front, 0));
-    }, host.view);
-    return { view, at: members.map((each) => onPackage(each.one.packageId)) };
-  };
-}
-
-function onNothing(belowFor: (view: LoadView) => { readonly view: LoadView; readonly below: string } | null) {
-  return (host: Host, random: Random): Planted | null => {
-    const each = pickPlaced(host, random, (one) => flatSet(one) && standsFree(host, one));
-    const base = belowFor(host.view);
-    if (!each || !base || base.below === each.one.packageId) return null;
-    const placement = standing(base.below, each.rect.left, each.rect.front, 0);
-    return { view: moved(base.view, each.one.packageId, placement), at: [onPackage(each.one.packageId)] };
-  };
-}
-
-function unplacedBase(view: LoadView) {
-  const [first] = view.packages;
-  if (first?.placement?.at !== 'slot') return null;
-  return { view: changePackage(view, first.packageId, { placement: null }), below: first.packageId };
-}
-
 function hasBaseFilter(each: Placed): boolean {
   return each.item.filterZones.some((zone) => zone.face === 'base');
 }
@@ -319,7 +192,7 @@ function onSolidShelf(host: Host, random: Random): Planted | null {
   };
 }
 
-export const lidAndStackFaults: readonly Fault[] = [
+export const filterFaults: readonly Fault[] = [
   { name: 'tray-on-lid-filter', rule: 'lid-filter-covered', plant: onTheFilter((filter) => filter) },
   { name: 'tray-over-corner-of-filter', rule: 'lid-filter-covered', plant: onTheFilter(cornerOver) },
   {
@@ -331,40 +204,4 @@ export const lidAndStackFaults: readonly Fault[] = [
   { name: 'overhang-of-higher-member', rule: 'lid-filter-covered', plant: overhangOfHigherMember },
   { name: 'pouch-flat-on-lid-filter', rule: 'lid-filter-covered', plant: onALid('flat', hasLidFilter) },
   { name: 'base-filter-on-solid-shelf', rule: 'base-filter-shut', plant: onSolidShelf },
-  {
-    name: 'base-filter-on-tray',
-    rule: 'base-filter-shut',
-    plant: onAnother(({ view }) => itemWithCode(view, 'C-15')),
-  },
-  {
-    name: 'tray-on-tray',
-    rule: 'stack-not-permitted',
-    plant: onAnother(({ view }, _below, random) => itemWithCode(view, random.pick(['W-08', 'C-14', 'W-07']))),
-  },
-  { name: 'same-on-same', rule: 'stack-not-permitted', plant: onAnother((_host, below) => below.item) },
-  { name: 'stack-upside-down', rule: 'stack-not-permitted', plant: turnedOver },
-  {
-    name: 'stack-member-in-the-air',
-    rule: 'stack-not-permitted',
-    orRules: ['overlap', 'unplaced', 'size-makes-no-sense'],
-    plant: besideItsBase,
-  },
-  { name: 'stack-over-upper-limit', rule: 'stack-too-high', plant: lowLimit('upper') },
-  { name: 'stack-over-lower-limit', rule: 'stack-too-high', plant: lowLimit('lower') },
-  { name: 'third-on-a-stack', rule: 'stack-too-high', plant: oneMore },
-  { name: 'stands-on-itself', rule: 'stack-circular', plant: ring(1) },
-  { name: 'two-on-each-other', rule: 'stack-circular', plant: ring(2) },
-  { name: 'ring-of-three', rule: 'stack-circular', plant: ring(3) },
-  {
-    name: 'stands-on-what-is-not-there',
-    rule: 'unplaced',
-    orRules: ['stack-not-permitted'],
-    plant: onNothing((view) => ({ view, below: 'no such package' })),
-  },
-  {
-    name: 'stands-on-what-has-no-place',
-    rule: 'unplaced',
-    orRules: ['stack-not-permitted'],
-    plant: onNothing(unplacedBase),
-  },
 ];
