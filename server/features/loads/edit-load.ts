@@ -12,7 +12,7 @@ import { holderById } from '../equipment/read-model';
 import { recordAct, requireAct, type ActKind } from './load-change';
 import { lockLoad } from './load-store';
 import { readLoadView, type LoadAsKnown } from './load-view-read-model';
-import { requireHolderFree } from './require-holder-free';
+import { lockHolders, requireHolderFree } from './require-holder-free';
 import type { AuditPayloads } from '#domain/audit/event-kinds';
 
 type Telling = { readonly [Kind in ActKind]: { readonly kind: Kind; readonly payload: AuditPayloads[Kind] } }[ActKind];
@@ -49,11 +49,16 @@ export async function editLoad(
 
 /** Holders that the edits put on the cart and that are not on it yet: locked, if nobody else has them. */
 async function sparesFor(trx: Transaction, known: LoadAsKnown, edits: readonly LoadEdit[]): Promise<SpareHolder[]> {
+  const wanted = edits.flatMap((edit) =>
+    edit.edit === 'place-holder' && !known.view.holders.some((holder) => holder.holderId === edit.holderId)
+      ? [edit.holderId]
+      : [],
+  );
+  if (wanted.length === 0) return [];
+  await lockHolders(trx, wanted);
   const spares: SpareHolder[] = [];
-  for (const edit of edits) {
-    if (edit.edit !== 'place-holder' || known.view.holders.some((holder) => holder.holderId === edit.holderId))
-      continue;
-    const holder = await holderById(trx, known.load.facility_id, edit.holderId);
+  for (const holderId of wanted) {
+    const holder = await holderById(trx, known.load.facility_id, holderId);
     if (!holder) throw new NotFound('holder.none', 'There is no such holder here.');
     await requireHolderFree(trx, holder);
     spares.push({ holderId: holder.holderId, name: holder.name, placeCode: holder.placeCode, kindId: holder.kind.id });

@@ -8,6 +8,7 @@ import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import type { Transaction } from '../../platform/db';
 import { RuleRefused } from '../../platform/errors';
+import { lockPackages } from '../packages/read-model';
 import { getUndoable, isUndoable, undoWords } from './undoable-read-model';
 import type { LoadAsKnown } from './load-view-read-model';
 import { listAcceptances, listCounts, stepVersion, voidCounts, writeDifference, type LoadRow } from './load-store';
@@ -45,6 +46,7 @@ export async function recordAct<Kind extends ActKind>(
   const scanning = { personId: act.actor.personId, at: act.at, entry: act.entry ?? 'keyed' };
   const isVoid = new Set(affectedShelves(view, after));
   const voided = known.counts.filter((count) => isVoid.has(count.shelfId));
+  await lockTouched(trx, difference);
   const [version] = await Promise.all([
     stepVersion(trx, load),
     writeDifference(trx, load.id, difference, scanning),
@@ -72,6 +74,15 @@ export async function recordAct<Kind extends ActKind>(
     // An act that was taken back uncovers the one before it; any other is itself the last.
     undoable: isUndoable(kind) ? undoWords(kind, payload) : ((await getUndoable(trx, load.id))?.words ?? null),
   };
+}
+
+/** Packages that are written, and those that something is put on, all in one order: whoever stages them keeps to it too. */
+async function lockTouched(trx: Transaction, difference: LoadDifference): Promise<void> {
+  const touched = difference.packages.flatMap(({ id, after }) =>
+    after?.placement?.at === 'package' ? [id, after.placement.belowPackageId] : [id],
+  );
+  // One alone can be in no wrong order, and a scan should be quick.
+  if (touched.length > 1) await lockPackages(trx, touched);
 }
 
 /** The part of a load that changed, for whoever holds the version before. */

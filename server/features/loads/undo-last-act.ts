@@ -9,7 +9,7 @@ import { findPackages, lockPackages } from '../packages/read-model';
 import { recordAct, requireAct } from './load-change';
 import { lockLoad } from './load-store';
 import { readLoadView } from './load-view-read-model';
-import { requireHolderFree } from './require-holder-free';
+import { lockHolders, requireHolderFree } from './require-holder-free';
 import { getUndoable } from './undoable-read-model';
 
 /** Takes the last act on the load back, if nothing it touched has changed since. */
@@ -35,7 +35,9 @@ export async function undoLastAct(
     const known = await readLoadView(trx, load, at);
     const back = reverseDifference(undoable.difference);
 
-    // What comes back to the load must still be free for it.
+    // What comes back to the load must still be free for it. Holders before packages, as everywhere.
+    const returningHolders = back.holders.flatMap((entry) => (entry.before === null ? [entry.id] : []));
+    await lockHolders(trx, returningHolders);
     const returning = back.packages.flatMap((entry) => (entry.before === null ? [entry.id] : []));
     await lockPackages(trx, returning);
     for (const facts of await findPackages(trx, returning)) {
@@ -44,9 +46,8 @@ export async function undoLastAct(
       if (!isFree)
         throw new Conflict('load.changed-since', `${facts.code} cannot come back: it has been used elsewhere since.`);
     }
-    for (const entry of back.holders) {
-      if (entry.before !== null) continue;
-      const holder = await holderById(trx, actor.facilityId, entry.id);
+    for (const holderId of returningHolders) {
+      const holder = await holderById(trx, actor.facilityId, holderId);
       if (holder) await requireHolderFree(trx, holder);
     }
 
