@@ -296,17 +296,22 @@ function Gaps({
     if (!gap) return [];
     const box = toPixels(gap);
     const figure = finding.figure ? `${Math.round(finding.figure.measured)} mm` : '';
+    const halfWidth = figure.length * 3.4 + 3;
+    // At the very edge of the shelf the figure would be cut off by the edge of the drawing.
+    const farthest =
+      toPixels({ left: shelf.widthMm, right: shelf.widthMm, front: 0, back: 0 }).x + marginPx - halfWidth;
+    const middle = Math.min(Math.max(box.x + box.width / 2, halfWidth), farthest);
     return [
       <g key={finding.key} className="pointer-events-none">
         <rect {...box} width={Math.max(box.width, 2)} height={Math.max(box.height, 2)} fill={warn} />
         <rect
-          x={box.x + box.width / 2 - figure.length * 3.4 - 3}
+          x={middle - halfWidth}
           y={box.y + box.height / 2 - 8}
-          width={figure.length * 6.8 + 6}
+          width={2 * halfWidth}
           height={16}
           className="fill-straw-1"
         />
-        <MapText x={box.x + box.width / 2} y={box.y + box.height / 2 + 4} anchor="middle" weight={600}>
+        <MapText x={middle} y={box.y + box.height / 2 + 4} anchor="middle" weight={600}>
           {figure}
         </MapText>
       </g>,

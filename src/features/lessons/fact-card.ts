@@ -35,7 +35,7 @@ export function factCardOf(view: LoadView, card: LessonCard, unitSystem: UnitSys
     case 'states':
       return cardOfPackages(view, 'What the scans said', (one) => stateInWords(one.state));
     case 'places':
-      return cardOfPackages(view, 'Where things are said to be', (one) => placeOf(view, one));
+      return placeCard(view);
     case 'masses':
       return massCard(view, unitSystem);
     case 'counts':
@@ -60,11 +60,16 @@ function cardOfPackages(view: LoadView, heading: string, say: (one: LoadPackage)
   };
 }
 
+/** Numbered, because two of one name may stand on each other. */
+function placeCard(view: LoadView): FactCard {
+  const card = cardOfPackages(view, 'Where things are said to be', (one) => placeOf(view, one));
+  return { ...card, facts: card.facts.map((fact, index) => ({ ...fact, label: `${index + 1}. ${fact.label}` })) };
+}
+
 function placeOf(view: LoadView, one: LoadPackage): string {
   if (one.placement === null) return one.isScanned ? 'scanned, no place' : 'not scanned';
   const { placement } = one;
   if (placement.at !== 'package') return placeWords(view, placement, findItem(view, one.itemId));
-  // By its number on this card: two of one name may stand on each other.
   const below = view.packages.findIndex(({ packageId }) => packageId === placement.belowPackageId) + 1;
   return `on top of number ${below}`;
 }
@@ -106,7 +111,7 @@ function sizeCard(view: LoadView, packageId: string, unitSystem: UnitSystem): Fa
     facts: [
       { key: 'length', label: 'Length', value: size(item.lengthMm) },
       { key: 'width', label: 'Width', value: size(item.widthMm) },
-      { key: 'height', label: 'Thickness', value: size(item.heightMm) },
+      { key: 'height', label: 'Height, lying flat', value: size(item.heightMm) },
     ],
   };
 }

@@ -16,7 +16,7 @@ export const sizeMakesNoSenseLesson: Lesson = {
   lookFor: 'A size no package can have: compare it with your hand.',
   bad: {
     view: aLoad({ holders, packages: [...pouches, inSlot(slipped, 'Rack 1', 6)] }),
-    caption: 'The forceps’ thickness is entered as ten metres, so they cannot be drawn.',
+    caption: 'The pouch of forceps is entered as ten metres high, so it cannot be drawn.',
   },
   good: {
     view: aLoad({ holders, packages: [...pouches, inSlot(forceps, 'Rack 1', 6)] }),

@@ -14,8 +14,8 @@ import { LessonCartPicture } from './lesson-picture';
 
 /** Until the room is known. */
 const firstWidthPx = 340;
-/** How high a drawing may be by itself, and with a card below it. */
-const heightsPx = { alone: 390, withCard: 290 } as const;
+/** How high a drawing may be with a card below it, and by itself: then the more, the wider it may be. */
+const heightsPx = { withCard: 290, leastAlone: 390, greatestAlone: 450 } as const;
 
 type LessonCartProps = {
   readonly side: 'bad' | 'good';
@@ -38,7 +38,11 @@ export function LessonCart({ side, cart, other, pictures, policy, findings }: Le
   const [sizeRef, size] = useSize();
   const isBad = side === 'bad';
   const { title, name } = words[side];
+  const width = size?.width ?? firstWidthPx;
   const hasCard = pictures.some(({ of }) => of === 'card');
+  const height = hasCard
+    ? heightsPx.withCard
+    : Math.min(Math.max(width, heightsPx.leastAlone), heightsPx.greatestAlone);
   // Both are read out, so each is called by its own name.
   const view = useMemo(() => ({ ...cart.view, cart: { ...cart.view.cart, name } }), [cart, name]);
   return (
@@ -47,7 +51,7 @@ export function LessonCart({ side, cart, other, pictures, policy, findings }: Le
         <Icon name={isBad ? 'cross' : 'tick'} size={20} />
         {title}
       </h2>
-      <p className="mt-0.5 min-h-10 text-body text-balance">{cart.caption}</p>
+      <p className="mt-0.5 text-body text-balance @min-[42rem]:min-h-10">{cart.caption}</p>
       <div ref={sizeRef} className="mt-2 grid gap-3">
         {pictures.map((picture, index) =>
           picture.of === 'card' ? (
@@ -59,8 +63,8 @@ export function LessonCart({ side, cart, other, pictures, policy, findings }: Le
               view={view}
               policy={policy}
               findings={findings}
-              width={size?.width ?? firstWidthPx}
-              height={hasCard ? heightsPx.withCard : heightsPx.alone}
+              width={width}
+              height={height}
             />
           ),
         )}

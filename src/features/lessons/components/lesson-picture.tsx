@@ -9,7 +9,7 @@ import type { LetteredFinding } from '../../../components/cart-map/map-model';
 import { ShelfPlan } from '../../../components/cart-map/shelf-plan';
 
 /** px per mm: beyond it a drawing only grows, and says no more. */
-const greatestScale = 0.62;
+const greatestScale = 0.72;
 /** A rack is never drawn larger than pouches are. */
 const greatestCloseUp = { width: 440, height: 300 } as const;
 
