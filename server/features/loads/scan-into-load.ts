@@ -8,6 +8,7 @@ import type { Actor } from '../../platform/actor';
 import { appendEvent } from '../../platform/audit-writer';
 import type { Transaction } from '../../platform/db';
 import { once } from '../../platform/once';
+import { shownScan } from '../../platform/shown-scan';
 import { holderByPlaceCode, shelfByPlaceCode } from '../equipment/read-model';
 import { catalogueItems, findItemByDeviceIdentifier } from '../items/read-model';
 import { findPackageByCode, lockPackageByCode } from '../packages/read-model';
@@ -26,21 +27,10 @@ const nothing: Pick<Answer, 'look' | 'package' | 'place' | 'placement' | 'change
   change: null,
 };
 
-const shownLength = 40;
-
-/** What was read, fit to be shown: short, and without the characters that cannot be seen. */
-function shown(raw: string): string {
-  const visible = raw
-    .slice(0, 400)
-    .replace(/[\u0000-\u001f\u007f-\u009f\ud800-\udfff]/g, ' ')
-    .trim();
-  return visible.length > shownLength ? `${visible.slice(0, shownLength)}…` : visible;
-}
-
 /** A badge is half of a key: it is named, and never kept or shown. */
 function shownOf(scan: Scan, raw: string): string {
   if (scan.kind === 'badge') return 'a badge';
-  return 'code' in scan ? scan.code : shown(raw);
+  return 'code' in scan ? scan.code : shownScan(raw);
 }
 
 /** Takes one scan at an open load: a place, or a package. Only the answer `taken` changes the load. */

@@ -6,6 +6,7 @@ import type { Services } from '../../http/define-route';
 import type { Actor } from '../../platform/actor';
 import type { Transaction } from '../../platform/db';
 import { once } from '../../platform/once';
+import { shownScan } from '../../platform/shown-scan';
 import { programById } from '../equipment/read-model';
 import { catalogueItems } from '../items/read-model';
 import { facilityDay } from '../../platform/facility-day';
@@ -21,17 +22,6 @@ const answerTo: Readonly<Record<StagingRefusal, StagingScanResponse['answer']>> 
   'package.in-another-run': 'not-ready',
   'package.not-ready': 'not-ready',
 };
-
-const shownLength = 40;
-
-/** What was read, fit to be shown: short, and without the characters that cannot be seen. */
-function shown(raw: string): string {
-  const visible = raw
-    .slice(0, 400)
-    .replace(/[\p{Cc}\p{Cs}]/gu, ' ')
-    .trim();
-  return visible.length > shownLength ? `${visible.slice(0, shownLength)}…` : visible;
-}
 
 function notAPackage(scan: Exclude<Scan, { kind: 'package' }>): string {
   switch (scan.kind) {
@@ -62,7 +52,13 @@ export async function scanIntoRun(
     const run = await lockWaitingRun(trx, actor, runId);
     const scan = readScan(request.raw);
     if (scan.kind !== 'package') {
-      return { answer: 'not-known', look: null, sentence: notAPackage(scan), code: shown(request.raw), package: null };
+      return {
+        answer: 'not-known',
+        look: null,
+        sentence: notAPackage(scan),
+        code: shownScan(request.raw),
+        package: null,
+      };
     }
     return stageScanned(trx, act, run, scan.code);
   });
