@@ -4,8 +4,9 @@ import { fieldNameOf, isProblem } from '../../lib/errors';
 import { newRequestId } from '../../lib/request-id';
 
 /**
- * Sends one write under an id that is kept for every repeat of it, so that a press after a lost answer does nothing twice.
- * Any answer, also a refusal, ends the id; only silence keeps it.
+ * Sends one write under an id that is kept for every repeat of it, so that a press after a lost or unreadable answer does
+ * nothing twice. It ends once the write is done, or when it has turned out to stand for something else: after a refusal
+ * nothing was written, so the same id may come back.
  */
 export function useWrite() {
   const id = useRef<string | null>(null);
@@ -16,7 +17,7 @@ export function useWrite() {
       id.current = null;
       return reply;
     } catch (error) {
-      if (isProblem(error)) id.current = null;
+      if (isProblem(error, 'request.reused')) id.current = null;
       throw error;
     }
   };

@@ -1,6 +1,7 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useId, useState } from 'react';
 import { useForm } from 'react-hook-form';
+import { useWrite } from '../../../components/stock/use-write';
 import { Button } from '../../../components/ui/button';
 import { Dialog } from '../../../components/ui/dialog';
 import { SegmentedChoice } from '../../../components/ui/segmented-choice';
@@ -9,7 +10,6 @@ import { useFacility } from '../../../lib/facility';
 import { useAddPerson, useJoinPerson } from '../mutations';
 import { joiningPersonSchema, newPersonSchema } from '../person-form';
 import { initialsFor } from '../person-words';
-import { useRequestId } from '../use-request-id';
 import { EnterSends, PlaceFields, Refusal, sendForm, showAtFields } from './form-parts';
 import type { ShownOnce } from './shown-once-dialog';
 
@@ -80,7 +80,7 @@ const newNames = ['staffNumber', 'displayName', 'initials', 'role', 'usualShift'
 function NewPersonForm({ formId, onWaiting, onAdded }: FormProps) {
   const { name: facilityName, timeZone } = useFacility();
   const add = useAddPerson();
-  const requestId = useRequestId();
+  const write = useWrite();
   const { register, handleSubmit, formState, setError, getValues, setValue } = useForm({
     resolver: zodResolver(newPersonSchema(timeZone)),
     defaultValues: { staffNumber: '', displayName: '', initials: '', usualShift: '', expiresAt: '' },
@@ -89,8 +89,7 @@ function NewPersonForm({ formId, onWaiting, onAdded }: FormProps) {
   const submit = handleSubmit(async (values) => {
     onWaiting(true);
     try {
-      const reply = await add.mutateAsync({ ...values, requestId: requestId.next() });
-      requestId.done();
+      const reply = await write((requestId) => add.mutateAsync({ ...values, requestId }));
       onAdded({
         personId: reply.person.id,
         shown: {
@@ -102,7 +101,6 @@ function NewPersonForm({ formId, onWaiting, onAdded }: FormProps) {
         },
       });
     } catch (error) {
-      requestId.refused(error);
       showAtFields(error, newNames, setError);
     } finally {
       onWaiting(false);
@@ -144,7 +142,7 @@ const joiningNames = ['staffNumber', 'role', 'usualShift', 'expiresAt'] as const
 function JoiningPersonForm({ formId, onWaiting, onAdded }: FormProps) {
   const { name: facilityName, timeZone } = useFacility();
   const join = useJoinPerson();
-  const requestId = useRequestId();
+  const write = useWrite();
   const { register, handleSubmit, formState, setError } = useForm({
     resolver: zodResolver(joiningPersonSchema(timeZone)),
     defaultValues: { staffNumber: '', usualShift: '', expiresAt: '' },
@@ -153,11 +151,9 @@ function JoiningPersonForm({ formId, onWaiting, onAdded }: FormProps) {
   const submit = handleSubmit(async (values) => {
     onWaiting(true);
     try {
-      const { person } = await join.mutateAsync({ ...values, requestId: requestId.next() });
-      requestId.done();
+      const { person } = await write((requestId) => join.mutateAsync({ ...values, requestId }));
       onAdded({ personId: person.id, shown: null });
     } catch (error) {
-      requestId.refused(error);
       showAtFields(error, joiningNames, setError);
     } finally {
       onWaiting(false);

@@ -2,6 +2,7 @@ import type { Person } from '#contract/people';
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useId, useState } from 'react';
 import { useForm } from 'react-hook-form';
+import { useWrite } from '../../../components/stock/use-write';
 import { useAnnounce } from '../../../components/ui/announcer';
 import { Button } from '../../../components/ui/button';
 import { Dialog } from '../../../components/ui/dialog';
@@ -9,7 +10,6 @@ import { TextField } from '../../../components/ui/text-field';
 import { useFacility } from '../../../lib/facility';
 import { useChangePerson } from '../mutations';
 import { changedPersonSchema, changesBetween, endTextOf } from '../person-form';
-import { useRequestId } from '../use-request-id';
 import { EnterSends, PlaceFields, Refusal, sendForm, showAtFields } from './form-parts';
 
 type ChangePersonDialogProps = { isOpen: boolean; person: Person; onClose: () => void };
@@ -28,7 +28,7 @@ function OpenChangePersonDialog({ person: current, onClose }: ChangePersonDialog
   const announce = useAnnounce();
   const { name: facilityName, timeZone } = useFacility();
   const change = useChangePerson(person.id);
-  const requestId = useRequestId();
+  const write = useWrite();
   const { register, handleSubmit, formState, setError } = useForm({
     resolver: zodResolver(changedPersonSchema(timeZone)),
     defaultValues: {
@@ -47,12 +47,10 @@ function OpenChangePersonDialog({ person: current, onClose }: ChangePersonDialog
       return;
     }
     try {
-      await change.mutateAsync({ requestId: requestId.next(), version: person.version, ...changes });
-      requestId.done();
+      await write((requestId) => change.mutateAsync({ requestId, version: person.version, ...changes }));
       announce(`${values.displayName} is changed.`);
       onClose();
     } catch (error) {
-      requestId.refused(error);
       showAtFields(error, names, setError);
     }
   });

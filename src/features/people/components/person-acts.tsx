@@ -1,12 +1,12 @@
 import { paths } from '#contract/paths';
 import type { ChangePersonRequest, Person } from '#contract/people';
 import { useState } from 'react';
+import { useWrite } from '../../../components/stock/use-write';
 import { useAnnounce } from '../../../components/ui/announcer';
 import { Button } from '../../../components/ui/button';
 import { ConfirmDialog, type ConfirmDialogProps } from '../../../components/ui/confirm-dialog';
 import { FileLink } from '../../../components/ui/file-link';
 import { useChangePerson, useGiveOneTimePassword, useGivePin } from '../mutations';
-import { useRequestId } from '../use-request-id';
 import { ChangePersonDialog } from './change-person-dialog';
 import type { ShownOnce } from './shown-once-dialog';
 
@@ -21,22 +21,11 @@ export function PersonActs({ person, isSelf, onShown }: PersonActsProps) {
   const change = useChangePerson(person.id);
   const givePassword = useGiveOneTimePassword(person.id);
   const givePin = useGivePin(person.id);
-  const requestId = useRequestId();
+  const write = useWrite();
   const { displayName: name, staffNumber } = person;
 
-  async function once<Reply>(write: (id: string) => Promise<Reply>): Promise<Reply> {
-    try {
-      const reply = await write(requestId.next());
-      requestId.done();
-      return reply;
-    } catch (error) {
-      requestId.refused(error);
-      throw error;
-    }
-  }
-
   async function keep(changes: Partial<ChangePersonRequest>, done: string) {
-    await once((id) => change.mutateAsync({ requestId: id, version: person.version, ...changes }));
+    await write((id) => change.mutateAsync({ requestId: id, version: person.version, ...changes }));
     announce(done);
   }
 
@@ -47,7 +36,7 @@ export function PersonActs({ person, isSelf, onShown }: PersonActsProps) {
       confirmWords: 'Give it out',
       waitingWords: 'Giving it out',
       act: async () => {
-        const reply = await once((id) => givePassword.mutateAsync(id));
+        const reply = await write((id) => givePassword.mutateAsync(id));
         onShown({
           what: 'one-time-password',
           personName: name,
@@ -79,7 +68,7 @@ export function PersonActs({ person, isSelf, onShown }: PersonActsProps) {
       confirmWords: 'Give it out',
       waitingWords: 'Giving it out',
       act: async () => {
-        const { pin } = await once((id) => givePin.mutateAsync(id));
+        const { pin } = await write((id) => givePin.mutateAsync(id));
         onShown({ what: 'pin', personName: name, staffNumber, secret: pin, expiresAt: null });
       },
     },
