@@ -3,6 +3,7 @@
  * Source: the pouch's instructions for use, else the facility; that pouches stand apart is common practice without a distance.
  */
 import type { Body } from '../layout';
+import type { LoadPolicy } from '../policy';
 import { moveNamed } from './moves';
 import { clearanceBetween, clearanceMmOf, reachIntoEachOther } from './near-pairs';
 import { onPackage } from './places';
@@ -24,7 +25,7 @@ export const gap: Rule = {
 };
 
 function find(scene: Scene, on: OnShelf): readonly Draft[] {
-  return [...inRacks(on), ...loose(on)].flatMap(({ a, b, measured }) => {
+  return [...inRacks(on, scene.policy), ...loose(on)].flatMap(({ a, b, measured }) => {
     const wanted = Math.max(clearanceMmOf(a, scene.policy), clearanceMmOf(b, scene.policy));
     if (measured >= wanted - slackMm) return [];
     const { askedBy, ...limit } = clearanceBetween(a, b, scene.policy);
@@ -51,28 +52,27 @@ function find(scene: Scene, on: OnShelf): readonly Draft[] {
 
 type Pair = { readonly a: Body; readonly b: Body; readonly measured: number };
 
-function inRacks({ bodies }: OnShelf): readonly Pair[] {
-  const byRack = new Map<string, Map<number, Body[]>>();
+/** Between slots that are taken one after the other. Of several in one slot, a finding of its own, the one that asks for most room. */
+function inRacks({ bodies }: OnShelf, policy: LoadPolicy): readonly Pair[] {
+  const roomOf = (body: Body) => body.item.heightMm / 2 + clearanceMmOf(body, policy);
+  const byRack = new Map<string, Map<number, Body>>();
   for (const body of bodies) {
     if (!body.holder || body.slot === null || body.thinAxis === null) continue;
     const { holderId } = body.holder.holder;
-    const slots = byRack.get(holderId) ?? new Map<number, Body[]>();
+    const slots = byRack.get(holderId) ?? new Map<number, Body>();
     byRack.set(holderId, slots);
-    const inSlot = slots.get(body.slot);
-    if (inSlot) inSlot.push(body);
-    else slots.set(body.slot, [body]);
+    const other = slots.get(body.slot);
+    if (!other || roomOf(body) > roomOf(other)) slots.set(body.slot, body);
   }
   const pairs: Pair[] = [];
   for (const slots of byRack.values()) {
-    const taken = [...slots.keys()].sort((a, b) => a - b);
-    for (let index = 1; index < taken.length; index += 1) {
-      const [before = 0, after = 0] = [taken[index - 1], taken[index]];
-      for (const a of slots.get(before) ?? []) {
-        for (const b of slots.get(after) ?? []) {
-          const pitch = a.holder?.kind.pitchMm ?? 0;
-          pairs.push({ a, b, measured: (after - before) * pitch - (a.item.heightMm + b.item.heightMm) / 2 });
-        }
-      }
+    const taken = [...slots].sort(([a], [b]) => a - b);
+    for (const [index, [after, b]] of taken.entries()) {
+      const last = taken[index - 1];
+      if (!last) continue;
+      const [before, a] = last;
+      const pitch = a.holder?.kind.pitchMm ?? 0;
+      pairs.push({ a, b, measured: (after - before) * pitch - (a.item.heightMm + b.item.heightMm) / 2 });
     }
   }
   return pairs;

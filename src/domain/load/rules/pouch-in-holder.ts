@@ -3,6 +3,7 @@
  * Source: CDC guideline (2008), loading: peel packs on edge in racks, small items loose in wire baskets, as restated. How far it
  * may lean is the facility's to set; no published angle.
  */
+import { degrees, type Degree } from '../../units/quantity';
 import { gapAcross, gapAlong, gapUpward, type ShelfBox } from '../../geometry/box';
 import { leanOf } from '../../geometry/lean';
 import type { Body, HolderBody } from '../layout';
@@ -52,14 +53,18 @@ function find(scene: Scene, on: OnShelf): readonly Draft[] {
   });
 }
 
-function leanAngle(on: OnShelf, body: Body): number {
+/** With more than this on one shelf nobody measures what might catch a loose pouch: it counts as able to fall. */
+const mostMeasured = 500;
+
+function leanAngle(on: OnShelf, body: Body): Degree {
   const { widthMm: heightMm, heightMm: thicknessMm } = body.item;
   if (body.slot !== null) {
     const gapMm = (body.holder?.kind.pitchMm ?? 0) - thicknessMm;
     return leanOf({ heightMm, thicknessMm, gapMm, supportHeightMm: Infinity });
   }
+  if (on.bodies.length > mostMeasured) return degrees(90);
   const supports = body.holder ? supportsInBasket(on, body, body.holder) : supportsOnShelf(on, body);
-  return Math.max(...supports.map((support) => leanOf({ heightMm, thicknessMm, ...support })));
+  return degrees(Math.max(...supports.map((support) => leanOf({ heightMm, thicknessMm, ...support }))));
 }
 
 type Support = { readonly gapMm: number; readonly supportHeightMm: number };
