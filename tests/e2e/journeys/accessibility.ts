@@ -2,11 +2,13 @@ import assert from 'node:assert/strict';
 import type { Page } from 'playwright-core';
 import { loadDetailSchema, loadOpeningOptionsSchema, openLoadResponseSchema } from '../../../src/contract/loads';
 import { paths } from '../../../src/contract/paths';
+import { policyOverviewSchema, policyProposalResponseSchema } from '../../../src/contract/policies';
 import { z } from 'zod';
 import { phone, tablet } from '../../../scripts/running/browser';
 import type { Caller } from '../../../scripts/running/caller';
 import { fillCart } from '../../../scripts/running/full-cart';
 import { faultsOf } from '../support/accessibility';
+import { closeALoad } from '../support/close-a-load';
 import type { Journey } from '../support/journey';
 import { see } from '../support/see';
 import { people, personWith, type Size, type Stage } from '../support/stage';
@@ -58,13 +60,12 @@ const packing: readonly Sight[] = [
 
 const lessons: readonly Sight[] = [
   { name: 'Lessons', address: '/lessons' },
-  { name: 'A lesson', address: '/lessons/lid-filter-covered' },
-  { name: 'A lesson with a card', address: '/lessons/package-expired' },
   {
-    name: 'A lesson, answered',
-    address: '/lessons/lid-filter-covered',
+    // Drawing, card, a wrong answer and the right one.
+    name: 'A lesson',
+    address: '/lessons/package-expired',
     show: async (page) => {
-      for (const answer of ['Yes, half is open.', 'No, take the pouch off.']) {
+      for (const answer of ['Sterilize it as it is.', 'Have it packed again.']) {
         await page.getByRole('button', { name: answer }).click();
       }
       await see(page.getByText('Kept: you have finished this lesson.'));
@@ -78,6 +79,34 @@ const others: readonly Sight[] = [
   { name: 'Opening a load', address: '/loads', show: press('Open a load') },
   { name: 'New password', address: '/new-password' },
   { name: 'Nothing here', address: '/no-such-place' },
+];
+
+function sightsOfPolicy(closed: string): readonly Sight[] {
+  return [
+    { name: 'The policy, with a change proposed', address: '/policy/settings' },
+    { name: 'Confirming a change', address: '/policy/settings', show: press(/^Confirm version/) },
+    { name: 'Refusing a change', address: '/policy/settings', show: press('Refuse it') },
+    {
+      name: 'Versions of the policy',
+      address: '/policy/versions',
+      show: (page) => page.getByText(/^All \d+ settings of version 2$/).click(),
+    },
+    { name: 'A closed load', address: `/loads/${closed}` },
+    { name: 'A load judged again', address: `/loads/${closed}/judged-again` },
+  ];
+}
+
+/** Filled in wrongly, so that its complaints are there too; where nothing is proposed yet. */
+const proposing: readonly Sight[] = [
+  {
+    name: 'Proposing a change of policy',
+    address: '/policy/propose',
+    show: async (page) => {
+      await page.getByLabel('Least clearance to the chamber walls').fill('far');
+      await page.getByRole('button', { name: 'Propose it' }).click();
+      await see(page.getByText('Please write a number.'));
+    },
+  },
 ];
 
 function sightsOfLoads(full: string, empty: string): readonly Sight[] {
@@ -158,22 +187,54 @@ async function prepareLoads(caller: Caller): Promise<{ full: string; empty: stri
   return { full, empty };
 }
 
+/** A change that waits for its second person. */
+async function proposeChange(caller: Caller): Promise<void> {
+  const { today, versions } = await caller.get(paths.policies, policyOverviewSchema);
+  await caller.post(
+    paths.policyProposals,
+    {
+      baseNumber: versions[0]?.number,
+      changes: { packageClearanceMm: 30, challengeDevice: 'every-load' },
+      reason: 'The makers of the new trays ask for it.',
+      effectiveOn: today,
+    },
+    policyProposalResponseSchema,
+  );
+}
+
 async function prepare(stage: Stage) {
-  const loads = await prepareLoads(await stage.callAs(people.technician));
+  const technician = await stage.callAs(people.technician);
+  const closed = await closeALoad(technician);
+  const loads = await prepareLoads(technician);
+  const administrator = await stage.callAs(personWith('T9003'));
+  await proposeChange(administrator);
   return {
-    loads,
-    administrator: await stage.callAs(personWith('T9003')),
+    loads: { ...loads, closed },
+    administrator,
     supervisor: await stage.callAs(people.supervisor),
+    // Of the place where nothing is proposed, and where inches are used.
+    administratorElsewhere: await stage.callAs(personWith('Q101')),
   };
 }
 
 async function lookAt(stage: Stage, size: Size, prepared: Awaited<ReturnType<typeof prepare>>): Promise<string[]> {
-  const { loads, administrator, supervisor } = prepared;
+  const { loads, administrator, supervisor, administratorElsewhere } = prepared;
   const faults: string[] = [];
   for (const [as, sights] of [
     [null, [{ name: 'Sign-in', address: '/sign-in' }]],
-    [supervisor, [...others, ...lessons, ...packing, ...stock, ...sightsOfLoads(loads.full, loads.empty)]],
+    [
+      supervisor,
+      [
+        ...others,
+        ...lessons,
+        ...packing,
+        ...stock,
+        ...sightsOfLoads(loads.full, loads.empty),
+        ...sightsOfPolicy(loads.closed),
+      ],
+    ],
     [administrator, sightsOfPeople(size)],
+    [administratorElsewhere, proposing],
   ] as const) {
     const station = await stage.openStation({
       size,
