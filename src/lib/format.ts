@@ -97,10 +97,9 @@ function formatNumber(value: number, decimals: number): string {
   return value.toLocaleString('en-GB', { maximumFractionDigits: decimals, useGrouping: false });
 }
 
-// Factors: NIST SP 811 (2008), appendix B.8. Inch and pound are exact; psi and inHg are its seven-digit values.
+// Factors: NIST SP 811 (2008), appendix B.8. Inch and pound are exact.
 const mmPerInch = 25.4;
 const kgPerPound = 0.453_592_37;
-const kpaPerPsi = 6.894_757;
 
 /** Millimetres in the facility's unit: "12 mm" or "0.47 in". */
 export function formatLength(mm: number, unitSystem: UnitSystem): string {
@@ -121,11 +120,6 @@ export function formatMass(kg: number, unitSystem: UnitSystem): string {
 /** Degrees Celsius in the facility's unit: "132 °C" or "270 °F". */
 export function formatTemperature(celsius: number, unitSystem: UnitSystem): string {
   return unitSystem === 'metric' ? `${formatNumber(celsius, 1)} °C` : `${formatNumber(celsius * 1.8 + 32, 0)} °F`;
-}
-
-/** Kilopascals absolute in the facility's unit: "290 kPa" or "42.1 psia". */
-export function formatPressure(kpa: number, unitSystem: UnitSystem): string {
-  return unitSystem === 'metric' ? `${formatNumber(kpa, 0)} kPa` : `${formatNumber(kpa / kpaPerPsi, 1)} psia`;
 }
 
 /** "1 package", "31 packages" */

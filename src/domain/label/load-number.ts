@@ -1,6 +1,5 @@
 import { accept, refuse, type Result } from '../result';
 import { ordinalDay } from '../time/calendar-day';
-import { dayFromOrdinal, dayFromParts } from './label-date';
 
 /*
  * The number of a load, which every package processed in it carries: 2-26076-03 is sterilizer 2, day 76 of 2026, third load
@@ -23,31 +22,23 @@ export const defaultLoadNumberPattern = '{sterilizer}-{yy}{ddd}-{nn}';
 export const loadNumberPattern = /^[0-9A-Z]+(?:-[0-9A-Z]+)*$/;
 export const greatestLoadNumberLength = 20;
 
-const tokens = {
-  '{sterilizer}': '(?<sterilizer>[0-9A-Z]{1,6})',
-  '{yyyy}': '(?<yyyy>[0-9]{4})',
-  '{yy}': '(?<yy>[0-9]{2})',
-  '{ddd}': '(?<ddd>[0-9]{3})',
-  '{mm}': '(?<mm>[0-9]{2})',
-  '{dd}': '(?<dd>[0-9]{2})',
-  '{nnn}': '(?<count>[0-9]{3,4})',
-  '{nn}': '(?<count>[0-9]{2,4})',
-} as const;
+const tokens = ['{sterilizer}', '{yyyy}', '{yy}', '{ddd}', '{mm}', '{dd}', '{nnn}', '{nn}'] as const;
+type Token = (typeof tokens)[number];
 
 const sterilizerPattern = /^[0-9A-Z]{1,6}$/;
 const greatestCount = 9999;
 
 /**
  * Whether a pattern can be used: it names the sterilizer, one full date and the count once each, in capital letters, digits
- * and hyphens, and what it writes can be read back in one way only.
+ * and hyphens, and two loads are never written the same.
  */
 export function checkLoadNumberPattern(pattern: string): Result<string, 'not-a-pattern'> {
   const no = (sentence: string) => refuse('not-a-pattern', sentence);
   if (pattern.length > 60) return no('A pattern has at most 60 characters.');
   const used = pattern.match(/\{[^}]*\}?/g) ?? [];
-  const unknown = used.find((token) => !Object.hasOwn(tokens, token));
+  const unknown = used.find((token) => !(tokens as readonly string[]).includes(token));
   if (unknown !== undefined) return no(`${unknown} stands for nothing in a load number.`);
-  const has = (token: keyof typeof tokens) => used.filter((one) => one === token).length;
+  const has = (token: Token) => used.filter((one) => one === token).length;
   if (has('{sterilizer}') !== 1) return no('The pattern needs {sterilizer} once.');
   if (has('{nn}') + has('{nnn}') !== 1) return no('The pattern needs the count of the day once, {nn} or {nnn}.');
   if (has('{yy}') + has('{yyyy}') !== 1) return no('The pattern needs the year once, {yy} or {yyyy}.');
@@ -86,31 +77,4 @@ export function formatLoadNumber(load: LoadNumber, pattern: string = defaultLoad
     .replace('{dd}', load.day.slice(8, 10))
     .replace('{nnn}', String(load.count).padStart(3, '0'))
     .replace('{nn}', String(load.count).padStart(2, '0'));
-}
-
-/**
- * Reads a load number as scanned or typed: small letters allowed, spaces taken for hyphens. A two-digit year is in this
- * century. `pattern` has passed `checkLoadNumberPattern`.
- */
-export function parseLoadNumber(
-  text: string,
-  pattern: string = defaultLoadNumberPattern,
-): Result<LoadNumber, 'foreign' | 'no-such-day'> {
-  const foreign = refuse('foreign', 'This is not a load number as it is written here.');
-  if (text.length > 60) return foreign;
-  const written = text
-    .trim()
-    .replace(/[\s-]+/g, '-')
-    .replace(/[a-z]/g, (letter) => letter.toUpperCase());
-  const source = pattern.replace(/\{[a-z]+\}/g, (token) => tokens[token as keyof typeof tokens]);
-  const parts = new RegExp(`^${source}$`).exec(written)?.groups;
-  if (parts === undefined) return foreign;
-  const year = parts.yyyy === undefined ? 2000 + Number(parts.yy) : Number(parts.yyyy);
-  const day =
-    parts.ddd === undefined
-      ? dayFromParts(year, Number(parts.mm), Number(parts.dd))
-      : dayFromOrdinal(year, Number(parts.ddd));
-  if (day === null) return refuse('no-such-day', 'There is no such day in that year.');
-  const load = { sterilizer: parts.sterilizer ?? '', day, count: Number(parts.count) };
-  return load.count >= 1 && formatLoadNumber(load, pattern) === written ? accept(load) : foreign;
 }

@@ -28,18 +28,3 @@ export function wallClock(instant: string, timeZone: string): WallClock {
     time: `${part('hour')}:${part('minute')}:${part('second')}`,
   };
 }
-
-/** Whether the time zone database knows this name. */
-export function isTimeZone(name: string): boolean {
-  try {
-    new Intl.DateTimeFormat('en-US', { timeZone: name });
-    return true;
-  } catch {
-    return false;
-  }
-}
-
-/** Seconds that really passed between two instants, whatever the clocks on the wall did meanwhile. */
-export function elapsedSeconds(from: string, to: string): number {
-  return (new Date(to).getTime() - new Date(from).getTime()) / 1000;
-}

@@ -5,7 +5,6 @@ import {
   defaultLoadNumberPattern,
   formatLoadNumber,
   greatestLoadNumberLength,
-  parseLoadNumber,
 } from '#domain/label/load-number';
 import { productionDay } from '#domain/time/production-day';
 import { oneCharacterOf } from '../../support/one-character-of';
@@ -42,17 +41,11 @@ describe('load numbers', () => {
     ]);
   });
 
-  test('are read back as what they were made from, in every pattern that is allowed', () => {
+  test('fit on a label in every pattern that is allowed', () => {
     fc.assert(
       fc.property(load, fc.constantFrom(...usable), (one, pattern) => {
         expect(checkLoadNumberPattern(pattern).ok).toBe(true);
-        const written = formatLoadNumber(one, pattern);
-        expect(written.length).toBeLessThanOrEqual(greatestLoadNumberLength);
-        expect(parseLoadNumber(written, pattern)).toEqual({ ok: true, value: one });
-        expect(parseLoadNumber(` ${written.toLowerCase().replaceAll('-', ' ')} `, pattern)).toEqual({
-          ok: true,
-          value: one,
-        });
+        expect(formatLoadNumber(one, pattern).length).toBeLessThanOrEqual(greatestLoadNumberLength);
       }),
     );
   });
@@ -64,21 +57,6 @@ describe('load numbers', () => {
         expect(formatLoadNumber(one, pattern)).not.toBe(formatLoadNumber(other, pattern));
       }),
     );
-  });
-
-  test.each([
-    ['2-23366-01', 'no-such-day'],
-    ['2-26000-01', 'no-such-day'],
-    ['2-26076-00', 'foreign'],
-    ['2-26076-003', 'foreign'],
-    ['2-26076-3', 'foreign'],
-    ['2-260317-03', 'foreign'],
-    ['2-26076', 'foreign'],
-    ['P-20431784-52', 'foreign'],
-    ['', 'foreign'],
-    ['-'.repeat(10_000), 'foreign'],
-  ])('%j is not one', (text, reason) => {
-    expect(parseLoadNumber(text)).toMatchObject({ ok: false, refusal: { code: reason } });
   });
 
   test('are not made of a sterilizer, day or count that cannot be in one', () => {

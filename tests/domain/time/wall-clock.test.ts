@@ -1,4 +1,4 @@
-import { elapsedSeconds, isTimeZone, wallClock } from '#domain/time/wall-clock';
+import { wallClock } from '#domain/time/wall-clock';
 import { describe, expect, it } from 'vitest';
 
 const chicago = 'America/Chicago';
@@ -26,28 +26,5 @@ describe('wallClock', () => {
 
   it('throws for an instant nobody can read', () => {
     expect(() => wallClock('yesterday', chicago)).toThrow(RangeError);
-  });
-});
-
-describe('elapsedSeconds', () => {
-  it('gives 75 minutes for a load from 01:20 to 03:35 across the clock change of 8 March 2026', () => {
-    const start = '2026-03-08T07:20:00Z';
-    const end = '2026-03-08T08:35:00Z';
-    expect(wallClock(start, chicago)).toEqual({ day: '2026-03-08', time: '01:20:00' });
-    expect(wallClock(end, chicago)).toEqual({ day: '2026-03-08', time: '03:35:00' });
-    expect(elapsedSeconds(start, end)).toBe(75 * 60);
-  });
-
-  it('is negative when the second instant comes first', () => {
-    expect(elapsedSeconds('2026-03-08T08:00:01Z', '2026-03-08T08:00:00Z')).toBe(-1);
-  });
-});
-
-describe('isTimeZone', () => {
-  it('tells a zone of the time zone database from any other word', () => {
-    expect(isTimeZone('America/Chicago')).toBe(true);
-    expect(isTimeZone('UTC')).toBe(true);
-    expect(isTimeZone('Tarnquill')).toBe(false);
-    expect(isTimeZone('')).toBe(false);
   });
 });
