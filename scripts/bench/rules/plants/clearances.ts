@@ -187,7 +187,7 @@ function coveredByPackages(host: Host, random: Random): { readonly shelfId: stri
 function shelfCovered(host: Host, random: Random): Planted | null {
   const covered = coveredByPackages(host, random);
   if (!covered || covered.share < 13) return null;
-  const policy = { ...host.policy, greatestShelfCoverPercent: percent(Math.floor(covered.share) - random.whole(0, 2)) };
+  const policy = { ...host.policy, greatestShelfCoverPercent: percent(Math.ceil(covered.share) - random.whole(1, 3)) };
   return { view: host.view, policy, at: [onShelf(covered.shelfId)] };
 }
 
