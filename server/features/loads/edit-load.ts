@@ -1,5 +1,6 @@
 import type { EditLoadRequest, LoadChange } from '#contract/loads';
 import { applyEdits, type SpareHolder } from '#domain/load/apply-edit';
+import { editsWords } from '#domain/load/describe-edit';
 import type { LoadDifference } from '#domain/load/difference';
 import type { LoadEdit } from '#domain/load/finding';
 import type { LoadView } from '#domain/load/model';
@@ -40,7 +41,7 @@ export async function editLoad(
         known,
         applied.value,
         { actor, at, requestId: request.requestId },
-        (difference) => tellingOf(known.view, request.edits, difference),
+        (difference) => tellingOf(known.view, applied.value, request.edits, difference),
       );
       return { change };
     },
@@ -66,7 +67,9 @@ async function sparesFor(trx: Transaction, known: LoadAsKnown, edits: readonly L
   return spares;
 }
 
-function tellingOf(view: LoadView, edits: readonly LoadEdit[], difference: LoadDifference): Telling {
+function tellingOf(view: LoadView, after: LoadView, edits: readonly LoadEdit[], difference: LoadDifference): Telling {
+  // Packages as they were, since one may be off now; holders as they are, since one may just have come.
+  const words = editsWords({ ...view, holders: [...after.holders, ...view.holders] }, edits, 'done');
   const only = edits.length === 1 ? edits[0] : undefined;
   const codeOf = (packageId: string) => view.packages.find((entry) => entry.packageId === packageId)?.code ?? packageId;
   const nameOf = (holderId: string) =>
@@ -77,7 +80,7 @@ function tellingOf(view: LoadView, edits: readonly LoadEdit[], difference: LoadD
     case 'place':
     case 'turn-paper':
     case 'set-pose':
-      return { kind: 'load.package-moved', payload: { packageCode: codeOf(only.packageId), difference } };
+      return { kind: 'load.package-moved', payload: { packageCode: codeOf(only.packageId), words, difference } };
     case 'take-off':
       return { kind: 'load.package-taken-off', payload: { packageCode: codeOf(only.packageId), difference } };
     case 'place-holder':
@@ -90,6 +93,6 @@ function tellingOf(view: LoadView, edits: readonly LoadEdit[], difference: LoadD
         payload: { before: view.program.code, after: difference.program?.after.code ?? view.program.code, difference },
       };
     case undefined:
-      return { kind: 'load.arranged', payload: { packages: difference.packages.length, difference } };
+      return { kind: 'load.arranged', payload: { packages: difference.packages.length, words, difference } };
   }
 }

@@ -26,17 +26,17 @@ function sentenceOf({ kind, payload }: EventRow): string {
   const say = (key: string) => text(payload, key);
   switch (kind) {
     case 'load.opened':
-      return `Opened, ${say('listed')} packages listed`;
+      return `Opened, ${say('listed')} ${say('listed') === '1' ? 'package' : 'packages'} listed`;
     case 'load.package-scanned':
       return `${say('packageCode')} scanned`;
     case 'load.scan-refused':
       return `Scan not taken: ${say('read') || 'nothing readable'} (${say('answer').replace('-', ' ')})`;
     case 'load.package-moved':
-      return `${say('packageCode')} moved or turned`;
+      return say('words') === '' ? `${say('packageCode')} moved or turned` : `${say('packageCode')}: ${say('words')}`;
     case 'load.package-taken-off':
       return `${say('packageCode')} taken off`;
     case 'load.arranged':
-      return `${say('packages')} packages arranged`;
+      return say('words') === '' ? `${say('packages')} packages arranged` : say('words');
     case 'load.holder-placed':
       return `${say('holder')} put on the cart`;
     case 'load.holder-taken-off':

@@ -52,9 +52,14 @@ export type AuditPayloads = {
   'load.opened': { readonly number: string; readonly listed: number };
   'load.package-scanned': { readonly packageCode: string; readonly entry: string; readonly difference: LoadDifference };
   'load.scan-refused': { readonly answer: string; readonly read: string; readonly entry: string };
-  'load.package-moved': { readonly packageCode: string; readonly difference: LoadDifference };
+  'load.package-moved': {
+    readonly packageCode: string;
+    /** What was done, in words; loads built before words were kept have none. */
+    readonly words?: string;
+    readonly difference: LoadDifference;
+  };
   'load.package-taken-off': { readonly packageCode: string; readonly difference: LoadDifference };
-  'load.arranged': { readonly packages: number; readonly difference: LoadDifference };
+  'load.arranged': { readonly packages: number; readonly words?: string; readonly difference: LoadDifference };
   'load.holder-placed': { readonly holder: string; readonly difference: LoadDifference };
   'load.holder-taken-off': { readonly holder: string; readonly difference: LoadDifference };
   'load.program-changed': { readonly before: string; readonly after: string; readonly difference: LoadDifference };

@@ -33,6 +33,8 @@ export const loadQueries = {
   history: (loadId: string) =>
     queryOptions({
       queryKey: [...loadQueries.all(), 'history', loadId] as const,
+      // Somebody at another station may have done something since.
+      staleTime: 0,
       queryFn: async ({ signal }) => {
         const { events } = await api.get(`${paths.load(loadId)}/history`, loadHistorySchema, { signal });
         return events;

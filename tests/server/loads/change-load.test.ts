@@ -12,6 +12,7 @@ import {
   openLoadingBay,
   problemOf,
   scan,
+  stagedRun,
   type LoadingBay,
 } from './loading-bay';
 
@@ -124,6 +125,33 @@ describe('changing a load', () => {
     expect(reply.status).toBe(422);
     expect(problemOf(reply.body).detail).toMatch(/^[A-Z].*\.$/);
     expect(await loadSnapshot(app)).toBe(before);
+    await giveUp(app, loadId);
+  });
+
+  it('tells each act in words in the history, one of several as the first and how many more', async () => {
+    const technician = await app.as('technician');
+    const { runId, packages } = await stagedRun(app, bay.pouch.id, 1);
+    const [first] = packages;
+    const loadId = await openLoad(technician, bay, { runId });
+    await scan(technician, loadId, bay.racks[0].placeCode);
+    await scan(technician, loadId, first?.code ?? '', { kind: 'holder', holderId: bay.racks[0].id });
+    const packageId = first?.id ?? '';
+    await edit(technician, loadId, [{ edit: 'turn-paper', packageId, paper: 'right' }]);
+    await edit(technician, loadId, [
+      { edit: 'place-holder', holderId: bay.racks[1].id, shelfId: bay.upper.id, xMm: mm(20), yMm: mm(20), turn: 0 },
+      { edit: 'turn-paper', packageId, paper: 'left' },
+      { edit: 'take-off', packageId },
+    ]);
+    const history = await technician.get(`/api/loads/${loadId}/history`).expect(200);
+    const { events } = history.body as { events: { sentence: string; who: string }[] };
+    expect(events.map(({ sentence }) => sentence)).toEqual([
+      'Put Holder RS-2: Upper shelf, and 2 more',
+      `${first?.code ?? ''}: Turned Mayo scissors curved so that paper is right`,
+      `${first?.code ?? ''} scanned`,
+      'RS-1 put on the cart',
+      'Opened, 1 package listed',
+    ]);
+    expect(new Set(events.map(({ who }) => who))).toEqual(new Set([app.person('technician').displayName]));
     await giveUp(app, loadId);
   });
 

@@ -182,6 +182,16 @@ export const LoadBoard = memo(function LoadBoard({
             >
               Load stickers
             </Button>
+            <Button
+              kind="plain"
+              size="small"
+              icon="file"
+              onPress={() => {
+                onSheet({ is: 'history' });
+              }}
+            >
+              What happened
+            </Button>
             {mayBuild && (
               <Button
                 kind="plain"

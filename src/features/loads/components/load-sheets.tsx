@@ -7,13 +7,14 @@ import type { LoadActs } from '../hooks/use-load-acts';
 import type { LoadJudgement } from '../hooks/use-load-judgement';
 import { useAbandonLoad, useAcceptFinding, useCountShelf } from '../mutations';
 import { CountSheet } from './count-sheet';
+import { HistorySheet } from './history-sheet';
 import { KeyInSheet } from './key-in-sheet';
 import { PackageSheet } from './package-sheet';
 import { StickerSheet } from './sticker-sheet';
 
 /** What lies over the station. */
 export type Sheet =
-  | { readonly is: 'none' | 'key-in' | 'abandon' }
+  | { readonly is: 'none' | 'key-in' | 'abandon' | 'history' }
   | { readonly is: 'package'; readonly packageId: string }
   | { readonly is: 'count'; readonly shelfId: string }
   | { readonly is: 'accept'; readonly finding: Finding }
@@ -84,6 +85,7 @@ export function LoadSheets({ sheet, detail, judgement, acts, mayBuild, onSheet }
           onClose={close}
         />
       )}
+      {sheet.is === 'history' && <HistorySheet loadId={summary.id} number={summary.number} onClose={close} />}
       {sheet.is === 'sticker' && <StickerSheet detail={detail} packageId={sheet.packageId} onClose={close} />}
       <ConfirmDialog
         isOpen={sheet.is === 'accept'}
