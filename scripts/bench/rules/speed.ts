@@ -5,8 +5,8 @@ import { table } from '../../start/output';
 import { percentile } from '../support/percentile';
 import { legalCart, type LegalCart } from './legal-cart';
 
-const warmUps = 200;
-const runs = 400;
+const warmUps = 800;
+const runs = 800;
 const cartsEach = 8;
 
 export type Speed = {
