@@ -16,6 +16,7 @@ export const places: readonly Place[] = [
   { to: '/pack', label: 'Pack', icon: 'pack', permissions: ['package.pack'] },
   { to: '/lessons', label: 'Lessons', icon: 'practice', permissions: ['load.view'] },
   { to: '/stock', label: 'Stock', icon: 'stock', permissions: ['item.view', 'equipment.view'] },
+  { to: '/policy', label: 'Policy', icon: 'policy', permissions: ['policy.view'] },
   { to: '/people', label: 'People', icon: 'people', permissions: ['people.view'] },
 ];
 

@@ -76,6 +76,7 @@ export function createRoutes(queryClient: QueryClient): RouteObject[] {
               children: [
                 { path: 'loads', ...lazyRoute(() => import('./routes/loads')) },
                 { path: 'loads/:loadId', ...lazyRoute(() => import('./routes/load')) },
+                { path: 'loads/:loadId/judged-again', ...lazyRoute(() => import('./routes/judged-again')) },
                 { path: 'lessons', ...lazyRoute(() => import('./routes/lessons')) },
                 { path: 'lessons/:ruleId', ...lazyRoute(() => import('./routes/lesson')) },
               ],
@@ -92,6 +93,13 @@ export function createRoutes(queryClient: QueryClient): RouteObject[] {
               children: [
                 { path: 'stock', element: <Navigate to="/stock/items" replace /> },
                 { path: 'stock/:shelf', ...lazyRoute(() => import('./routes/stock')) },
+              ],
+            },
+            {
+              element: <RequirePermission any={['policy.view']} />,
+              children: [
+                { path: 'policy', element: <Navigate to="/policy/settings" replace /> },
+                { path: 'policy/:part', ...lazyRoute(() => import('./routes/policy')) },
               ],
             },
             {

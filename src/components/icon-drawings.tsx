@@ -165,6 +165,12 @@ export const iconDrawings = {
       <path d="M8 9V5.5M11 9V4.5M15 15v-3h-4v3" strokeWidth="2" />
     </>
   ),
+  policy: (
+    <>
+      <path d="M2.5 8h19v8h-19z" />
+      <path d="M6.5 8v3M10.25 8v4.5M14 8v3M17.75 8v4.5" />
+    </>
+  ),
   people: (
     <>
       <path d="M9 11a3.5 3.5 0 1 0 0-7 3.5 3.5 0 0 0 0 7zM2.5 20c0-3.5 3-5.5 6.5-5.5s6.5 2 6.5 5.5" />

@@ -1,4 +1,4 @@
-import { loadPolicySchema } from '#contract/policy';
+import { loadPolicySchema, policyChangesSchema } from '#contract/policy';
 import { defaultPolicy, limitOf, policyParameters } from '#domain/load/policy';
 import { mm } from '#domain/units/quantity';
 import { describe, expect, it } from 'vitest';
@@ -40,7 +40,36 @@ describe('a policy on the wire', () => {
   });
 });
 
+describe('what a person wants otherwise', () => {
+  it('is any of the settings, each as a policy takes it, and none that nobody knows', () => {
+    expect(policyChangesSchema.parse({})).toEqual({});
+    for (const { id, range } of quantities) {
+      expect(policyChangesSchema.parse({ [id]: range.least })).toEqual({ [id]: range.least });
+      const refused = policyChangesSchema.safeParse({ [id]: range.greatest + 1 });
+      expect([id, refused.error?.issues[0]?.path]).toEqual([id, [id]]);
+    }
+    for (const { id, choices: known } of choices) {
+      expect(policyChangesSchema.parse({ [id]: known[0]?.value })).toEqual({ [id]: known[0]?.value });
+      expect(policyChangesSchema.safeParse({ [id]: 'either' }).error?.issues[0]?.path).toEqual([id]);
+    }
+    expect(policyChangesSchema.safeParse({ fumesPerFortnight: 3 }).success).toBe(false);
+  });
+
+  it('is refused in the unit of the setting', () => {
+    expect(policyChangesSchema.safeParse({ startTemperatureC: 1000 }).error?.issues[0]?.message).toBe('At most 60 °C.');
+    expect(policyChangesSchema.safeParse({ greatestLeanDeg: 0 }).error?.issues[0]?.message).toBe('At least 5°.');
+    expect(policyChangesSchema.safeParse({ pouchGapMm: -1 }).error?.issues[0]?.message).toBe('At least 0 mm.');
+    expect(policyChangesSchema.safeParse({ pouchGapMm: '12' }).error?.issues[0]?.message).toBe(
+      'Please write a number.',
+    );
+  });
+});
+
 describe('the settings of a policy', () => {
+  it('are exactly those that there is a parameter for', () => {
+    expect(policyParameters.map(({ id }) => id).toSorted()).toEqual(Object.keys(defaultPolicy).toSorted());
+  });
+
   it('have a default inside their range or among their choices, and say where it comes from', () => {
     for (const { id, default: value, range } of quantities) {
       expect([id, value >= range.least && value <= range.greatest, defaultPolicy[id]]).toEqual([id, true, value]);

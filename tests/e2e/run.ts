@@ -9,6 +9,7 @@ import { accessibility } from './journeys/accessibility';
 import { firstLoad } from './journeys/first-load';
 import { importCsv } from './journeys/import-csv';
 import { keyboardOnly } from './journeys/keyboard-only';
+import { policyChange } from './journeys/policy-change';
 import { roles } from './journeys/roles';
 import { scanAnswers } from './journeys/scan-answers';
 import { sessionEnd } from './journeys/session-end';
@@ -27,6 +28,7 @@ const journeys: Readonly<Record<string, Journey>> = {
   roles,
   'keyboard-only': keyboardOnly,
   'import-csv': importCsv,
+  'policy-change': policyChange,
   accessibility,
 };
 

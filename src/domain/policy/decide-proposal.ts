@@ -49,7 +49,8 @@ export function decideProposal({
     );
   }
   const { first, last } = daysToChoose(today);
-  if (effectiveOn < first) return refuse('policy.day-past', 'A change can hold from today on, not from a day before.');
+  if (effectiveOn < first)
+    return refuse('policy.day-past', 'A change can be in force from today on, not from a day before.');
   if (effectiveOn > last) return refuse('policy.day-too-far', 'Choose a day within a year from today.');
   const changes = changesBetween(newest, withStated(newest, stated));
   return changes.length === 0

@@ -27,14 +27,14 @@ afterEach(() => {
 
 describe('the places of a role', () => {
   const expected: Readonly<Record<Role, readonly string[]>> = {
-    technician: ['Today', 'Load', 'Pack', 'Lessons', 'Stock'],
-    lead: ['Today', 'Load', 'Pack', 'Lessons', 'Stock'],
-    supervisor: ['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'People'],
-    'infection-prevention': ['Today', 'Load', 'Lessons', 'Stock'],
+    technician: ['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'Policy'],
+    lead: ['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'Policy'],
+    supervisor: ['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'Policy', 'People'],
+    'infection-prevention': ['Today', 'Load', 'Lessons', 'Stock', 'Policy'],
     'operating-room': ['Today', 'Load', 'Lessons', 'Stock'],
-    engineer: ['Today', 'Load', 'Lessons', 'Stock'],
-    surveyor: ['Today', 'Load', 'Lessons', 'Stock', 'People'],
-    administrator: ['Today', 'Load', 'Lessons', 'Stock', 'People'],
+    engineer: ['Today', 'Load', 'Lessons', 'Stock', 'Policy'],
+    surveyor: ['Today', 'Load', 'Lessons', 'Stock', 'Policy', 'People'],
+    administrator: ['Today', 'Load', 'Lessons', 'Stock', 'Policy', 'People'],
   };
 
   it.each(roles)('of %s are those it may go to, and no dead word', (role) => {
@@ -47,7 +47,7 @@ describe('the frame', () => {
     signedInAs('supervisor');
     const { user } = renderApp('/', withPlainScreens);
     await screen.findByText('The screen of Today');
-    expect(railWords()).toEqual(['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'People']);
+    expect(railWords()).toEqual(['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'Policy', 'People']);
     const link = (name: string) => {
       const [first] = screen.getAllByRole('link', { name });
       if (!first) throw new Error(`no link to ${name}`);

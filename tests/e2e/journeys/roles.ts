@@ -17,21 +17,26 @@ const looking = { mayOpenLoads: false, mayAddItems: false, mayAddPeople: false }
 
 /** Who sees what, written down apart from the program's own table. */
 const expected: Readonly<Record<Role, Sees>> = {
-  technician: { ...looking, rail: ['Today', 'Load', 'Pack', 'Lessons', 'Stock'], mayOpenLoads: true },
-  lead: { ...looking, rail: ['Today', 'Load', 'Pack', 'Lessons', 'Stock'], mayOpenLoads: true, mayAddItems: true },
-  supervisor: {
+  technician: { ...looking, rail: ['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'Policy'], mayOpenLoads: true },
+  lead: {
     ...looking,
-    rail: ['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'People'],
+    rail: ['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'Policy'],
     mayOpenLoads: true,
     mayAddItems: true,
   },
-  'infection-prevention': { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock'] },
+  supervisor: {
+    ...looking,
+    rail: ['Today', 'Load', 'Pack', 'Lessons', 'Stock', 'Policy', 'People'],
+    mayOpenLoads: true,
+    mayAddItems: true,
+  },
+  'infection-prevention': { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock', 'Policy'] },
   'operating-room': { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock'] },
-  engineer: { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock'] },
-  surveyor: { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock', 'People'] },
+  engineer: { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock', 'Policy'] },
+  surveyor: { ...looking, rail: ['Today', 'Load', 'Lessons', 'Stock', 'Policy', 'People'] },
   administrator: {
     mayOpenLoads: false,
-    rail: ['Today', 'Load', 'Lessons', 'Stock', 'People'],
+    rail: ['Today', 'Load', 'Lessons', 'Stock', 'Policy', 'People'],
     mayAddItems: true,
     mayAddPeople: true,
   },
@@ -42,6 +47,7 @@ const addresses: Readonly<Record<string, string>> = {
   Pack: '/pack/station',
   Lessons: '/lessons',
   Stock: '/stock',
+  Policy: '/policy',
   People: '/people',
 };
 
@@ -52,7 +58,7 @@ export const roles: Journey = {
       const sees = expected[person.role];
       const station = await stage.openStation({
         // What a screen shows is asked for while it is found out whether the person may see it.
-        expected: [{ method: 'GET', path: /^\/api\/people$/, status: 403 }],
+        expected: [{ method: 'GET', path: /^\/api\/(people|policies)$/, status: 403 }],
       });
       await signInPage(station).signIn(person);
       const rail = station.getByRole('navigation', { name: 'Main' }).filter({ visible: true });
