@@ -54,7 +54,7 @@ async function mutate(file: string, all: readonly string[]): Promise<Tally> {
   process.env.MUTATION_TESTS = testsFor(file, all).join(',');
   const options: unknown = {
     testRunner: 'vitest',
-    vitest: { configFile: 'scripts/mutation/vitest.config.ts' },
+    vitest: { configFile: 'scripts/mutation/test-config.ts' },
     plugins: ['@stryker-mutator/vitest-runner', path.join(import.meta.dirname, 'ignore-words.mjs')],
     ignorers: ['words'],
     mutate: [file],

@@ -25,15 +25,19 @@ export const headroom: Rule = {
 function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
   const limitOf = ({ shelf }: Body) => shelf.clearHeightMm - scene.policy.headroomMm;
   const isTooHigh = (body: Body) => body.box.top > limitOf(body) + slackMm;
-  const highest = new Map<string, Body>();
+  const tooHigh = new Map<string, { highest: Body; readonly all: Body[] }>();
   for (const body of bodies) {
     // In a stack the first that is too high; in a holder the highest.
     if (!isTooHigh(body) || (body.below && isTooHigh(body.below))) continue;
     const unit = body.holder?.holder.holderId ?? body.packageId;
-    const known = highest.get(unit);
-    if (!known || body.box.top > known.box.top) highest.set(unit, body);
+    const known = tooHigh.get(unit);
+    if (!known) tooHigh.set(unit, { highest: body, all: [body] });
+    else {
+      known.all.push(body);
+      if (body.box.top > known.highest.box.top) known.highest = body;
+    }
   }
-  return [...highest].map(([unit, body]) => {
+  return [...tooHigh].map(([unit, { highest: body, all }]) => {
     const { holder, shelf } = body;
     const limit = limitOf(body);
     const figure = { measured: body.box.top, limit, unit: 'mm', want: 'at-most', limitFrom: 'equipment' } as const;
@@ -43,7 +47,7 @@ function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
       subjects: [unit],
       title: `${scene.thing(body)} ${reaches} ${words.measured} high, ${shelf.name} takes ${words.limit}`,
       remedy: body.below ? 'Take it off the stack.' : 'Put it on a shelf with more height.',
-      places: holder ? [onHolder(holder.holder, body.slot)] : onPackage(body),
+      places: [...(holder ? [onHolder(holder.holder, body.slot)] : []), ...onPackage(...all)],
       figure,
       fixes: (scene) => (holder ? [] : elsewhere(scene, { one: body.package, item: body.item, body })),
     };

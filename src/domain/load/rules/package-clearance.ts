@@ -7,7 +7,7 @@ import type { FindingPlace } from '../finding';
 import type { Body } from '../layout';
 import { moveNamed } from './moves';
 import { clearanceBetween, clearanceMmOf, reachIntoEachOther } from './near-pairs';
-import { onHolder } from './places';
+import { onHolder, onPackage } from './places';
 import type { Draft, Rule } from './rule';
 import { slackMm } from './slack';
 import type { OnShelf, Scene } from './scene';
@@ -71,7 +71,8 @@ function draftOf(scene: Scene, { a, b, measured, limit: { askedBy, ...limit } }:
         ? `${first} touches ${second}, want ${words.limit} between`
         : `${first} is ${words.measured} from ${second}, want ${words.limit}`,
     remedy: 'Move one of them away.',
-    places: [placeOf(a), placeOf(b)],
+    // The holder is where the pin goes, and the package in it is what stands too near.
+    places: [placeOf(a), placeOf(b), ...onPackage(...[a, b].filter((body) => body.holder))],
     figure,
     source: sourceOf(limit.limitFrom, askedBy.item, generalPractice),
     *fixes(scene) {

@@ -24,6 +24,8 @@ function find(scene: Scene, { bodies }: OnShelf): readonly Draft[] {
   return bodies.flatMap((body) => {
     const { item, placement, package: one } = body;
     if (item.kind !== 'pouch' || placement.pose === 'on-edge') return [];
+    // Some instructions ask for flat: as they say, and no other way, it may lie.
+    if (item.pose === 'flat' && placement.pose === 'flat') return [];
     const how = placement.pose === 'flat' ? 'lies flat' : 'is tilted';
     return {
       subjects: [body.packageId],

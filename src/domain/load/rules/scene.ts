@@ -54,7 +54,7 @@ export function sceneOf(view: LoadView, policy: LoadPolicy, before?: Scene): Sce
   const nameOf = (one: LoadPackage) => {
     const name = itemOf.get(one.itemId)?.name;
     if (name === undefined) return one.code;
-    return timesOf.get(one.itemId) === 1 ? name : `${name} ${one.code}`;
+    return timesOf.get(one.itemId) === 1 ? name : `${name} ${one.code}`.trimEnd();
   };
   const renamed = new Set<string>();
   // Both lists are sorted by id, so they are walked side by side.
@@ -99,7 +99,10 @@ export function sceneOf(view: LoadView, policy: LoadPolicy, before?: Scene): Sce
       const holder = holderName(body.holder.holder);
       return body.slot === null ? `${name} in ${holder}` : `${name} in ${holder}, slot ${body.slot}`;
     },
-    shelfIdOf: ({ one, body }) => body?.shelf.id ?? shelfIdOf(view, one.placement),
+    shelfIdOf: ({ one, body }) => {
+      if (body) return body.shelf.id;
+      return layout.nowhere.get(one.packageId) === 'circular' ? undefined : shelfIdOf(view, one.placement);
+    },
   };
 }
 

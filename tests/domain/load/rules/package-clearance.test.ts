@@ -52,6 +52,7 @@ describe('packages stand clear of each other', () => {
         places: [
           { on: 'holder', holderId: 'RS-1', slot: 8 },
           { on: 'package', packageId: 'W-08' },
+          { on: 'package', packageId: 'P-03' },
         ],
       },
     ]);

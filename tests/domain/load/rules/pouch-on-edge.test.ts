@@ -33,4 +33,12 @@ describe('pouches stand on edge', () => {
     const loose = rack.withPackage('P-03', inSlot('RS-1', 1)).withPackage('P-02', onUpper(300, 0, { pose: 'flat' }));
     expect(fixesOf('pouch-on-edge', loose)).toEqual(['Stand it in Holder RS-1, slot 2, paper side left']);
   });
+
+  it('says nothing of a pouch whose instructions ask for flat, as long as it lies as they say', () => {
+    const flat = aLoad().withItemChanged('P-02', { pose: 'flat' });
+    expect(titlesOf('pouch-on-edge', flat.withPackage('P-02', onUpper(0, 0, { pose: 'flat', paper: 'up' })))).toEqual(
+      [],
+    );
+    expect(titlesOf('pouch-on-edge', flat.withPackage('P-02', onUpper(0, 0, { pose: 'tilted' })))).toHaveLength(1);
+  });
 });
