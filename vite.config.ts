@@ -49,6 +49,8 @@ export default defineConfig({
           name: 'client',
           include: ['tests/client/**/*.test.{ts,tsx}'],
           environment: 'jsdom',
+          // Typing key by key on a busy machine.
+          testTimeout: 20_000,
           setupFiles: ['tests/support/client-setup.ts'],
         },
       },
