@@ -42,6 +42,16 @@ describe('the settings', () => {
     expect(screen.queryByText('Propose a change')).not.toBeInTheDocument();
   });
 
+  it('lead to the lesson of each rule that reads them', async () => {
+    openPolicy('technician');
+    await screen.findByRole('heading', { level: 1, name: 'Policy' });
+    const margin = within(rowOf('Share of a shelf’s or a load’s mass limit held back')).getAllByRole('link');
+    expect(margin.map((link) => link.getAttribute('href')).toSorted()).toEqual([
+      '/lessons/load-mass',
+      '/lessons/shelf-mass',
+    ]);
+  });
+
   it('show makers who contradict each other in their own words', async () => {
     openPolicy('technician');
     await screen.findByRole('heading', { level: 1, name: 'Policy' });

@@ -1,5 +1,6 @@
 import type { JudgedAgain } from '#contract/judged-again';
 import { useQuery } from '@tanstack/react-query';
+import type { ReactNode } from 'react';
 import { Code } from '../../../components/ui/code';
 import { PageHead, PanelHead } from '../../../components/ui/heading';
 import { LinkButton } from '../../../components/ui/link-button';
@@ -99,7 +100,7 @@ function Judged({ judged }: { readonly judged: JudgedAgain }) {
 type MeasureProps = {
   readonly title: string;
   readonly measure: Pick<JudgedAgain['then'], 'policyNumber' | 'policyEffectiveOn' | 'ruleSet'>;
-  readonly children: React.ReactNode;
+  readonly children: ReactNode;
 };
 
 /** By what the load was judged, at the head of its column. */

@@ -1,7 +1,10 @@
 import type { PolicyOverview, PolicyVersion } from '#contract/policies';
 import { policyParameters, type PolicyParameter } from '#domain/load/policy';
+import { rules } from '#domain/load/rules/all-rules';
 import type { SettingChange } from '#domain/policy/setting-change';
 import type { SettingValue } from '#domain/policy/settings';
+import { Fragment, type ReactNode } from 'react';
+import { Link } from 'react-router-dom';
 import { PanelHead } from '../../../components/ui/heading';
 import { useFacility } from '../../../lib/facility';
 import { facingWords, provenanceWords, valueWords } from '../setting-words';
@@ -56,7 +59,7 @@ type SettingRowProps = {
   readonly value: SettingValue;
   readonly isDefaulted: boolean;
   readonly proposed: SettingValue | null;
-  readonly children: React.ReactNode;
+  readonly children: ReactNode;
 };
 
 function SettingRow({ parameter, value, isDefaulted, proposed, children }: SettingRowProps) {
@@ -87,8 +90,28 @@ function SettingRow({ parameter, value, isDefaulted, proposed, children }: Setti
         <p className="max-w-[68ch] text-small text-ink-2">
           <span className="font-label text-ink-1">{provenanceWords(parameter)}.</span> {parameter.source.text}
         </p>
+        <RulesOf parameter={parameter} />
       </div>
     </li>
+  );
+}
+
+/** The rules that read this setting, each with its lesson: what a change of it does. */
+function RulesOf({ parameter }: { readonly parameter: PolicyParameter }) {
+  const own = rules.filter((rule) => rule.parameters.includes(parameter.id));
+  if (own.length === 0) return null;
+  return (
+    <p className="mt-0.5 text-small text-ink-2">
+      {own.length === 1 ? 'Rule: ' : 'Rules: '}
+      {own.map(({ id, name }, index) => (
+        <Fragment key={id}>
+          {index > 0 && '; '}
+          <Link to={`/lessons/${id}`} className="text-film-4">
+            {name}
+          </Link>
+        </Fragment>
+      ))}
+    </p>
   );
 }
 
