@@ -1,13 +1,6 @@
-import type { KeptFigure, KeptFinding } from '#domain/policy/compare-findings';
-import type { PinLevel } from '../../components/ui/pin';
+import type { KeptFigure } from '#domain/policy/compare-findings';
 import type { UnitSystem } from '../../lib/facility';
 import { formatLength, formatMass, formatTemperature } from '../../lib/format';
-
-export const levelOf: Readonly<Record<KeptFinding['severity'], PinLevel>> = {
-  stop: 'hold',
-  accept: 'look',
-  advice: 'note',
-};
 
 const wants: Readonly<Record<KeptFigure['want'], string>> = {
   'at-least': 'want at least',

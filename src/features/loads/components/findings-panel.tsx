@@ -1,5 +1,5 @@
 import type { LoadDetail } from '#contract/loads';
-import type { Finding, Fix } from '#domain/load/finding';
+import { ruleIds, type Finding, type Fix } from '#domain/load/finding';
 import type { LetteredFinding } from '../../../components/cart-map/map-model';
 import { Button } from '../../../components/ui/button';
 import { FilmPanel } from '../../../components/ui/film-panel';
@@ -96,7 +96,9 @@ function OpenFinding({
 }: FindingsPanelProps & { entry: LetteredFinding }) {
   const { letter, finding } = entry;
   const { fix } = finding;
-  const openLesson = useLessonOpener();
+  const opener = useLessonOpener();
+  // A closed load may keep a finding of a rule that there is no more; there is no lesson of it either.
+  const openLesson = ruleIds.includes(finding.ruleId) ? opener : null;
   const isMendable = isBuilding && (fix !== null || finding.severity === 'accept');
   return (
     <li className="-ml-3">

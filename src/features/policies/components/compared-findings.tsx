@@ -2,9 +2,9 @@ import type { JudgedAgain } from '#contract/judged-again';
 import type { KeptFinding } from '#domain/policy/compare-findings';
 import type { ReactNode } from 'react';
 import { PanelHead } from '../../../components/ui/heading';
-import { LevelWords, type PinLevel } from '../../../components/ui/pin';
+import { levelOf, LevelWords, type PinLevel } from '../../../components/ui/pin';
 import { useFacility } from '../../../lib/facility';
-import { figureWords, levelOf } from '../finding-words';
+import { figureWords } from '../finding-words';
 
 type Side = { readonly finding: KeptFinding } | { readonly nothing: string };
 
