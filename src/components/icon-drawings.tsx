@@ -108,6 +108,18 @@ export const iconDrawings = {
       <path d="M4 8c2-2 14-2 16 0M4 12c2-2 14-2 16 0M4 16c2-2 14-2 16 0M4 8v10h16V8" />
     </>
   ),
+  basin: (
+    <>
+      <path d="M3 8h18c0 6-4 10-9 10S3 14 3 8z" />
+      <path d="M7.5 8c0 3.5 1.8 5.8 4.5 5.8s4.5-2.3 4.5-5.8" strokeWidth="1.3" />
+    </>
+  ),
+  challenge: (
+    <>
+      <path d="M3 6h18v12H3z" />
+      <path d="M6.5 9.5h11v5h-11z" fill="currentColor" stroke="none" />
+    </>
+  ),
   implant: (
     <>
       <path d="M12 2.5 21 12l-9 9.5L3 12z" />

@@ -6,8 +6,8 @@ const icons: Readonly<Record<ItemKind, IconName>> = {
   'rigid-container': 'box',
   'wrapped-tray': 'tray',
   'textile-pack': 'textile',
-  basin: 'drop',
-  'challenge-device': 'lock',
+  basin: 'basin',
+  'challenge-device': 'challenge',
 };
 
 const words: Readonly<Record<ItemKind, readonly [one: string, many: string]>> = {

@@ -80,7 +80,7 @@ export function BasinSide({
   pose: Pose;
   /** Radians, where the tilt is seen from its side; 0 where it is seen along. */
   lean?: number;
-  label?: string;
+  label?: string | undefined;
 }) {
   const profile = bowlIn(box, pose, lean);
   const [low, high] = profile.rim;
@@ -101,7 +101,7 @@ export function BasinSide({
 }
 
 /** Basins from above: one within the other. */
-export function BasinPlan({ box, label }: { box: PixelBox; label?: string }) {
+export function BasinPlan({ box, label }: { box: PixelBox; label?: string | undefined }) {
   const { x, y, width: w, height: h } = box;
   return (
     <g>

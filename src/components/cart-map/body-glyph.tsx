@@ -21,18 +21,18 @@ function thickened(box: PixelBox, along: 'width' | 'height'): PixelBox {
     : { ...box, y: box.y - missing, height: box.height + 2 * missing };
 }
 
-function PouchFront({ body, box }: { body: Body; box: PixelBox }) {
+function PouchFront({ body, box, label }: { body: Body; box: PixelBox; label: string | undefined }) {
   if (body.thinAxis === 'x') return <Leaf box={thickened(box, 'width')} isPaperFirst={body.paperLooks !== 'right'} />;
-  if (body.thinAxis === 'y') return <LeafFace box={box} isPaper={body.paperLooks === 'front'} label={body.item.code} />;
+  if (body.thinAxis === 'y') return <LeafFace box={box} isPaper={body.paperLooks === 'front'} label={label} />;
   return <Leaf box={thickened(box, 'height')} isAcross isPaperFirst={body.paperLooks !== 'up'} />;
 }
 
-function PouchPlan({ body, box }: { body: Body; box: PixelBox }) {
+function PouchPlan({ body, box, label }: { body: Body; box: PixelBox; label: string | undefined }) {
   if (body.thinAxis === 'x') return <Leaf box={thickened(box, 'width')} isPaperFirst={body.paperLooks !== 'right'} />;
   if (body.thinAxis === 'y') {
     return <Leaf box={thickened(box, 'height')} isAcross isPaperFirst={body.paperLooks !== 'back'} />;
   }
-  return <LeafFace box={box} isPaper={body.paperLooks === 'up'} label={body.item.code} />;
+  return <LeafFace box={box} isPaper={body.paperLooks === 'up'} label={label} />;
 }
 
 /** How far a basin leans to the side, seen from the door end: not at all where it leans toward the door or away from it. */
@@ -42,11 +42,10 @@ function leanSeen({ item, box, placement, lengthAxis }: Body): number {
 }
 
 /** A package as it looks from the door end. */
-export function BodyFront({ body, box }: { body: Body; box: PixelBox }) {
-  const label = body.item.code;
+export function BodyFront({ body, box, label }: { body: Body; box: PixelBox; label: string | undefined }) {
   switch (body.item.kind) {
     case 'pouch':
-      return <PouchFront body={body} box={box} />;
+      return <PouchFront body={body} box={box} label={label} />;
     case 'rigid-container':
       return <ContainerFront box={box} label={label} />;
     case 'wrapped-tray':
@@ -64,16 +63,17 @@ export function BodyFront({ body, box }: { body: Body; box: PixelBox }) {
 export function BodyPlan({
   body,
   box,
+  label,
   toPixels,
 }: {
   body: Body;
   box: PixelBox;
+  label: string | undefined;
   toPixels: (rect: PlanRect) => PixelBox;
 }) {
-  const label = body.item.code;
   switch (body.item.kind) {
     case 'pouch':
-      return <PouchPlan body={body} box={box} />;
+      return <PouchPlan body={body} box={box} label={label} />;
     case 'rigid-container':
       return <ContainerPlan box={box} label={label} filters={filterRects(body, 'lid').map(toPixels)} />;
     case 'wrapped-tray':

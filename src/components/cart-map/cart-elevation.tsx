@@ -3,7 +3,7 @@ import type { LoadView, Shelf } from '#domain/load/model';
 import { memo, useMemo } from 'react';
 import { BodyFront } from './body-glyph';
 import { Drain, GhostLeaf, NextSpot, type PixelBox } from './glyphs';
-import { anchorOf, freeSlots, ghostSlotBox, type LetteredFinding, type NextPlace } from './map-model';
+import { anchorOf, freeSlots, ghostSlotBox, withFreeLabels, type LetteredFinding, type NextPlace } from './map-model';
 import { MapDrawing, usePattern } from './map-patterns';
 import { MapPin } from './map-pin';
 import { spreadPins } from './spread-pins';
@@ -11,7 +11,8 @@ import { spreadPins } from './spread-pins';
 /** Of the drawing only: how thick a shelf's deck is. */
 const deckMm = 16;
 const topMarginPx = 18;
-const footPx = 20;
+/** Room for the drain and its word, within the chamber. */
+const footPx = 24;
 
 type Box = { readonly left: number; readonly right: number; readonly bottom: number; readonly top: number };
 
@@ -90,7 +91,7 @@ export const CartElevation = memo(function CartElevation({
   return (
     <MapDrawing width={width} height={height} label={`${view.cart.name} from the door end`}>
       <path
-        d={`M1 ${topMarginPx - 12}h${chamberWidthMm * scale + 2}v${floor - topMarginPx + 20}h${-(chamberWidthMm * scale + 2)}z`}
+        d={`M1 ${topMarginPx - 12}h${chamberWidthMm * scale + 2}v${height - topMarginPx + 11}h${-(chamberWidthMm * scale + 2)}z`}
         fill="none"
         strokeWidth="1"
         strokeDasharray="1 3"
@@ -157,11 +158,12 @@ export const CartElevation = memo(function CartElevation({
               </g>
             );
           })}
-          {[...bodies]
-            .sort((a, b) => b.box.front - a.box.front || a.box.bottom - b.box.bottom)
-            .map((body) => (
-              <BodyFront key={body.packageId} body={body} box={toPixels(shelf, body.box)} />
-            ))}
+          {withFreeLabels(
+            [...bodies].sort((a, b) => b.box.front - a.box.front || a.box.bottom - b.box.bottom),
+            (body) => toPixels(shelf, body.box),
+          ).map(({ body, box, label }) => (
+            <BodyFront key={body.packageId} body={body} box={box} label={label} />
+          ))}
           {next?.shelfId === shelf.id && <NextSpot box={toPixels(shelf, next.box)} />}
         </g>
       ))}

@@ -6,10 +6,10 @@ export type PixelBox = { readonly x: number; readonly y: number; readonly width:
 type GlyphProps = {
   readonly box: PixelBox;
   /** Short name shown where there is room for it. */
-  readonly label?: string;
+  readonly label?: string | undefined;
 };
 
-const roomForLabel = { width: 30, height: 16 };
+const roomForLabel = { width: 30, height: 14 };
 
 /** A label inside a drawing: never below 12 px, left out where it does not fit. */
 export function MapText({
@@ -36,6 +36,12 @@ export function MapText({
   );
 }
 
+/** The middle of a thing, where its label stands: a rough box, wide enough for the letters. */
+export function labelBox(label: string, box: PixelBox): PixelBox {
+  const width = label.length * 6.7 + 8;
+  return { x: box.x + box.width / 2 - width / 2, y: box.y + box.height / 2 - 9, width, height: 18 };
+}
+
 function isRoomFor(label: string, box: PixelBox): boolean {
   // About 6.7 px a character at 12 px in our face.
   return box.height >= roomForLabel.height && box.width >= Math.max(roomForLabel.width, label.length * 6.7 + 4);
@@ -43,12 +49,10 @@ function isRoomFor(label: string, box: PixelBox): boolean {
 
 export function CentredLabel({ box, label, ground }: { box: PixelBox; label: string | undefined; ground: string }) {
   if (label === undefined || !isRoomFor(label, box)) return null;
-  const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
-  const width = label.length * 6.7 + 8;
   return (
     <>
-      <rect x={x - width / 2} y={y - 9} width={width} height={18} className={ground} />
-      <MapText x={x} y={y + 4} anchor="middle" weight={560}>
+      <rect {...labelBox(label, box)} className={ground} />
+      <MapText x={box.x + box.width / 2} y={box.y + box.height / 2 + 4} anchor="middle" weight={560}>
         {label}
       </MapText>
     </>

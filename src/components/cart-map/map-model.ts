@@ -3,12 +3,38 @@ import { slotMiddle, type Body, type HolderBody, type Layout } from '#domain/loa
 import { boxAt, type ShelfBox } from '#domain/geometry/box';
 import { footprintOf } from '#domain/geometry/footprint';
 import type { CatalogueItem, Placement } from '#domain/load/model';
+import { labelBox, type PixelBox } from './glyphs';
 
 /** A finding with the letter it has on the map, in the list and in the gate. */
 export type LetteredFinding = { readonly letter: string; readonly finding: Finding };
 
 /** Where the next package goes, as a box on its shelf. */
 export type NextPlace = { readonly shelfId: string; readonly box: ShelfBox; readonly placement: Placement };
+
+type Painted = { readonly body: Body; readonly box: PixelBox; readonly label: string | undefined };
+
+/**
+ * Puts its item's code to each thing, in the order of painting, but where something painted later lies over the letters:
+ * half a code is worse than none, and what stands in front has its own.
+ */
+export function withFreeLabels(painted: readonly Body[], toPixels: (body: Body) => PixelBox): Painted[] {
+  const boxes = painted.map(toPixels);
+  return painted.map((body, index) => {
+    const box = toPixels(body);
+    const letters = labelBox(body.item.code, box);
+    const isCovered = boxes.slice(index + 1).some((later) => isOver(later, letters));
+    return { body, box, label: isCovered ? undefined : body.item.code };
+  });
+}
+
+function isOver(one: PixelBox, other: PixelBox): boolean {
+  return (
+    one.x < other.x + other.width &&
+    other.x < one.x + one.width &&
+    one.y < other.y + other.height &&
+    other.y < one.y + one.height
+  );
+}
 
 /** A slot of a rack as the box a pouch of the given height and length would fill. */
 export function slotBox(

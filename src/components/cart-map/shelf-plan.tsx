@@ -6,7 +6,15 @@ import type { LoadView, Shelf } from '#domain/load/model';
 import { memo, useRef, useState, type KeyboardEvent } from 'react';
 import { BodyPlan, type PlanRect } from './body-glyph';
 import { GhostLeaf, MapText, NextSpot, type PixelBox } from './glyphs';
-import { anchorOf, freeSlots, ghostSlotBox, subjectsOf, type LetteredFinding, type NextPlace } from './map-model';
+import {
+  anchorOf,
+  freeSlots,
+  ghostSlotBox,
+  subjectsOf,
+  withFreeLabels,
+  type LetteredFinding,
+  type NextPlace,
+} from './map-model';
 import { MapDrawing, usePattern } from './map-patterns';
 import { MapPin } from './map-pin';
 import { spreadPins } from './spread-pins';
@@ -82,11 +90,11 @@ export const ShelfPlan = memo(function ShelfPlan(props: ShelfPlanProps) {
         toPixels={toPixels}
         describe={(body) => `${body.item.name}, ${placementWords(view, body.placement, body.item)}`}
       />
+      {next?.shelfId === shelf.id && <NextSpot box={toPixels(next.box)} />}
       {holders.map((holder) => (
         <HolderLabel key={holder.holder.holderId} holder={holder} bodies={bodies} toPixels={toPixels} />
       ))}
       <Gaps findings={findings} layout={layout} shelf={shelf} toPixels={toPixels} />
-      {next?.shelfId === shelf.id && <NextSpot box={toPixels(next.box)} />}
       {pins.map(({ x, y, letter, finding }) => (
         <MapPin
           key={finding.key}
@@ -220,8 +228,7 @@ function Bodies({ bodies, toPixels, describe, findings, pickedPackageId, onPacka
 
   return (
     <g ref={group}>
-      {painted.map((body) => {
-        const box = toPixels(body.box);
+      {withFreeLabels(painted, (body) => toPixels(body.box)).map(({ body, box, label }) => {
         const index = order.get(body.packageId) ?? 0;
         return (
           <g
@@ -243,7 +250,7 @@ function Bodies({ bodies, toPixels, describe, findings, pickedPackageId, onPacka
                 }
               : {})}
           >
-            <BodyPlan body={body} box={box} toPixels={toPixels} />
+            <BodyPlan body={body} box={box} label={label} toPixels={toPixels} />
             {stopped.has(body.packageId) && <rect {...box} fill={bad} opacity={0.3} />}
             {body.packageId === pickedPackageId && (
               <rect

@@ -50,7 +50,9 @@ export type LoadBox = {
   readonly row: number;
 };
 
-const leastBox = 46;
+/** Its count and its mark; an implant has a mark of its own. */
+const leastBox = 61;
+const leastBoxWithImplant = 84;
 /** A load being built says so in words, which need room. */
 const leastBuildingBox = 158;
 const gap = 4;
@@ -71,7 +73,8 @@ export function loadBoxes(sterilizer: TodaySterilizer, span: TimeSpan, width: nu
     const isBuilding = load.state === 'building';
     const from = Math.max(0, xOf(Date.parse(load.openedAt), span, width));
     const to = xOf(load.closedAt === null ? now.getTime() : Date.parse(load.closedAt), span, width);
-    const boxWidth = Math.max(to - from, isBuilding ? leastBuildingBox : leastBox);
+    const least = isBuilding ? leastBuildingBox : load.implants > 0 ? leastBoxWithImplant : leastBox;
+    const boxWidth = Math.max(to - from, least);
     const left = Math.min(from, width - boxWidth);
     const extent = { left, right: left + boxWidth };
     const row = firstFreeRow(rows, extent);

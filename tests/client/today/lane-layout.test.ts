@@ -79,6 +79,16 @@ describe('the boxes of a lane', () => {
     );
   });
 
+  it('have room for their count and their marks, however short the load was open', () => {
+    const brief = { state: 'closed', openedAt: '2026-03-17T09:00:00Z', closedAt: '2026-03-17T09:01:00Z' } as const;
+    const widths = [aLoad({ ...brief, implants: 0 }), aLoad({ ...brief, implants: 1 })].map(
+      (load) => loadBoxes(aSterilizer({ loads: [load] }), span, width, now)[0]?.width ?? 0,
+    );
+    // In px: edge and inset 9.5, two digits 18, a gap 8, a mark 15, inset and edge 9.5; another gap and mark 23.
+    expect(widths[0]).toBeGreaterThanOrEqual(60);
+    expect(widths[1]).toBeGreaterThanOrEqual(83);
+  });
+
   it('take a second line when there is no room on the first', () => {
     const loads = [aLoad(), aLoad({ id: '0190f000-0000-7000-8000-000000000702', countOfDay: 2 })];
     expect(loadBoxes(aSterilizer({ loads }), span, width, now).map((box) => box.row)).toEqual([0, 1]);

@@ -106,13 +106,7 @@ export function ProgramForm({
         <QuantityField control={control} name="temperatureC" quantity="temperature" label="Temperature" />
         <QuantityField control={control} name="exposureS" quantity="minutes" label="Exposure" />
         <QuantityField control={control} name="dryS" quantity="minutes" label="Dry" />
-        <QuantityField
-          control={control}
-          name="greatestLoadMassKg"
-          quantity="mass"
-          label="Greatest load mass"
-          isOptional
-        />
+        <QuantityField control={control} name="greatestLoadMassKg" quantity="mass" label="Greatest mass" isOptional />
         {program !== null && (
           <CheckboxField
             label="Retired"

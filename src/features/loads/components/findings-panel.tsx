@@ -2,6 +2,7 @@ import type { LoadDetail } from '#contract/loads';
 import { ruleIds, type Finding, type Fix } from '#domain/load/finding';
 import type { LetteredFinding } from '../../../components/cart-map/map-model';
 import { Button } from '../../../components/ui/button';
+import { TextWithCodes } from '../../../components/ui/code';
 import { FilmPanel } from '../../../components/ui/film-panel';
 import { PanelHead } from '../../../components/ui/heading';
 import { levelOf, LevelWords, Pin } from '../../../components/ui/pin';
@@ -48,7 +49,9 @@ export function FindingsPanel(props: FindingsPanelProps) {
               >
                 <Pin letter={entry.letter} level={levelOf[entry.finding.severity]} isLevelSaid />
                 <span>
-                  <span className="block text-row leading-[1.15rem] font-semibold">{entry.finding.title}</span>
+                  <span className="block text-row leading-[1.15rem] font-semibold">
+                    <TextWithCodes>{entry.finding.title}</TextWithCodes>
+                  </span>
                   <span className="text-least text-ink-2">
                     <LevelWords level={levelOf[entry.finding.severity]} />
                     {entry.finding.fix && <span className="ml-2.5">can be put right by touch</span>}
@@ -114,7 +117,7 @@ function OpenFinding({
             }}
             className="min-h-6 w-full text-left text-row leading-[1.15rem] font-semibold"
           >
-            {finding.title}
+            <TextWithCodes>{finding.title}</TextWithCodes>
           </button>
           <p className="mt-0.5 text-small">{finding.reason}</p>
           <p className="mt-1 text-small">

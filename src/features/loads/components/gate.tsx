@@ -2,9 +2,11 @@ import type { Block, CloseDecision } from '#domain/load/decide-close';
 import { Icon } from '../../../components/icon';
 import type { LetteredFinding } from '../../../components/cart-map/map-model';
 import { Button } from '../../../components/ui/button';
+import { TextWithCodes } from '../../../components/ui/code';
 import { levelOf, Pin } from '../../../components/ui/pin';
 
-const shownBlocks = 4;
+/** More would leave no room for their words at 1280 px. */
+const shownBlocks = 3;
 
 type GateProps = {
   readonly decision: CloseDecision;
@@ -67,7 +69,9 @@ export function Gate({ decision, open, isClosing, mayClose, onBlock, onClose }: 
                 block={block}
                 letter={block.kind === 'finding' ? letterOf.get(block.finding.key) : undefined}
               />
-              <span className="line-clamp-2 leading-[1.1rem]">{block.label}</span>
+              <span className="line-clamp-2 leading-[1.1rem]">
+                <TextWithCodes>{block.label}</TextWithCodes>
+              </span>
             </button>
           </li>
         ))}

@@ -1,4 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
+import { TextWithCodes } from '../../../components/ui/code';
 import { Dialog } from '../../../components/ui/dialog';
 import { EmptyState, WaitingState, WrongState } from '../../../components/ui/states';
 import { DateText } from '../../../components/ui/time';
@@ -19,7 +20,9 @@ export function HistorySheet({ loadId, number, onClose }: { loadId: string; numb
                 key={event.id}
                 className="grid gap-x-6 border-t border-paper-3 py-2 first:border-t-0 tablet:grid-cols-[minmax(0,1fr)_auto]"
               >
-                <p className="[overflow-wrap:anywhere]">{event.sentence}</p>
+                <p className="[overflow-wrap:anywhere]">
+                  <TextWithCodes>{event.sentence}</TextWithCodes>
+                </p>
                 <p className="text-small text-ink-2">
                   {event.who}, <DateText at={event.at} form="with-time" />
                 </p>

@@ -122,7 +122,7 @@ export const LoadBoard = memo(function LoadBoard({
 
   return (
     <>
-      <div className="grid min-h-0 flex-1 gap-5 px-4 pt-2.5 tablet:grid-cols-[minmax(0,1fr)_21.5rem] desk:grid-cols-[minmax(0,1fr)_24rem]">
+      <div className="grid min-h-0 flex-1 gap-5 px-4 pt-2.5 pb-2 tablet:grid-cols-[minmax(0,1fr)_21.5rem] desk:grid-cols-[minmax(0,1fr)_24rem]">
         <div ref={sizeRef} className="min-h-0 min-w-0">
           {size && (
             <LoadMap

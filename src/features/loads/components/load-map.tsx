@@ -15,6 +15,8 @@ const headPx = 28;
 /** Greatest scale, px per mm: beyond it a drawing only grows, and says no more. */
 const greatestScale = 0.52;
 const leastCloseUpPx = 178;
+/** The words over the plan take this much, however narrow the shelf is drawn. */
+const leastPlanPx = 258;
 
 export type MapFocus = { readonly shelfId: string | null; readonly holderId: string | null };
 
@@ -62,12 +64,15 @@ export function LoadMap(props: LoadMapProps) {
     return entry ? nextPlaceOf(layout, entry.placement, item) : null;
   }, [layout, taken, view]);
   const shelf = view.cart.shelves.find((one) => one.id === focus.shelfId) ?? view.cart.shelves[0];
-  const holder = focus.holderId === null ? undefined : layout.holderOf.get(focus.holderId);
+  // Where nobody looks at a rack, the first one keeps its place on the screen: nothing jumps.
+  const racks = layout.holders.filter((one) => one.kind.form === 'rack');
+  const holder = focus.holderId === null ? racks[0] : layout.holderOf.get(focus.holderId);
   const inHolder = useMemo(
     () => (holder ? layout.bodies.filter((body) => body.holder === holder) : []),
     [holder, layout],
   );
   if (!shelf) return null;
+  const planWide = Math.max(planWidth(shelf, scale), leastPlanPx);
 
   const elevation = (
     <CartElevation
@@ -91,7 +96,7 @@ export function LoadMap(props: LoadMapProps) {
     />
   );
   const plan = (
-    <div className="flex-none">
+    <div className="flex-none" style={isPhone ? {} : { width: planWide }}>
       <PanelHead title={`${shelf.name}, from above`} aside={`${shelf.depthMm} mm`} />
       <ShelfPlan
         view={view}
@@ -110,7 +115,7 @@ export function LoadMap(props: LoadMapProps) {
     </div>
   );
   const elevationWide = elevationWidth(view, scale);
-  const leftWide = isPhone ? size.width : size.width - planWidth(shelf, scale) - 20;
+  const leftWide = isPhone ? size.width : size.width - planWide - 20;
   const closeUpHigh = isPhone ? 220 : Math.min(260, size.height - 2 * headPx - elevationHeight(view, scale) - 8);
   const closeUp = holder && (holder.kind.slots ?? 0) > 0 && (
     <div>

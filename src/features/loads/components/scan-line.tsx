@@ -9,6 +9,8 @@ import { Code } from '../../../components/ui/code';
 import { FilmPanel } from '../../../components/ui/film-panel';
 import { ScanMark } from '../../../components/ui/scan-answer';
 import { Time } from '../../../components/ui/time';
+import { useFacility } from '../../../lib/facility';
+import { formatSize } from '../../../lib/format';
 import { lookOf } from '../answers';
 
 /** What the person scanned last, as far as this station knows. */
@@ -25,6 +27,7 @@ function currentPlaceWords(view: LoadView, place: ScanPlace | null): string {
 }
 
 function Said({ view, last, waiting }: { view: LoadView; last: LastScan; waiting: number }) {
+  const { unitSystem } = useFacility();
   if (last.kind === 'none') {
     return (
       <div className="flex min-w-0 gap-4">
@@ -68,7 +71,10 @@ function Said({ view, last, waiting }: { view: LoadView; last: LastScan; waiting
           Last scan, <Time at={reply.at} withSeconds />
           {waiting > 0 && <span className="ml-3 font-semibold text-ink-1">{waiting} more under way</span>}
         </p>
-        <p className="truncate text-scan max-tablet:text-say" title={reply.package?.itemName}>
+        <p
+          className="truncate text-scan max-tablet:line-clamp-2 max-tablet:text-say max-tablet:whitespace-normal"
+          title={reply.package?.itemName}
+        >
           {reply.package?.itemName ??
             (reply.answer === 'place-set' ? (
               currentPlaceWords(view, reply.place)
@@ -83,9 +89,10 @@ function Said({ view, last, waiting }: { view: LoadView; last: LastScan; waiting
           ) : (
             item && (
               <span className="text-ink-2">
-                {item.code}
-                <span className="mx-2" />
-                {Math.round(item.widthMm)} × {Math.round(item.lengthMm)} mm
+                <span className="max-tablet:hidden">
+                  <Code>{item.code}</Code>
+                  <span className="ml-4">{formatSize([item.widthMm, item.lengthMm], unitSystem)}</span>
+                </span>
                 {item.isImplant && <b className="ml-3 font-semibold text-ink-1">Implant</b>}
               </span>
             )

@@ -1,18 +1,9 @@
-import type { ItemKind, LoadView } from '#domain/load/model';
+import type { LoadView } from '#domain/load/model';
 import { useState } from 'react';
-import { Icon, type IconName } from '../../../components/icon';
+import { KindIcon } from '../../../components/item-kind';
 import { Button } from '../../../components/ui/button';
 import { Code } from '../../../components/ui/code';
 import { PanelHead } from '../../../components/ui/heading';
-
-export const kindIcons: Readonly<Record<ItemKind, IconName>> = {
-  pouch: 'pouch',
-  'rigid-container': 'box',
-  'wrapped-tray': 'tray',
-  'textile-pack': 'textile',
-  basin: 'drop',
-  'challenge-device': 'lock',
-};
 
 const shownAtFirst = 5;
 
@@ -59,7 +50,7 @@ export function StillOnTheTable({ view, onPackage }: StillOnTheTableProps) {
                 }}
                 className="grid min-h-6 w-full grid-cols-[1.25rem_1fr_auto] items-center gap-1.5 py-0.5 text-left text-small hover:bg-paper-0 max-tablet:min-h-11"
               >
-                <Icon name={item ? kindIcons[item.kind] : 'pouch'} size={15} />
+                <KindIcon kind={item?.kind ?? 'pouch'} size={15} />
                 <span className="truncate">
                   {item?.name}
                   {entry.isScanned && <b className="ml-2 font-label text-straw-3">no place yet</b>}
