@@ -85,7 +85,6 @@ function sightsOfPolicy(closed: string): readonly Sight[] {
   return [
     { name: 'The policy, with a change proposed', address: '/policy/settings' },
     { name: 'Confirming a change', address: '/policy/settings', show: press(/^Confirm version/) },
-    { name: 'Refusing a change', address: '/policy/settings', show: press('Refuse it') },
     {
       name: 'Versions of the policy',
       address: '/policy/versions',
