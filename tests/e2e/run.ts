@@ -32,7 +32,7 @@ const journeys: Readonly<Record<string, Journey>> = {
   accessibility,
 };
 
-const journeyLimitMs = 360_000;
+const journeyLimitMs = 600_000;
 /** A page that is still busy with what was told last may never let itself be closed. */
 const closingLimitMs = 20_000;
 
