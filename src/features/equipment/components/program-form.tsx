@@ -128,7 +128,7 @@ export function ProgramForm({
           kind="stop"
           onConfirm={() => sendFields(asking)}
         >
-          {`It is another cycle now. No load can be opened with it on ${listInWords(qualifiedOn)} until somebody says there that it is qualified again; a load being built with it cannot be closed.`}
+          {`With this change it is another cycle. No load can be opened with it on ${listInWords(qualifiedOn)} until somebody says there that it is qualified again; a load being built with it cannot be closed.`}
         </ConfirmDialog>
       )}
     </FormPage>

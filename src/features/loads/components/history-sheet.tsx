@@ -14,7 +14,8 @@ export function HistorySheet({ loadId, number, onClose }: { loadId: string; numb
         history.data.length === 0 ? (
           <EmptyState title="Nothing yet" level={3} />
         ) : (
-          <ol aria-label="What happened">
+          // Reached by Tab, so that a keyboard can scroll it.
+          <ol aria-label="What happened" tabIndex={0}>
             {history.data.map((event) => (
               <li
                 key={event.id}
